@@ -1,0 +1,2 @@
+/** What a chart shows, as plain records, then the drawing of it. */
+package sliprung.chart;

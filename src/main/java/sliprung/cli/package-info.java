@@ -1,0 +1,2 @@
+/** The commands; the only main, the only exit, the only clock. */
+package sliprung.cli;

@@ -1,0 +1,2 @@
+/** Numerical methods, thin over Commons Math and named for what we need. */
+package sliprung.numeric;

@@ -1,0 +1,2 @@
+/** Units of the trade: reading {@code 690 V}, printing with three significant figures. */
+package sliprung.quantity;

@@ -1,0 +1,2 @@
+/** The record of a review: JSON, CSV, HTML. */
+package sliprung.record;

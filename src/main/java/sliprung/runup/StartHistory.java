@@ -1,0 +1,65 @@
+package sliprung.runup;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * One computed start.
+ *
+ * @param scenario what was supposed to happen
+ * @param conditions the circumstances
+ * @param outcome how it ended
+ * @param stages in order; of a fault the last one runs to the end of the history
+ * @param running after a permitted start: thirty minutes at running load; empty otherwise
+ * @param lastClosingSeconds when the last step contactor closed; empty: it never did
+ * @param runUpSeconds line closing until the last step has closed and the speed is within 0.5 % of
+ *     the speed it settles at; empty: never
+ * @param levelNeverReached number of the step whose level was never reached; 0 if none
+ */
+public record StartHistory(
+    Scenario scenario,
+    Conditions conditions,
+    Outcome outcome,
+    List<Stage> stages,
+    Optional<Stage> running,
+    OptionalDouble lastClosingSeconds,
+    OptionalDouble runUpSeconds,
+    int levelNeverReached) {
+
+  /** Length in seconds of a fault's history and of the running after a permitted start. */
+  public static final double HORIZON_SECONDS = 1800.0;
+
+  /** Copies the list. */
+  public StartHistory {
+    stages = List.copyOf(stages);
+  }
+
+  /** Every stage with its samples, the running after the start included. */
+  public List<Stage> everything() {
+    if (running.isEmpty()) {
+      return stages;
+    }
+    java.util.ArrayList<Stage> all = new java.util.ArrayList<>(stages);
+    all.add(running.get());
+    return all;
+  }
+
+  /** End of the history, s. */
+  public double endSeconds() {
+    return running.map(Stage::toSeconds).orElseGet(() -> stages.get(stages.size() - 1).toSeconds());
+  }
+
+  /** When the rotor first moved is not kept; this tells whether it ever did. */
+  public boolean everMoved() {
+    for (Stage stage : stages) {
+      double[] speed = stage.trace().speed();
+      for (double w : speed) {
+        if (Math.abs(w) > 0.0) {
+          return true;
+        }
+      }
+    }
+    return false;
+  }
+}

@@ -1,0 +1,135 @@
+package sliprung.starter;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.TreeMap;
+
+/**
+ * One rotor-resistance starter as described by its user.
+ *
+ * @param name tag shown on every page
+ * @param practice rule book, iec or nec
+ * @param supply source
+ * @param motor plate and limits
+ * @param load driven machine
+ * @param resistors rotor bank
+ * @param steps what cuts out each section, in order; one entry a section
+ * @param sequence how the step timers are started
+ * @param timerSpread of every timer, per unit
+ * @param levelSpread of every level, per unit
+ * @param contactors by tag, in the file's order
+ * @param breakers by tag, in the file's order
+ * @param protection devices, in the file's order
+ * @param statorConductor cable to the stator
+ * @param rotorConductor cable from the rings to the bank
+ * @param duty starts and how often
+ * @param limits what the plant asks for
+ * @param margins wanted margins of the user's own, by rule
+ * @param fuseWear share K of the pre-arcing current that a start may use, per unit
+ * @param interlocks declared interlocks
+ * @param ambient air temperatures
+ * @param evidence how well an input is known, by its path in the file
+ * @param accepted deviations someone answers for
+ * @param assumptions defaults that were filled in
+ * @param notYetJudged keys that were read and are kept for rules not built yet
+ */
+public record Starter(
+    String name,
+    Practice practice,
+    Supply supply,
+    Motor motor,
+    Load load,
+    ResistorBank resistors,
+    List<Step> steps,
+    Sequence sequence,
+    double timerSpread,
+    double levelSpread,
+    List<Contactor> contactors,
+    List<Breaker> breakers,
+    List<Device> protection,
+    Optional<Conductor> statorConductor,
+    Optional<Conductor> rotorConductor,
+    Duty duty,
+    Limits limits,
+    Map<String, Double> margins,
+    double fuseWear,
+    Interlocks interlocks,
+    Ambient ambient,
+    Map<String, EvidenceGrade> evidence,
+    List<AcceptedDeviation> accepted,
+    List<Assumption> assumptions,
+    List<String> notYetJudged) {
+
+  /** The rule book a starter is held against. */
+  public enum Practice {
+    IEC,
+    NEC
+  }
+
+  /** Who starts whose timer. */
+  public enum Sequence {
+    /** A step's timer starts when the step before has closed. */
+    CHAINED,
+    /** A step's timer starts when the timer before has elapsed. */
+    CASCADED
+  }
+
+  /** Copies the collections and checks that each section has its step. */
+  public Starter {
+    steps = List.copyOf(steps);
+    contactors = List.copyOf(contactors);
+    breakers = List.copyOf(breakers);
+    protection = List.copyOf(protection);
+    margins = new TreeMap<>(margins);
+    evidence = new TreeMap<>(evidence);
+    accepted = List.copyOf(accepted);
+    assumptions = List.copyOf(assumptions);
+    notYetJudged = List.copyOf(notYetJudged);
+    if (steps.size() != resistors.sections().size()) {
+      throw new IllegalArgumentException(
+          steps.size() + " steps for " + resistors.sections().size() + " sections");
+    }
+  }
+
+  /** The contactor of that tag. */
+  public Optional<Contactor> contactor(String tag) {
+    return contactors.stream().filter(c -> c.tag().equals(tag)).findFirst();
+  }
+
+  /** The breaker of that tag. */
+  public Optional<Breaker> breaker(String tag) {
+    return breakers.stream().filter(b -> b.tag().equals(tag)).findFirst();
+  }
+
+  /** The device of that tag. */
+  public Optional<Device> device(String tag) {
+    return protection.stream().filter(d -> d.tag().equals(tag)).findFirst();
+  }
+
+  /** The contactors that close the stator, usually one. */
+  public List<Contactor> lineContactors() {
+    return contactors.stream().filter(c -> c.place() == Contactor.Place.LINE).toList();
+  }
+
+  /**
+   * Opening time in seconds of a contactor or breaker: the time from the order to the parting of
+   * its main contacts; empty where nothing of that tag is described.
+   */
+  public OptionalDouble openingSeconds(String tag) {
+    Optional<Contactor> contactor = contactor(tag);
+    if (contactor.isPresent()) {
+      return OptionalDouble.of(contactor.get().openingSeconds());
+    }
+    Optional<Breaker> breaker = breaker(tag);
+    return breaker.isPresent()
+        ? OptionalDouble.of(breaker.get().openingSeconds())
+        : OptionalDouble.empty();
+  }
+
+  /** Number of sections of the bank. */
+  public int sectionCount() {
+    return resistors.sections().size();
+  }
+}
