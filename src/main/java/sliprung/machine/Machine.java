@@ -104,4 +104,19 @@ public final class Machine {
     double x = circuit.x1() + source.reactance() + circuit.xm();
     return source.volts() * circuit.xm() / Math.hypot(circuit.r1(), x) / circuit.ratio();
   }
+
+  /**
+   * Slip of the breakdown torque, {@code R/√(Rt² + (Xt + X2)²)} with the Thevenin impedance of
+   * stator, source and magnetizing branch.
+   */
+  public double breakdownSlip(Source source, double externalOhms) {
+    double xm = circuit.xm();
+    double r1 = circuit.r1();
+    double x1 = circuit.x1() + source.reactance();
+    // (R1 + jX1) ∥ jXm
+    double d = r1 * r1 + (x1 + xm) * (x1 + xm);
+    double rt = xm * xm * r1 / d;
+    double xt = xm * (r1 * r1 + x1 * (x1 + xm)) / d;
+    return referredResistance(externalOhms) / Math.hypot(rt, xt + circuit.x2());
+  }
 }
