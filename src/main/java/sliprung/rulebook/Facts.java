@@ -24,6 +24,8 @@ import sliprung.tolerance.Corner;
  * @param identification how the circuit was come by
  * @param starts every start at every corner, nominal first
  * @param running the running point at each corner; empty where the motor cannot carry the load
+ * @param fastPickUps by device: the least constant current, where it measures, that ever operates
+ *     the fast edge, A; a device without one has no entry
  */
 public record Facts(
     Starter starter,
@@ -31,7 +33,8 @@ public record Facts(
     Machine machine,
     Identification identification,
     List<ComputedStart> starts,
-    Map<Corner, Optional<RunningPoint>> running) {
+    Map<Corner, Optional<RunningPoint>> running,
+    Map<String, Double> fastPickUps) {
 
   /** Copies the list. */
   public Facts {

@@ -1,0 +1,122 @@
+package sliprung.rulebook;
+
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Stream;
+import sliprung.quantity.Show;
+import sliprung.runup.Stage;
+import sliprung.runup.Trace;
+
+/** What the rules about failed starts have in common: the worst exposure, and its finding. */
+public final class Exposures {
+  private Exposures() {}
+
+  /** The exposure with the smallest clearing ratio. */
+  public static Optional<Exposure> worst(Facts facts, Stream<ComputedStart> starts) {
+    return starts
+        .map(s -> Exposure.of(facts, s))
+        .min(
+            Comparator.comparingDouble(Exposure::clearingRatio)
+                .thenComparing(e -> -e.greatestUse()));
+  }
+
+  /** The finding about one subject over every start that concerns it. */
+  public static Finding finding(
+      Facts facts, Rule.Info info, String subject, List<ComputedStart> starts) {
+    FindingBuilder builder = FindingBuilder.of(facts, info, subject);
+    Exposure worst = worst(facts, starts.stream()).orElseThrow();
+    builder.at(worst.start()).edge(sliprung.protection.Edge.SLOW);
+    if (!worst.missing().isEmpty()) {
+      return builder.notJudged(
+          worst.missing(), where(worst.start()) + " Its limits are not known.");
+    }
+    builder.figures(worst.clearedAtSeconds(), worst.limitAtSeconds(), "s");
+    double ratio = worst.clearingRatio();
+    String sentence = where(worst.start()) + " " + worst.sentence();
+    if (ratio < facts.wanted(info.name()) && worst.unproven().isPresent()) {
+      String tag =
+          facts
+              .starter()
+              .device(worst.unproven().get().device())
+              .orElseThrow()
+              .trips()
+              .orElseThrow();
+      return builder
+          .mend("Give what " + tag + " is proven to break.")
+          .notJudged(
+              List.of(BreakingCapacity.missingPath(facts, tag)),
+              sentence
+                  + " "
+                  + worst.unproven().get().device()
+                  + " operates after "
+                  + Show.seconds(worst.unproven().get().operatesAtSeconds())
+                  + ", but nothing proves that "
+                  + tag
+                  + " breaks this current.");
+    }
+    builder.margin(ratio).mend(mend(facts, worst));
+    if (Double.isInfinite(ratio)) {
+      return builder.says(sentence).byMargin();
+    }
+    builder.says(sentence + " Clearing ratio " + Show.ratio(ratio) + exposed(worst) + ".");
+    return builder.byMargin();
+  }
+
+  private static String exposed(Exposure worst) {
+    return worst.exposureSeconds() > 0.0
+        ? "; " + Show.seconds(worst.exposureSeconds()) + " past the limit"
+        : "";
+  }
+
+  /** {@code Held on step 2 the motor settles at 1 233 rpm and draws 152 A.} */
+  public static String where(ComputedStart start) {
+    Stage last = start.history().stages().get(start.history().stages().size() - 1);
+    Trace trace = last.trace();
+    double speed = trace.speed()[trace.last()];
+    String words = start.scenario().words();
+    String scenario = Character.toUpperCase(words.charAt(0)) + words.substring(1);
+    String stator = Show.amps(trace.statorAmps()[trace.last()]);
+    String ring = Show.amps(trace.ringAmps()[trace.last()]);
+    if (speed == 0.0) {
+      return scenario
+          + ", the rotor stands and the motor draws "
+          + stator
+          + " on step "
+          + last.step()
+          + " ("
+          + ring
+          + " in the rings).";
+    }
+    return scenario
+        + ", the motor settles at "
+        + Show.rpm(speed)
+        + " and draws "
+        + stator
+        + " ("
+        + ring
+        + " in the rings).";
+  }
+
+  private static String mend(Facts facts, Exposure worst) {
+    if (worst.clearingRatio() >= facts.wanted("held/exposure")) {
+      return "";
+    }
+    if (worst.clearing().isEmpty()) {
+      return worst.start().scenario().kind() == sliprung.runup.Scenario.Kind.HELD
+          ? "Fit a sequence timer that trips the line contactor before "
+              + Show.seconds(worst.limitAtSeconds())
+              + ", or measure the current or temperature of the bank itself."
+          : "Fit a rotation sensor or a stall relay that clears before "
+              + Show.seconds(worst.limitAtSeconds())
+              + ".";
+    }
+    return "Set "
+        + worst.clearing().get().device()
+        + " to clear within "
+        + Show.seconds(worst.limitAtSeconds() / facts.wanted("held/exposure"))
+        + ", or give "
+        + Exposure.name(worst.first().orElseThrow().part()).toLowerCase(java.util.Locale.ROOT)
+        + " more time.";
+  }
+}

@@ -1,0 +1,127 @@
+package sliprung.rulebook.held;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import sliprung.protection.Edge;
+import sliprung.quantity.Show;
+import sliprung.rulebook.ComputedStart;
+import sliprung.rulebook.Exposure;
+import sliprung.rulebook.Exposures;
+import sliprung.rulebook.Facts;
+import sliprung.rulebook.Finding;
+import sliprung.rulebook.FindingBuilder;
+import sliprung.rulebook.Rule;
+import sliprung.rulebook.Verdict;
+import sliprung.runup.Scenario;
+import sliprung.runup.Stage;
+import sliprung.starter.Device;
+import sliprung.starter.Starter;
+
+/**
+ * {@code held/blind}: which fitted devices see a held step at all. A device sees only if its slow
+ * edge operates at the corner of least current.
+ */
+public final class SomethingSeesEveryHeldStep implements Rule {
+  private static final Info INFO =
+      new Info(
+          "held/blind",
+          "Which fitted devices see a step contactor that failed to close, and which stay blind?",
+          "common practice; NFPA 70 430.32(E) where the practice is nec",
+          List.of("motor", "load", "resistors", "protection"));
+
+  @Override
+  public Info info() {
+    return INFO;
+  }
+
+  @Override
+  public Answer judge(Facts facts) {
+    List<Finding> findings = new ArrayList<>();
+    for (int step = 1; step <= facts.starter().sectionCount(); step++) {
+      List<ComputedStart> starts = facts.faultsOnStep(step, k -> k == Scenario.Kind.HELD).toList();
+      findings.add(judge(facts, step, starts));
+    }
+    return Answer.of(findings, "the bank has no sections");
+  }
+
+  private static Finding judge(Facts facts, int step, List<ComputedStart> starts) {
+    FindingBuilder builder = FindingBuilder.of(facts, INFO, "step " + step).edge(Edge.SLOW);
+    List<String> seeing = new ArrayList<>();
+    List<String> blind = new ArrayList<>();
+    for (Device device : facts.starter().protection()) {
+      boolean always =
+          starts.stream()
+              .allMatch(
+                  s ->
+                      s.device(device.tag(), Edge.SLOW)
+                          .filter(d -> d.operates() && Double.isFinite(d.clearsAtSeconds()))
+                          .isPresent());
+      (always ? seeing : blind).add(device.tag());
+    }
+    ComputedStart least =
+        starts.stream()
+            .min(Comparator.comparingDouble(SomethingSeesEveryHeldStep::settledAmps))
+            .orElseThrow();
+    double amps = settledAmps(least);
+    builder.at(least).figures(amps, Double.NaN, "A");
+    String where = Exposures.where(least);
+    if (!seeing.isEmpty()) {
+      return builder
+          .says(
+              where
+                  + " "
+                  + list(seeing)
+                  + (seeing.size() == 1 ? " sees it" : " see it")
+                  + (blind.isEmpty() ? "." : "; " + list(blind) + blindVerb(blind) + " blind."))
+          .build(Verdict.CLEAR);
+    }
+    Optional<Exposure> exposure = Exposures.worst(facts, starts.stream());
+    Exposure worst = exposure.orElseThrow();
+    if (!worst.missing().isEmpty()) {
+      return builder.notJudged(
+          worst.missing(), where + " No fitted device sees it; what it heats is not known.");
+    }
+    boolean harms = Double.isFinite(worst.limitAtSeconds());
+    String heats =
+        harms
+            ? " "
+                + Exposure.name(worst.first().orElseThrow().part())
+                + " lasts "
+                + Show.seconds(worst.limitAtSeconds())
+                + " at worst ("
+                + worst.start().corner().words()
+                + ")."
+            : " No part reaches its limit within 30 min.";
+    return builder
+        .says(where + " No fitted device sees it at every corner." + heats + code(facts))
+        .mend(
+            harms
+                ? "Fit a sequence timer on the last step's auxiliary contact; an overload or"
+                    + " temperature sensor in the bank, or a rotation sensor, would see it too."
+                : "Fit a sequence timer.")
+        .build(harms ? Verdict.BREACH : Verdict.TIGHT);
+  }
+
+  private static String code(Facts facts) {
+    return facts.starter().practice() == Starter.Practice.NEC
+        ? " NFPA 70 counts the secondary circuit as protected by the motor overload (430.32(E));"
+            + " the physics does not."
+        : "";
+  }
+
+  private static String blindVerb(List<String> tags) {
+    return tags.size() == 1 ? " stays" : " stay";
+  }
+
+  private static String list(List<String> tags) {
+    return String.join(", ", tags);
+  }
+
+  private static double settledAmps(ComputedStart start) {
+    List<Stage> stages = start.history().stages();
+    Stage last = stages.get(stages.size() - 1);
+    return last.trace().statorAmps()[last.trace().last()];
+  }
+}

@@ -1,0 +1,2 @@
+/** Rules: a step contactor that fails to close. */
+package sliprung.rulebook.held;

@@ -1,0 +1,2 @@
+/** Rules: a rotor that does not turn. */
+package sliprung.rulebook.locked;

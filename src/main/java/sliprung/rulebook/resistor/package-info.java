@@ -1,0 +1,2 @@
+/** Rules: the rotor bank. */
+package sliprung.rulebook.resistor;

@@ -1,0 +1,161 @@
+package sliprung.rulebook.trip;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import sliprung.protection.DeviceResponse;
+import sliprung.protection.Edge;
+import sliprung.quantity.Show;
+import sliprung.rulebook.ComputedStart;
+import sliprung.rulebook.Facts;
+import sliprung.rulebook.Finding;
+import sliprung.rulebook.FindingBuilder;
+import sliprung.rulebook.Rule;
+import sliprung.starter.Device;
+
+/** {@code trip/start}: no device operates in any permitted start, each series to its end. */
+public final class NoDeviceOperatesInAPermittedStart implements Rule {
+  private static final Info INFO =
+      new Info(
+          "trip/start",
+          "Does every device ride through every permitted start, cold and hot, to the end of its"
+              + " series?",
+          "IEC 60947-4-1 trip classes; common practice",
+          List.of(
+              "supply.band",
+              "supply.fault-current",
+              "motor",
+              "load",
+              "resistors",
+              "steps",
+              "timer-spread",
+              "level-spread",
+              "duty",
+              "protection.{subject}"));
+
+  @Override
+  public Info info() {
+    return INFO;
+  }
+
+  @Override
+  public Answer judge(Facts facts) {
+    List<Finding> findings = new ArrayList<>();
+    for (Device device : facts.starter().protection()) {
+      // An instantaneous element is asked by trip/closing-peak.
+      if (!(device instanceof Device.Instantaneous)) {
+        findings.add(judge(facts, device));
+      }
+    }
+    return Answer.of(findings, "no device is fitted");
+  }
+
+  private static Finding judge(Facts facts, Device device) {
+    FindingBuilder builder = FindingBuilder.of(facts, INFO, device.tag()).edge(Edge.FAST);
+    ComputedStart worst = null;
+    DeviceResponse response = null;
+    double least = Double.POSITIVE_INFINITY;
+    for (ComputedStart start : facts.permitted().toList()) {
+      DeviceResponse found = start.device(device.tag(), Edge.FAST).orElseThrow();
+      if (found.notJudged().isPresent()) {
+        return builder
+            .at(start)
+            .mend("Give the device's own curve as points.")
+            .notJudged(List.of("protection." + device.tag() + ".curve"), found.notJudged().get());
+      }
+      double margin = margin(device, found);
+      if (worst == null || margin < least) {
+        least = margin;
+        worst = start;
+        response = found;
+      }
+    }
+    builder.at(worst).figures(response.use(), 1.0, "share of operation");
+    if (least < 1.0 && response.bound().isPresent()) {
+      return builder.notJudged(
+          List.of("protection." + device.tag() + ".curve"),
+          says(device, worst, response, least) + " " + response.bound().get());
+    }
+    builder.margin(least).says(says(device, worst, response, least)).mend(mend(device, least));
+    Optional<Double> classAlone = classAlone(facts, device);
+    if (classAlone.isPresent() && classAlone.get() > facts.wanted(INFO.name())) {
+      builder.wanted(classAlone.get());
+    }
+    return builder.byMargin();
+  }
+
+  /** Timers have no current margin: how much longer the start may take. */
+  private static double margin(Device device, DeviceResponse response) {
+    boolean timer = device instanceof Device.SequenceTimer || device instanceof Device.Standstill;
+    return timer ? response.stretchMargin().orElseThrow() : response.currentMargin().orElseThrow();
+  }
+
+  /** The margin under which a trip class alone proves nothing more than tight. */
+  private static Optional<Double> classAlone(Facts facts, Device device) {
+    if (!(device instanceof Device.Overload overload)) {
+      return Optional.empty();
+    }
+    String digits = overload.tripClass().name().replaceAll("[^0-9]", "");
+    int number = Integer.parseInt(digits);
+    String key = number <= 10 ? "10" : number <= 20 ? "20" : "30";
+    return Optional.of(facts.practice().figure("class-alone." + key).value());
+  }
+
+  private static String says(
+      Device device, ComputedStart start, DeviceResponse response, double margin) {
+    if (response.operates()) {
+      return device.tag()
+          + " trips after "
+          + Show.seconds(response.operatesAtSeconds())
+          + " of a "
+          + start.words()
+          + (start.history().runUpSeconds().isPresent()
+              ? " that takes "
+                  + Show.seconds(start.history().runUpSeconds().getAsDouble())
+                  + " to run up"
+              : "")
+          + ", drawing "
+          + Show.amps(
+              sliprung.rulebook.Exposure.statorAmpsAt(
+                  start.history(), response.operatesAtSeconds()))
+          + " then.";
+    }
+    String room =
+        Double.isInfinite(margin)
+            ? ": nothing near it"
+            : device instanceof Device.SequenceTimer || device instanceof Device.Standstill
+                ? "; the start may take " + Show.ratio(margin) + " times as long"
+                : "; the current may be "
+                    + Show.ratio(margin)
+                    + " times as high"
+                    + response.stretchMargin().stream()
+                        .filter(Double::isFinite)
+                        .mapToObj(s -> ", or the start " + Show.ratio(s) + " times as long")
+                        .findFirst()
+                        .orElse("");
+    return device.tag()
+        + " comes to "
+        + Show.percent(response.use())
+        + " of operating in a "
+        + start.words()
+        + room
+        + ".";
+  }
+
+  private static String mend(Device device, double margin) {
+    if (Double.isInfinite(margin) || margin >= 1.4) {
+      return "";
+    }
+    Map<Class<?>, String> cures =
+        Map.of(
+            Device.Overload.class,
+            "Give the relay's own curve, take a higher class if the motor allows it, or pause before"
+                + " a hot restart.",
+            Device.SequenceTimer.class,
+            "Set it longer.",
+            Device.Fuse.class,
+            "Take a higher rating under the declared coordination.");
+    return cures.getOrDefault(device.getClass(), "Raise its pick-up or its time.");
+  }
+}

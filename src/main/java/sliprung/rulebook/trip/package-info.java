@@ -1,0 +1,2 @@
+/** Rules: a permitted start must not be interrupted. */
+package sliprung.rulebook.trip;
