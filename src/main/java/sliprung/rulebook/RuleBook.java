@@ -21,6 +21,9 @@ public final class RuleBook {
           "resistor/start",
           "sequence/supervision");
 
+  /** What the catalogue says of accepted deviations, which the engine answers itself. */
+  public static final Rule.Info ACCEPTED = Acceptance.INFO;
+
   private final List<Rule> rules;
 
   /** A book of these rules. */
