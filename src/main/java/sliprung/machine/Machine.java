@@ -1,5 +1,6 @@
 package sliprung.machine;
 
+import java.util.OptionalDouble;
 import sliprung.starter.Motor.CircuitData;
 
 /**
@@ -105,18 +106,47 @@ public final class Machine {
     return source.volts() * circuit.xm() / Math.hypot(circuit.r1(), x) / circuit.ratio();
   }
 
-  /**
-   * Slip of the breakdown torque, {@code R/√(Rt² + (Xt + X2)²)} with the Thevenin impedance of
-   * stator, source and magnetizing branch.
-   */
+  /** Greatest driving air-gap torque, N·m. No rotor resistance changes it, only where it lies. */
+  public double breakdownTorque(Source source) {
+    return Thevenin.of(circuit, source).greatestTorque(circuit.x2(), synchronousSpeed);
+  }
+
+  /** Slip, per unit, of the greatest driving torque: {@code R/|Z_T + jX2|}; above 1 is possible. */
   public double breakdownSlip(Source source, double externalOhms) {
-    double xm = circuit.xm();
-    double r1 = circuit.r1();
-    double x1 = circuit.x1() + source.reactance();
-    // (R1 + jX1) ∥ jXm
-    double d = r1 * r1 + (x1 + xm) * (x1 + xm);
-    double rt = xm * xm * r1 / d;
-    double xt = xm * (r1 * r1 + x1 * (x1 + xm)) / d;
-    return referredResistance(externalOhms) / Math.hypot(rt, xt + circuit.x2());
+    return referredResistance(externalOhms)
+        / Thevenin.of(circuit, source).impedanceWith(circuit.x2());
+  }
+
+  /**
+   * External resistance, actual ohms per phase (star), with which the standstill torque is
+   * greatest: the whole rotor circuit is then {@code |Z_T + jX2|}. 0 where the winding alone has
+   * more.
+   */
+  public double externalOhmsForGreatestStandstillTorque(Source source) {
+    double whole = Thevenin.of(circuit, source).impedanceWith(circuit.x2());
+    return Math.max(0.0, whole - circuit.r2()) / (circuit.ratio() * circuit.ratio());
+  }
+
+  /**
+   * The slip on the steady branch (between the breakdown slips of driving and of braking) at which
+   * the air-gap torque has a given value. Closed form.
+   *
+   * @param torque N·m; negative when the load overhauls
+   * @return empty when the torque exceeds what the machine can give
+   */
+  public OptionalDouble slipAt(Source source, double externalOhms, double torque) {
+    if (torque == 0.0) {
+      return OptionalDouble.of(0.0);
+    }
+    Thevenin t = Thevenin.of(circuit, source);
+    // y² − b y + c = 0 for y = R/s; the root of greater magnitude is the smaller slip
+    double b = 3.0 * t.volts() * t.volts() / (synchronousSpeed * torque) - 2.0 * t.resistance();
+    double z = t.impedanceWith(circuit.x2());
+    double discriminant = b * b - 4.0 * z * z;
+    if (discriminant < 0.0 || Math.signum(b) != Math.signum(torque)) {
+      return OptionalDouble.empty();
+    }
+    double y = 0.5 * (b + Math.copySign(Math.sqrt(discriminant), b));
+    return OptionalDouble.of(referredResistance(externalOhms) / y);
   }
 }

@@ -64,9 +64,12 @@ public record Motor(
     return powerWatts / (speedRpm * Math.PI / 30.0);
   }
 
-  /** Pole pairs: the most whose synchronous speed still exceeds the rated speed. */
+  /**
+   * Pole pairs: the most whose synchronous speed still reaches the rated speed; 1 for a rated speed
+   * above that of two poles, which no plate can mean.
+   */
   public int polePairs() {
-    return (int) Math.floor(60.0 * frequency / speedRpm);
+    return (int) Math.max(1.0, Math.floor(60.0 * frequency / speedRpm));
   }
 
   /** Synchronous speed in rad/s at a supply frequency in Hz. */
