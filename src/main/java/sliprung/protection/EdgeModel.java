@@ -1,0 +1,49 @@
+package sliprung.protection;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** One device at one edge: what it does over starts, and at a constant current from cold. */
+interface EdgeModel {
+
+  /** What it does over the last of some starts in a row. */
+  EdgeOutcome over(Starts starts, boolean withMargins);
+
+  /**
+   * Operating time at a constant current from cold, s, infinite: never; empty where it cannot be
+   * told or depends on no current.
+   */
+  OptionalDouble seconds(double amps);
+
+  /** Empty, or why this edge cannot be computed whatever the start. */
+  default Optional<String> unknown() {
+    return Optional.empty();
+  }
+
+  /**
+   * What one edge does.
+   *
+   * @param passage use and operation
+   * @param currentMargin as in {@link DeviceResponse}
+   * @param stretchMargin as in {@link DeviceResponse}
+   * @param bound as in {@link DeviceResponse}
+   * @param notJudged as in {@link DeviceResponse}
+   */
+  record EdgeOutcome(
+      Passage passage,
+      OptionalDouble currentMargin,
+      OptionalDouble stretchMargin,
+      Optional<String> bound,
+      Optional<String> notJudged) {
+
+    /** An edge that cannot be computed. */
+    static EdgeOutcome notJudged(String why) {
+      return new EdgeOutcome(
+          new Passage(Double.NaN, Double.NaN, Double.POSITIVE_INFINITY),
+          OptionalDouble.empty(),
+          OptionalDouble.empty(),
+          Optional.empty(),
+          Optional.of(why));
+    }
+  }
+}

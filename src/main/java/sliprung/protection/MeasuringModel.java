@@ -1,0 +1,68 @@
+package sliprung.protection;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.DoubleFunction;
+import java.util.function.DoubleUnaryOperator;
+import java.util.function.Function;
+
+/** An edge that follows from what a meter makes of a current. */
+final class MeasuringModel implements EdgeModel {
+  /** Long enough for every operating time that a standard knows, s. */
+  private static final double LONGEST = 1e6;
+
+  private final Function<Starts, Waveform> current;
+  private final Function<DevicePreload, Meter> meter;
+
+  /**
+   * An edge.
+   *
+   * @param current the current it measures
+   * @param preloadAmps the part of a preload at its place
+   * @param meter a new meter after that steady current
+   */
+  MeasuringModel(
+      Function<Starts, Waveform> current,
+      java.util.function.ToDoubleFunction<DevicePreload> preloadAmps,
+      DoubleFunction<Meter> meter) {
+    this.current = current;
+    this.meter = preload -> meter.apply(preloadAmps.applyAsDouble(preload));
+  }
+
+  @Override
+  public EdgeOutcome over(Starts starts, boolean withMargins) {
+    Waveform waveform = current.apply(starts);
+    Meter used = meter.apply(starts.preload());
+    Passage passage = Passage.of(used, waveform, starts.count());
+    Optional<String> doubt = used.doubt();
+    if (doubt.isPresent()) {
+      return EdgeOutcome.notJudged(doubt.get());
+    }
+    if (!withMargins) {
+      return new EdgeOutcome(
+          passage, OptionalDouble.empty(), OptionalDouble.empty(), used.bound(), doubt);
+    }
+    DoubleUnaryOperator byCurrent = f -> use(starts, waveform.scaled(f, 1.0));
+    DoubleUnaryOperator byTime = f -> use(starts, waveform.scaled(1.0, f));
+    return new EdgeOutcome(
+        passage,
+        OptionalDouble.of(Margin.of(byCurrent, passage.use())),
+        OptionalDouble.of(Margin.of(byTime, passage.use())),
+        used.bound(),
+        doubt);
+  }
+
+  /** Greatest use; a run that cannot be judged counts as an operation. */
+  private double use(Starts starts, Waveform waveform) {
+    Meter fresh = meter.apply(starts.preload());
+    double use = Passage.of(fresh, waveform, starts.count()).use();
+    return fresh.doubt().isPresent() ? Math.max(1.0, use) : use;
+  }
+
+  @Override
+  public OptionalDouble seconds(double amps) {
+    Meter fresh = meter.apply(DevicePreload.COLD);
+    double reached = fresh.advance(Piece.constant(LONGEST, amps));
+    return fresh.doubt().isPresent() ? OptionalDouble.empty() : OptionalDouble.of(reached);
+  }
+}

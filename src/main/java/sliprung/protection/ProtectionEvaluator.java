@@ -1,0 +1,144 @@
+package sliprung.protection;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import sliprung.machine.Machine;
+import sliprung.runup.StartHistory;
+import sliprung.starter.Device;
+import sliprung.starter.Starter;
+
+/**
+ * What every device and every heated part of one starter makes of a computed start.
+ *
+ * <p>Several starts in a row are equal and follow each other without pause and without running in
+ * between; the answer is about the last. The models are built once: keep one evaluator for a
+ * starter and a machine and ask it for every start.
+ */
+public final class ProtectionEvaluator {
+  private final Starter starter;
+  private final double synchronousSpeed;
+  private final Map<Device, Map<Edge, EdgeModel>> devices = new LinkedHashMap<>();
+  private final SectionParts sections;
+  private final List<Part> parts = new ArrayList<>();
+
+  /**
+   * An evaluator.
+   *
+   * @param starter with its devices and parts
+   * @param machine circuit at the supply's frequency
+   */
+  public ProtectionEvaluator(Starter starter, Machine machine) {
+    this.starter = starter;
+    this.synchronousSpeed = machine.synchronousSpeed();
+    for (Device device : starter.protection()) {
+      devices.put(device, Bands.models(device, starter));
+    }
+    this.sections = new SectionParts(starter.resistors());
+    MotorParts motor = new MotorParts(starter.motor(), machine);
+    parts.addAll(sections.parts());
+    parts.add(motor.stator());
+    parts.add(motor.rotor());
+    parts.add(motor.rings());
+    parts.add(
+        ConductorParts.part(
+            "stator-conductor", "conductors.stator", starter.statorConductor(), Channel.stator()));
+    parts.add(
+        ConductorParts.part(
+            "rotor-conductor",
+            "conductors.rotor",
+            starter.rotorConductor(),
+            Channel.ring(stage -> 1.0)));
+    parts.addAll(new ContactorParts(starter).parts());
+  }
+
+  /**
+   * Every device at every edge over a single start; see {@link #devices(StartHistory,
+   * DevicePreload, int)}.
+   */
+  public List<DeviceResponse> devices(StartHistory history, DevicePreload preload) {
+    return devices(history, preload, 1);
+  }
+
+  /**
+   * Every device at every edge, in the file's order, over the last of some starts in a row. Margins
+   * come with the fast edge of a permitted start: their factor applies to every start of the row,
+   * never to the preload nor to the running after the last.
+   *
+   * @param history of each of the starts
+   * @param preload before the first
+   * @param starts 1 or more
+   */
+  public List<DeviceResponse> devices(StartHistory history, DevicePreload preload, int starts) {
+    Starts row =
+        new Starts(history, starts, preload, synchronousSpeed, starter.supply().frequency());
+    List<DeviceResponse> responses = new ArrayList<>();
+    for (Map.Entry<Device, Map<Edge, EdgeModel>> entry : devices.entrySet()) {
+      for (Map.Entry<Edge, EdgeModel> model : entry.getValue().entrySet()) {
+        responses.add(respond(entry.getKey(), model.getKey(), model.getValue(), row));
+      }
+    }
+    return responses;
+  }
+
+  private DeviceResponse respond(Device device, Edge edge, EdgeModel model, Starts row) {
+    boolean withMargins = edge == Edge.FAST && !row.history().scenario().isFault();
+    EdgeModel.EdgeOutcome outcome = model.over(row, withMargins);
+    if (outcome.notJudged().isPresent()) {
+      return DeviceResponse.notJudged(device.tag(), edge, outcome.notJudged().get());
+    }
+    double operates = outcome.passage().reachedAtSeconds();
+    return new DeviceResponse(
+        device.tag(),
+        edge,
+        outcome.passage().use(),
+        outcome.passage().useAtRunUp(),
+        operates,
+        clears(device, operates),
+        outcome.currentMargin(),
+        outcome.stretchMargin(),
+        operates < Double.POSITIVE_INFINITY ? outcome.bound() : java.util.Optional.empty(),
+        outcome.notJudged());
+  }
+
+  /**
+   * When the circuit is open: operation and opening time of what the device trips. A fuse opens it
+   * itself; only its pre-arcing time counts, the arc is over within a period or two. Any other
+   * device that trips nothing clears nothing.
+   */
+  private double clears(Device device, double operates) {
+    if (device instanceof Device.Fuse) {
+      return operates;
+    }
+    OptionalDouble opening =
+        device.trips().map(starter::openingSeconds).orElse(OptionalDouble.empty());
+    return opening.isPresent() ? operates + opening.getAsDouble() : Double.POSITIVE_INFINITY;
+  }
+
+  /** Every part over a single start. */
+  public List<PartResponse> parts(StartHistory history, PartPreload preload) {
+    return parts(history, preload, 1);
+  }
+
+  /**
+   * Every part over the last of some starts in a row: sections, windings, rings, conductors, then
+   * contactors in the file's order.
+   *
+   * @param history of each of the starts
+   * @param preload before the first
+   * @param starts 1 or more
+   */
+  public List<PartResponse> parts(StartHistory history, PartPreload preload, int starts) {
+    return parts.stream().map(part -> part.over(history, preload, starts)).toList();
+  }
+
+  /**
+   * Level of every section at the end of some starts in a row, to be carried into a {@link
+   * PartPreload}; 0 for a section whose data are missing.
+   */
+  public List<Double> sectionLevelsAfter(StartHistory history, PartPreload preload, int starts) {
+    return sections.levelsAfter(history, preload, starts);
+  }
+}
