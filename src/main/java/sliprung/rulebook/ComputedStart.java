@@ -20,6 +20,7 @@ import sliprung.tolerance.Corner;
  * @param history speed, currents, torque
  * @param devices every device at every edge it has
  * @param parts every part
+ * @param circuit empty, or which of several circuits it was computed with
  */
 public record ComputedStart(
     Scenario scenario,
@@ -28,7 +29,20 @@ public record ComputedStart(
     Corner corner,
     StartHistory history,
     List<DeviceResponse> devices,
-    List<PartResponse> parts) {
+    List<PartResponse> parts,
+    String circuit) {
+
+  /** A start computed with the only circuit. */
+  public ComputedStart(
+      Scenario scenario,
+      From from,
+      int place,
+      Corner corner,
+      StartHistory history,
+      List<DeviceResponse> devices,
+      List<PartResponse> parts) {
+    this(scenario, from, place, corner, history, devices, parts, "");
+  }
 
   /** Thermal state before a start. */
   public enum From {
@@ -56,7 +70,8 @@ public record ComputedStart(
         scenario.isFault()
             ? scenario.id() + (from == From.HOT ? "-hot" : "")
             : from.word() + (place > 1 ? "-" + place : "");
-    return corner.isNominal() ? name : name + "@" + corner.id();
+    String there = corner.isNominal() ? name : name + "@" + corner.id();
+    return circuit.isEmpty() ? there : there + "~" + circuit;
   }
 
   /** In words, such as {@code hot start} or {@code held on step 2, from hot}. */

@@ -8,6 +8,7 @@ import java.util.function.Predicate;
 import java.util.stream.Stream;
 import sliprung.machine.Identification;
 import sliprung.machine.Machine;
+import sliprung.protection.Bands;
 import sliprung.runup.Scenario;
 import sliprung.runup.StartSimulator.RunningPoint;
 import sliprung.starter.Assumption;
@@ -34,7 +35,8 @@ public record Facts(
     Identification identification,
     List<ComputedStart> starts,
     Map<Corner, Optional<RunningPoint>> running,
-    Map<String, Double> fastPickUps) {
+    Map<String, Double> fastPickUps,
+    Bands bands) {
 
   /** Copies the list. */
   public Facts {

@@ -1,0 +1,161 @@
+package sliprung.review;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import sliprung.machine.Machine;
+import sliprung.protection.DevicePreload;
+import sliprung.protection.PartPreload;
+import sliprung.protection.ProtectionEvaluator;
+import sliprung.rulebook.ComputedStart;
+import sliprung.runup.Conditions;
+import sliprung.runup.Scenario;
+import sliprung.runup.StartHistory;
+import sliprung.runup.StartSimulator;
+import sliprung.runup.StartSimulator.RunningPoint;
+import sliprung.starter.Duty;
+import sliprung.starter.Motor;
+import sliprung.starter.Starter;
+import sliprung.tolerance.Corner;
+import sliprung.tolerance.Corners;
+
+/** Computes every start of a starter at every corner, and what devices and parts make of it. */
+final class StartComputation {
+  private final Starter starter;
+  private final StartSimulator simulator;
+  private final ProtectionEvaluator evaluator;
+  private final String circuit;
+
+  /**
+   * A computation.
+   *
+   * @param circuit empty, or which of several circuits the machine stands for
+   */
+  StartComputation(Starter starter, Machine machine, String circuit) {
+    this.starter = starter;
+    this.simulator = new StartSimulator(starter, machine);
+    this.evaluator = new ProtectionEvaluator(starter, machine);
+    this.circuit = circuit;
+  }
+
+  /**
+   * Everything that was computed.
+   *
+   * @param starts nominal corner first; within a corner permitted starts, then faults
+   * @param running the running point at each corner
+   */
+  record Computed(List<ComputedStart> starts, Map<Corner, Optional<RunningPoint>> running) {}
+
+  private record AtCorner(
+      Corner corner, Optional<RunningPoint> running, List<ComputedStart> starts) {}
+
+  /** Corners share nothing, so both cores work on them; the order stays that of the corners. */
+  Computed compute() {
+    List<AtCorner> corners =
+        Corners.of(starter).entrySet().stream()
+            .toList()
+            .parallelStream()
+            .map(e -> at(e.getKey(), e.getValue()))
+            .toList();
+    List<ComputedStart> starts = new ArrayList<>();
+    Map<Corner, Optional<RunningPoint>> running = new LinkedHashMap<>();
+    for (AtCorner at : corners) {
+      starts.addAll(at.starts());
+      running.put(at.corner(), at.running());
+    }
+    return new Computed(starts, running);
+  }
+
+  private AtCorner at(Corner corner, Conditions conditions) {
+    Optional<RunningPoint> running = simulator.runningPoint(conditions);
+    // A motor that cannot carry its load at this corner is found by trip/running; what it was warm
+    // from before is then its rated current.
+    Motor motor = starter.motor();
+    double stator = running.map(r -> r.point().statorAmps()).orElse(motor.current());
+    double ring =
+        running.map(r -> r.point().ringAmps()).orElse(motor.rotorCurrent().orElse(0.0));
+    Duty duty = starter.duty();
+
+    List<ComputedStart> starts = new ArrayList<>();
+    StartHistory permitted = simulator.run(Scenario.PERMITTED, conditions);
+    for (int n = 1; n <= duty.coldStarts(); n++) {
+      starts.add(
+          permitted(corner, permitted, ComputedStart.From.COLD, n, DevicePreload.COLD, PartPreload.COLD));
+    }
+    List<Double> sections =
+        evaluator.sectionLevelsAfter(permitted, PartPreload.COLD, Math.max(1, duty.coldStarts()));
+    DevicePreload warm = DevicePreload.running(stator, ring);
+    PartPreload restarted = new PartPreload(stator, ring, duty.restartAfterSeconds(), sections);
+    for (int n = 1; n <= duty.hotStarts(); n++) {
+      starts.add(permitted(corner, permitted, ComputedStart.From.HOT, n, warm, restarted));
+    }
+
+    DevicePreload forgotten = DevicePreload.remembered(stator, ring);
+    PartPreload hot = new PartPreload(stator, ring, 0.0, sections);
+    for (Scenario fault : faults()) {
+      StartHistory history = simulator.run(fault, conditions);
+      starts.add(fault(corner, history, ComputedStart.From.COLD, DevicePreload.COLD, PartPreload.COLD));
+      starts.add(fault(corner, history, ComputedStart.From.HOT, forgotten, hot));
+    }
+    return new AtCorner(corner, running, starts);
+  }
+
+  private ComputedStart permitted(
+      Corner corner,
+      StartHistory history,
+      ComputedStart.From from,
+      int place,
+      DevicePreload devices,
+      PartPreload parts) {
+    return new ComputedStart(
+        Scenario.PERMITTED,
+        from,
+        place,
+        corner,
+        history,
+        evaluator.devices(history, devices, place),
+        evaluator.parts(history, parts, place),
+        circuit);
+  }
+
+  private ComputedStart fault(
+      Corner corner,
+      StartHistory history,
+      ComputedStart.From from,
+      DevicePreload devices,
+      PartPreload parts) {
+    return new ComputedStart(
+        history.scenario(),
+        from,
+        1,
+        corner,
+        history,
+        evaluator.devices(history, devices),
+        evaluator.parts(history, parts),
+        circuit);
+  }
+
+  private List<Scenario> faults() {
+    List<Scenario> faults = new ArrayList<>();
+    int sections = starter.sectionCount();
+    for (Scenario.LoadMode load : Scenario.LoadMode.values()) {
+      for (int step = 1; step <= sections; step++) {
+        faults.add(new Scenario(Scenario.Kind.HELD, step, load));
+      }
+    }
+    if (starter.sequence() == Starter.Sequence.CASCADED) {
+      for (int step = 1; step < sections; step++) {
+        faults.add(new Scenario(Scenario.Kind.SKIPPED, step, Scenario.LoadMode.START));
+        faults.add(new Scenario(Scenario.Kind.SKIPPED, step, Scenario.LoadMode.RUNNING));
+      }
+    }
+    faults.add(new Scenario(Scenario.Kind.LOCKED, 0, Scenario.LoadMode.START));
+    for (int step = 1; step <= sections; step++) {
+      faults.add(new Scenario(Scenario.Kind.LOCKED_STEP, step, Scenario.LoadMode.START));
+    }
+    faults.add(new Scenario(Scenario.Kind.RINGS_SHORTED, 0, Scenario.LoadMode.START));
+    return faults;
+  }
+}
