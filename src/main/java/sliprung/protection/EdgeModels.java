@@ -2,6 +2,7 @@ package sliprung.protection;
 
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
+import java.util.function.Supplier;
 import sliprung.curve.AmBounds;
 import sliprung.curve.AmGates;
 import sliprung.curve.FuseGates;
@@ -112,11 +113,15 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
     InverseTimeEdge law = new InverseTimeEdge(device, edge);
     return measuring(
         device,
-        before ->
-            blocked(
-                new AccumulatingMeter(law::rate, 0.0, law.breaks()),
-                device.blockedAboveAmps(),
-                device.accuracy()));
+        before -> {
+          Supplier<Meter> meter =
+              () ->
+                  blocked(
+                      new AccumulatingMeter(law::rate, 0.0, law.breaks()),
+                      device.blockedAboveAmps(),
+                      device.accuracy());
+          return device.reset() == Device.Reset.HELD ? meter.get() : new FreshEachStartMeter(meter);
+        });
   }
 
   @Override

@@ -22,6 +22,9 @@ interface Meter {
   /** Greatest level during the last {@link #advance} at which it could have acted. */
   double peak();
 
+  /** The motor has stopped and the next start of a series follows without a pause to speak of. */
+  default void stopBetweenStarts() {}
+
   /** Empty, or why an operation is only a bound and not proven. Asked after a run. */
   default Optional<String> bound() {
     return Optional.empty();

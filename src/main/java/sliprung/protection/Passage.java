@@ -20,6 +20,7 @@ record Passage(double use, double useAtRunUp, double reachedAtSeconds) {
   static Passage of(Meter meter, Waveform waveform, int starts) {
     for (int n = 1; n < starts; n++) {
       throughStart(meter, waveform);
+      meter.stopBetweenStarts();
     }
     double use = meter.level();
     double atRunUp = use;

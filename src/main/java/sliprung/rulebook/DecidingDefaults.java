@@ -1,7 +1,10 @@
 package sliprung.rulebook;
 
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Set;
+import java.util.TreeMap;
 import java.util.TreeSet;
 import sliprung.starter.Assumption;
 
@@ -19,43 +22,65 @@ public final class DecidingDefaults {
   private DecidingDefaults() {}
 
   static List<Finding> findings(Facts facts, List<Rule> rules, List<Finding> findings) {
-    List<Finding> out = new ArrayList<>();
+    TreeMap<String, Group> groups = new TreeMap<>();
     for (Assumption assumption : facts.starter().assumptions()) {
-      TreeSet<String> decided = new TreeSet<>();
-      boolean thin = false;
       for (Finding finding : findings) {
-        if (finding.verdict() == Verdict.NOT_JUDGED) {
-          continue;
+        if (finding.verdict() != Verdict.NOT_JUDGED && restsOn(rules, finding, assumption)) {
+          groups
+              .computeIfAbsent(subject(assumption.path()), s -> new Group())
+              .add(assumption, finding);
         }
-        Rule.Info info =
-            rules.stream()
-                .map(Rule::info)
-                .filter(i -> i.name().equals(finding.rule()))
-                .findFirst()
-                .orElseThrow();
-        List<String> roots =
-            info.inputs().stream()
-                .map(path -> path.replace("{subject}", finding.subject()))
-                .toList();
-        if (Facts.underAny(assumption.path(), roots)) {
-          decided.add(finding.rule());
-          thin |= finding.verdict() == Verdict.BREACH || finding.verdict() == Verdict.TIGHT;
-        }
-      }
-      if (!decided.isEmpty()) {
-        out.add(
-            FindingBuilder.of(facts, INFO, assumption.path())
-                .says(
-                    assumption.path()
-                        + " is not given: "
-                        + assumption.value()
-                        + " was taken, and decided "
-                        + String.join(", ", decided)
-                        + ".")
-                .mend("Give " + assumption.path() + ".")
-                .build(thin ? Verdict.TIGHT : Verdict.CLEAR));
       }
     }
+    List<Finding> out = new ArrayList<>();
+    groups.forEach(
+        (subject, group) ->
+            out.add(
+                FindingBuilder.of(facts, INFO, subject)
+                    .says(
+                        "Not given and taken: "
+                            + String.join(", ", group.defaults)
+                            + ". Decided "
+                            + String.join(", ", group.rules)
+                            + ".")
+                    .mend("Give them where they differ.")
+                    .build(group.thin ? Verdict.TIGHT : Verdict.CLEAR)));
     return out;
+  }
+
+  /** The defaults of one device, or of one top key, that decided something. */
+  private static final class Group {
+    private final LinkedHashSet<String> defaults = new LinkedHashSet<>();
+    private final TreeSet<String> rules = new TreeSet<>();
+    private boolean thin;
+
+    void add(Assumption assumption, Finding finding) {
+      defaults.add(key(assumption.path()) + " " + assumption.value());
+      rules.add(finding.rule());
+      thin |= finding.verdict() == Verdict.BREACH || finding.verdict() == Verdict.TIGHT;
+    }
+  }
+
+  /** {@code protection.F2} or {@code resistors}. */
+  private static String subject(String path) {
+    String[] parts = path.split("\\.");
+    boolean tagged = parts.length > 2 && TAGGED.contains(parts[0]);
+    return tagged ? parts[0] + "." + parts[1] : parts[0];
+  }
+
+  private static String key(String path) {
+    String subject = subject(path);
+    return path.length() > subject.length() ? path.substring(subject.length() + 1) : path;
+  }
+
+  private static final Set<String> TAGGED = Set.of("protection", "contactors", "breakers");
+
+  private static boolean restsOn(List<Rule> rules, Finding finding, Assumption assumption) {
+    return rules.stream()
+        .map(Rule::info)
+        .filter(i -> i.name().equals(finding.rule()))
+        .flatMap(i -> i.inputs().stream())
+        .map(path -> path.replace("{subject}", finding.subject()))
+        .anyMatch(root -> Facts.underAny(assumption.path(), List.of(root)));
   }
 }

@@ -177,6 +177,10 @@ public record Exposure(
     return limit + "; " + clears + ".";
   }
 
+  private static String reaches(String part) {
+    return part.equals("rings") ? " reach their" : " reaches its";
+  }
+
   /** A part's name at the beginning of a sentence. */
   public static String name(String part) {
     return switch (part) {

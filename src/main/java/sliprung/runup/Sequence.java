@@ -31,7 +31,7 @@ final class Sequence {
   private boolean armed = true;
   private double reference;
   private double lastClosing;
-  private boolean anyClosed;
+  private boolean lastStepClosed;
   private int step = 1;
 
   private record Pending(double atSeconds, int index) {}
@@ -58,8 +58,9 @@ final class Sequence {
     return lastClosing;
   }
 
-  boolean anyClosed() {
-    return anyClosed;
+  /** Whether the contactor of the last step has closed. */
+  boolean lastStepClosed() {
+    return lastStepClosed;
   }
 
   /** Whether a rule is being waited for. */
@@ -173,7 +174,7 @@ final class Sequence {
     }
     step = Math.max(step, index + 2);
     lastClosing = now;
-    anyClosed = true;
+    lastStepClosed |= index == starter.steps().size() - 1;
     if (starter.sequence() == Starter.Sequence.CHAINED) {
       armed = true;
       next = index + 1;

@@ -12,7 +12,7 @@ import java.util.OptionalDouble;
  * @param outcome how it ended
  * @param stages in order; of a fault the last one runs to the end of the history
  * @param running after a permitted start: thirty minutes at running load; empty otherwise
- * @param lastClosingSeconds when the last step contactor closed; empty: it never did
+ * @param lastClosingSeconds when the contactor of the last step closed; empty: it never did
  * @param runUpSeconds line closing until the last step has closed and the speed is within 0.5 % of
  *     the speed it settles at; empty: never
  * @param levelNeverReached number of the step whose level was never reached; 0 if none

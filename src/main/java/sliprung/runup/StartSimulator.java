@@ -306,7 +306,7 @@ public final class StartSimulator {
           outcome(running),
           stages,
           after,
-          sequence.anyClosed()
+          sequence.lastStepClosed()
               ? OptionalDouble.of(sequence.lastClosingSeconds())
               : OptionalDouble.empty(),
           running && !Double.isNaN(runUp) ? OptionalDouble.of(runUp) : OptionalDouble.empty(),

@@ -29,7 +29,18 @@ public final class SomethingSeesEveryHeldStep implements Rule {
           "held/blind",
           "Which fitted devices see a step contactor that failed to close, and which stay blind?",
           "common practice; NFPA 70 430.32(E) where the practice is nec",
-          List.of("motor", "load", "resistors", "protection"));
+          List.of(
+              "motor",
+              "load",
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise",
+              "protection"));
 
   @Override
   public Info info() {

@@ -16,7 +16,18 @@ public final class LockedOnAStepIsCleared implements Rule {
           "When the rotor does not turn and the sequence is frozen on a step, is it cleared before the"
               + " first part reaches its limit?",
           "common practice",
-          List.of("supply.band", "motor", "resistors", "protection"));
+          List.of(
+              "supply.band",
+              "motor",
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise",
+              "protection"));
 
   @Override
   public Info info() {

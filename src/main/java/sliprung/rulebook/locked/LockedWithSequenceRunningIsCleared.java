@@ -22,7 +22,19 @@ public final class LockedWithSequenceRunningIsCleared implements Rule {
               + " part reaches its limit?",
           "common practice",
           List.of(
-              "supply.band", "supply.fault-current", "motor", "resistors", "steps", "protection"));
+              "supply.band",
+              "supply.fault-current",
+              "motor",
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise",
+              "steps",
+              "protection"));
 
   @Override
   public Info info() {

@@ -25,7 +25,14 @@ public final class TheRotorBreaksAway implements Rule {
               "motor",
               "load.breakaway",
               "load.spread",
-              "resistors"));
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise"));
 
   @Override
   public Info info() {

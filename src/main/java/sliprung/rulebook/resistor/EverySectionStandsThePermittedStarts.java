@@ -18,7 +18,21 @@ public final class EverySectionStandsThePermittedStarts implements Rule {
           "resistor/start",
           "Does every section stand every permitted start, to the end of its series?",
           "common practice; ratings as declared for the bank",
-          List.of("supply.band", "motor", "load", "resistors", "steps", "timer-spread", "duty"));
+          List.of(
+              "supply.band",
+              "motor",
+              "load",
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise",
+              "steps",
+              "timer-spread",
+              "duty"));
 
   @Override
   public Info info() {

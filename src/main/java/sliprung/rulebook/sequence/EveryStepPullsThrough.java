@@ -27,7 +27,20 @@ public final class EveryStepPullsThrough implements Rule {
           "sequence/pull-through",
           "Does every permitted start pull through every step to running speed?",
           "common practice",
-          List.of("supply.band", "motor", "load", "resistors", "steps", "level-spread"));
+          List.of(
+              "supply.band",
+              "motor",
+              "load",
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise",
+              "steps",
+              "level-spread"));
 
   @Override
   public Info info() {

@@ -22,7 +22,19 @@ public final class NoLevelIsMetAtRest implements Rule {
           "sequence/false-close",
           "Is no current level already met while the rotor stands?",
           "common practice",
-          List.of("supply.band", "motor", "resistors", "steps", "level-spread"));
+          List.of(
+              "supply.band",
+              "motor",
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise",
+              "steps",
+              "level-spread"));
 
   @Override
   public Info info() {

@@ -30,7 +30,20 @@ public final class TheSequenceIsSupervised implements Rule {
               + " failed one that nothing else clears?",
           "common practice (device function 48)",
           List.of(
-              "supply.band", "motor", "load", "resistors", "steps", "timer-spread", "protection"));
+              "supply.band",
+              "motor",
+              "load",
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise",
+              "steps",
+              "timer-spread",
+              "protection"));
 
   @Override
   public Info info() {
@@ -205,11 +218,10 @@ public final class TheSequenceIsSupervised implements Rule {
 
   /** The earliest limit among the failed starts that nothing but this timer clears in time. */
   private static Optional<Exposure> earliestOwn(Facts facts, Device.SequenceTimer timer) {
-    double wanted = facts.wanted("held/exposure");
     return failed(facts).stream()
         .filter(s -> s.device(timer.tag(), Edge.SLOW).map(DeviceResponse::operates).orElse(false))
         .map(s -> Exposure.of(facts, s, List.of(timer.tag())))
-        .filter(e -> Double.isFinite(e.limitAtSeconds()) && e.clearingRatio() < wanted)
+        .filter(e -> Double.isFinite(e.limitAtSeconds()) && e.clearingRatio() < 1.0)
         .min(Comparator.comparingDouble(Exposure::limitAtSeconds));
   }
 }

@@ -23,7 +23,18 @@ public final class NoClosingPeakPicksUp implements Rule {
           "trip/closing-peak",
           "Does no instantaneous element pick up on any closing, offset and overreach included?",
           "IEEE 3004.8 instantaneous settings; common practice",
-          List.of("supply.band", "motor", "resistors", "protection.{subject}"));
+          List.of(
+              "supply.band",
+              "motor",
+              "resistors.connection",
+              "resistors.cut-out",
+              "resistors.sections",
+              "resistors.same-limit",
+              "resistors.permanent",
+              "resistors.leads",
+              "resistors.tolerance",
+              "resistors.hot-rise",
+              "protection.{subject}"));
 
   @Override
   public Info info() {
