@@ -1,0 +1,108 @@
+package sliprung.config;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.TreeSet;
+import sliprung.starter.Assumption;
+
+/** What one reading of a file gathers: mistakes, places, defaults filled in. */
+final class Reading {
+  private final SourceText source;
+  private final Set<Diagnostic> diagnostics = new LinkedHashSet<>();
+  private final Map<String, Place> places = new TreeMap<>();
+  private final Set<String> knownPaths = new TreeSet<>();
+  private final List<Assumption> assumptions = new ArrayList<>();
+  private final List<String> notYetJudged = new ArrayList<>();
+  private OptionalDouble supplyHertz = OptionalDouble.empty();
+  private boolean readsCycles = false;
+
+  Reading(SourceText source) {
+    this.source = source;
+  }
+
+  SourceText source() {
+    return source;
+  }
+
+  void mistake(Place place, String path, String message) {
+    mistake(place, path, message, Optional.empty());
+  }
+
+  void mistake(Place place, String path, String message, Optional<String> hint) {
+    diagnostics.add(new Diagnostic(place, path, message, hint, source.line(place.line())));
+  }
+
+  /** Takes over a mistake of another file. */
+  void add(Diagnostic diagnostic) {
+    diagnostics.add(diagnostic);
+  }
+
+  void keep(String path, Place place) {
+    places.put(path, place);
+  }
+
+  void know(String path) {
+    knownPaths.add(path);
+  }
+
+  void assume(String path, String value) {
+    assumptions.add(new Assumption(path, value));
+  }
+
+  void notYetJudged(String path) {
+    notYetJudged.add(path);
+  }
+
+  /** From now on times may be given in cycles; NaN: the supply frequency was a mistake. */
+  void supplyFrequency(double hertz) {
+    readsCycles = true;
+    supplyHertz = Double.isNaN(hertz) ? OptionalDouble.empty() : OptionalDouble.of(hertz);
+  }
+
+  OptionalDouble supplyHertz() {
+    return supplyHertz;
+  }
+
+  /** Whether cycles cannot be converted only because the supply frequency was a mistake itself. */
+  boolean frequencyUnreadable() {
+    return readsCycles && supplyHertz.isEmpty();
+  }
+
+  boolean hasMistakes() {
+    return !diagnostics.isEmpty();
+  }
+
+  /** By place. */
+  List<Diagnostic> diagnostics() {
+    return diagnostics.stream()
+        .sorted(Comparator.comparing(Diagnostic::place).thenComparing(Diagnostic::path))
+        .toList();
+  }
+
+  Map<String, Place> places() {
+    return Map.copyOf(places);
+  }
+
+  Optional<Place> place(String path) {
+    return Optional.ofNullable(places.get(path));
+  }
+
+  Set<String> knownPaths() {
+    return knownPaths;
+  }
+
+  List<Assumption> assumptions() {
+    return List.copyOf(assumptions);
+  }
+
+  List<String> notYetJudged() {
+    return List.copyOf(notYetJudged);
+  }
+}
