@@ -1,13 +1,16 @@
 package sliprung.chart;
 
-import java.util.Comparator;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
-import sliprung.protection.Edge;
+import sliprung.protection.DeviceResponse;
 import sliprung.quantity.Show;
 import sliprung.review.PartText;
 import sliprung.rulebook.ComputedStart;
+import sliprung.rulebook.Exposure;
+import sliprung.rulebook.Facts;
+import sliprung.runup.Scenario;
 import sliprung.tolerance.Corner;
 
 /**
@@ -16,18 +19,15 @@ import sliprung.tolerance.Corner;
  * @param start the computed fault
  * @param clearings slow edges that are proven to operate and open the circuit, first first
  * @param limit first part to reach its limit within the history
- * @param judged whether any part of it has a limit
+ * @param open why it cannot be judged; empty where it can
  * @param wanted clearing ratio
  */
 public record FaultRow(
     ComputedStart start,
     List<Clearing> clearings,
     Optional<Limit> limit,
-    boolean judged,
+    Optional<String> open,
     double wanted) {
-
-  /** Wanted clearing ratio unless the rule book was told otherwise. */
-  public static final double WANTED_RATIO = 1.25;
 
   /**
    * A device that clears.
@@ -53,7 +53,7 @@ public record FaultRow(
     LATE,
     /** Cleared in time with less than the wanted ratio. */
     THIN,
-    /** No part has a limit. */
+    /** Data missing, or what clears is not proven able to. */
     UNKNOWN,
     /** Cleared in time. */
     IN_TIME,
@@ -71,22 +71,35 @@ public record FaultRow(
     clearings = List.copyOf(clearings);
   }
 
-  /** The row of a computed fault. */
-  public static FaultRow of(ComputedStart start, double wanted) {
-    List<Clearing> clearings =
-        start.devices().stream()
-            .filter(d -> d.edge() == Edge.SLOW && d.operates() && d.bound().isEmpty())
-            .filter(d -> d.clearsAtSeconds() < Double.POSITIVE_INFINITY)
-            .map(d -> new Clearing(d.device(), d.clearsAtSeconds()))
-            .sorted(Comparator.comparingDouble(Clearing::seconds).thenComparing(Clearing::device))
-            .toList();
-    Optional<Limit> limit =
-        start.parts().stream()
-            .filter(p -> p.missing().isEmpty() && p.limitAtSeconds() < Double.POSITIVE_INFINITY)
-            .map(p -> new Limit(p.part(), p.limitAtSeconds()))
-            .min(Comparator.comparingDouble(Limit::seconds).thenComparing(Limit::part));
-    boolean judged = start.parts().stream().anyMatch(p -> p.missing().isEmpty());
-    return new FaultRow(start, clearings, limit, judged, wanted);
+  /** The row of an exposure, with every later device that is proven to clear it as well. */
+  public static FaultRow of(Facts facts, Exposure worst) {
+    double wanted = facts.wanted(rule(worst.start().scenario().kind()));
+    List<Clearing> clearings = new ArrayList<>();
+    List<String> seen = new ArrayList<>();
+    Optional<DeviceResponse> next = worst.clearing();
+    while (next.isPresent()) {
+      DeviceResponse response = next.get();
+      clearings.add(new Clearing(response.device(), response.clearsAtSeconds()));
+      seen.add(response.device());
+      next = Exposure.of(facts, worst.start(), seen).clearing();
+    }
+    Optional<Limit> limit = worst.first().map(p -> new Limit(p.part(), p.limitAtSeconds()));
+    Optional<String> open = Optional.empty();
+    if (!worst.missing().isEmpty()) {
+      open = Optional.of("give " + String.join(", ", worst.missing()));
+    } else if (worst.clearingRatio() < wanted && worst.unproven().isPresent()) {
+      open = Optional.of(worst.unproven().get().device() + ": breaking not proven");
+    }
+    return new FaultRow(worst.start(), clearings, limit, open, wanted);
+  }
+
+  private static String rule(Scenario.Kind kind) {
+    return switch (kind) {
+      case LOCKED -> "locked/sequence";
+      case LOCKED_STEP -> "locked/step";
+      case RINGS_SHORTED -> "locked/shorted";
+      default -> "held/exposure";
+    };
   }
 
   /** Time of the first clearing, s; infinite: never. */
@@ -111,7 +124,7 @@ public record FaultRow(
 
   /** What it comes to. */
   public State state() {
-    if (!judged) {
+    if (open.isPresent()) {
       return State.UNKNOWN;
     }
     if (limit.isEmpty()) {
@@ -142,7 +155,7 @@ public record FaultRow(
   /** The two times behind the finding, in a few words. */
   public String times() {
     if (state() == State.UNKNOWN) {
-      return "no part has a limit";
+      return open.orElse("");
     }
     String clears =
         clearings.isEmpty() ? "no device opens" : "open at " + Show.seconds(clearingSeconds());

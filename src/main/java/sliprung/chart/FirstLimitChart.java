@@ -1,12 +1,21 @@
 package sliprung.chart;
 
+import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import sliprung.review.PartText;
 import sliprung.review.Review;
 import sliprung.rulebook.ComputedStart;
+import sliprung.rulebook.Exposures;
+import sliprung.rulebook.Facts;
+import sliprung.rulebook.Practice;
+import sliprung.runup.Scenario;
 
 /**
  * For each fault the time at which a device clears it and the time at which the first part reaches
@@ -14,7 +23,7 @@ import sliprung.rulebook.ComputedStart;
  *
  * @param rows the closest first
  * @param says what to see
- * @param withoutData parts that no row judges, each with the missing input
+ * @param withoutData parts that no row holds against a limit, for want of data
  */
 public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> withoutData) {
   private static final Comparator<FaultRow> CLOSEST_FIRST =
@@ -29,45 +38,37 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
     withoutData = java.util.Collections.unmodifiableSet(new TreeSet<>(withoutData));
   }
 
-  /** Of a review: one row for each kind of fault that was computed. */
+  /** Of a review: one row for each kind of fault and step that was computed. */
   public static FirstLimitChart of(Review review) {
-    Set<String> ids = new java.util.LinkedHashSet<>();
-    review.starts().stream()
-        .filter(s -> s.scenario().isFault())
-        .forEach(s -> ids.add(s.scenario().id()));
-    List<FaultRow> rows =
-        ids.stream().map(id -> closest(review, id)).sorted(CLOSEST_FIRST).toList();
+    Facts facts =
+        new Facts(
+            review.starter(),
+            Practice.named(review.starter().practice().name().toLowerCase(Locale.ROOT)),
+            review.machine(),
+            review.identification(),
+            review.starts(),
+            Map.of(),
+            Map.of());
+    Map<String, List<ComputedStart>> faults = new LinkedHashMap<>();
     Set<String> without = new TreeSet<>();
     for (ComputedStart start : review.starts()) {
       if (start.scenario().isFault()) {
-        start
-            .parts()
-            .forEach(
-                p ->
-                    p.missing()
-                        .ifPresent(m -> without.add(sliprung.review.PartText.words(p.part()))));
+        Scenario.Kind kind = start.scenario().kind();
+        faults
+            .computeIfAbsent(kind + "-" + start.scenario().step(), k -> new ArrayList<>())
+            .add(start);
+        start.parts().stream()
+            .filter(p -> p.missing().isPresent())
+            .forEach(p -> without.add(PartText.words(p.part())));
       }
     }
+    List<FaultRow> rows =
+        faults.values().stream()
+            .map(starts -> Exposures.worst(facts, starts.stream()).orElseThrow())
+            .map(worst -> FaultRow.of(facts, worst))
+            .sorted(CLOSEST_FIRST)
+            .toList();
     return new FirstLimitChart(rows, says(rows), without);
-  }
-
-  private static FaultRow closest(Review review, String scenario) {
-    return review.starts().stream()
-        .filter(s -> s.scenario().id().equals(scenario))
-        .map(s -> FaultRow.of(s, wanted(review, s)))
-        .min(CLOSEST_FIRST)
-        .orElseThrow();
-  }
-
-  /** The clearing ratio that the rule book wants of this kind of fault. */
-  private static double wanted(Review review, ComputedStart start) {
-    String family = start.scenario().id().startsWith("held") ? "held/exposure" : "locked/";
-    return review.findings().stream()
-        .filter(f -> f.rule().startsWith(family) && !f.rule().equals("locked/breakaway"))
-        .filter(f -> f.wanted().isPresent())
-        .mapToDouble(f -> f.wanted().getAsDouble())
-        .max()
-        .orElse(FaultRow.WANTED_RATIO);
   }
 
   private static String says(List<FaultRow> rows) {
@@ -76,7 +77,8 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
     }
     long lost = rows.stream().filter(r -> r.state().isLost()).count();
     long unknown = rows.stream().filter(r -> r.state() == FaultRow.State.UNKNOWN).count();
-    String first = rows.get(0).sentence();
+    String first = rows.stream().filter(r -> r.state() != FaultRow.State.UNKNOWN).findFirst()
+        .map(FaultRow::sentence).orElse("");
     String open = unknown == 0 ? "" : " Not judged: " + unknown + " of " + rows.size() + ".";
     if (lost > 0) {
       return lost
@@ -88,14 +90,18 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
           + open;
     }
     if (unknown == rows.size()) {
-      return "No fault could be judged: no part has a limit.";
+      return "No fault could be judged.";
+    }
+    boolean limits = rows.stream().anyMatch(r -> r.limit().isPresent());
+    if (!limits) {
+      return "No part with data reaches its limit within 30 min of any fault." + open;
     }
     return "Every fault that could be judged is cleared before a part reaches its limit. Closest: "
         + first
         + open;
   }
 
-  /** The row of a scenario, such as {@code held-2}. */
+  /** The row whose deciding start has that scenario, such as {@code held-2}. */
   public Optional<FaultRow> row(String scenario) {
     return rows.stream().filter(r -> r.start().scenario().id().equals(scenario)).findFirst();
   }
