@@ -77,8 +77,12 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
     }
     long lost = rows.stream().filter(r -> r.state().isLost()).count();
     long unknown = rows.stream().filter(r -> r.state() == FaultRow.State.UNKNOWN).count();
-    String first = rows.stream().filter(r -> r.state() != FaultRow.State.UNKNOWN).findFirst()
-        .map(FaultRow::sentence).orElse("");
+    String first =
+        rows.stream()
+            .filter(r -> r.state() != FaultRow.State.UNKNOWN)
+            .findFirst()
+            .map(FaultRow::sentence)
+            .orElse("");
     String open = unknown == 0 ? "" : " Not judged: " + unknown + " of " + rows.size() + ".";
     if (lost > 0) {
       return lost
