@@ -1,0 +1,42 @@
+package sliprung.chart;
+
+/**
+ * A device between its edges, as operating time at a constant current.
+ *
+ * @param label tag and what it is, such as {@code F3 very inverse}
+ * @param amps rising stator amperes, RMS, primary
+ * @param fastSeconds earliest operation at these; infinite: never
+ * @param slowSeconds latest operation at these; infinite: never; not below the fast edge
+ */
+public record Band(String label, double[] amps, double[] fastSeconds, double[] slowSeconds) {
+
+  /** Copies and checks. */
+  public Band {
+    amps = amps.clone();
+    fastSeconds = fastSeconds.clone();
+    slowSeconds = slowSeconds.clone();
+    if (amps.length < 2 || amps.length != fastSeconds.length || amps.length != slowSeconds.length) {
+      throw new IllegalArgumentException("two points or more, both edges at each: " + label);
+    }
+    for (int i = 1; i < amps.length; i++) {
+      if (!(amps[i] > amps[i - 1])) {
+        throw new IllegalArgumentException("amperes must rise: " + label);
+      }
+    }
+  }
+
+  @Override
+  public double[] amps() {
+    return amps.clone();
+  }
+
+  @Override
+  public double[] fastSeconds() {
+    return fastSeconds.clone();
+  }
+
+  @Override
+  public double[] slowSeconds() {
+    return slowSeconds.clone();
+  }
+}

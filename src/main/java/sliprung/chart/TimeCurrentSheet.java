@@ -1,0 +1,187 @@
+package sliprung.chart;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.DoubleStream;
+import sliprung.quantity.Show;
+import sliprung.review.Review;
+import sliprung.rulebook.ComputedStart;
+import sliprung.runup.Outcome;
+import sliprung.runup.Scenario;
+import sliprung.runup.Scenario.Kind;
+import sliprung.runup.Trace;
+
+/**
+ * Starts and devices on one sheet, stator amperes across, seconds up, both logarithmic.
+ *
+ * @param bands devices between their edges
+ * @param starts permitted starts and the locked one as duration curves, nominal values
+ * @param held settled currents of held steps
+ * @param ratedAmps of the motor
+ * @param stall what the rotor winding stands with the rings shorted
+ * @param says what to see
+ */
+public record TimeCurrentSheet(
+    List<Band> bands,
+    List<DurationCurve> starts,
+    List<HeldCurrent> held,
+    double ratedAmps,
+    List<Stall> stall,
+    String says) {
+  /** Two settled currents closer than this are drawn as one line. */
+  private static final double SAME = 0.03;
+
+  /**
+   * The current on which held steps settle.
+   *
+   * @param label which
+   * @param amps stator, RMS
+   */
+  public record HeldCurrent(String label, double amps) {}
+
+  /**
+   * A stall limit.
+   *
+   * @param label cold or hot
+   * @param amps stator, at rest with the rings shorted, rated voltage
+   * @param seconds permitted
+   */
+  public record Stall(String label, double amps, double seconds) {}
+
+  /** Copies the lists. */
+  public TimeCurrentSheet {
+    bands = List.copyOf(bands);
+    starts = List.copyOf(starts);
+    held = List.copyOf(held);
+    stall = List.copyOf(stall);
+  }
+
+  /** Of a review and the bands of its devices. */
+  public static TimeCurrentSheet of(Review review, List<Band> bands) {
+    List<DurationCurve> starts = new ArrayList<>();
+    Optional<ComputedStart> cold = review.start("cold");
+    cold.ifPresent(s -> starts.add(curve("start", s)));
+    review
+        .start("hot")
+        .filter(hot -> cold.isEmpty() || differs(hot, cold.get()))
+        .ifPresent(s -> starts.add(curve("hot start", s)));
+    review.start("locked").ifPresent(s -> starts.add(curve("locked, sequence running", s)));
+    List<HeldCurrent> held = held(review);
+    return new TimeCurrentSheet(
+        bands, starts, held, review.starter().motor().current(), stall(review), says(review, held));
+  }
+
+  private static DurationCurve curve(String label, ComputedStart start) {
+    double until = start.history().endSeconds();
+    if (!start.scenario().isFault()) {
+      until = start.history().runUpSeconds().orElse(until);
+    }
+    return DurationCurve.stator(label, start.history().stages(), until);
+  }
+
+  private static boolean differs(ComputedStart a, ComputedStart b) {
+    double x = a.history().runUpSeconds().orElse(-1.0);
+    double y = b.history().runUpSeconds().orElse(-1.0);
+    return Math.abs(x - y) > SAME * Math.abs(y);
+  }
+
+  private static List<HeldCurrent> held(Review review) {
+    List<ComputedStart> starts =
+        review.starts().stream()
+            .filter(s -> s.corner().isNominal() && s.from() == ComputedStart.From.COLD)
+            .filter(s -> s.scenario().kind() == Kind.HELD)
+            .filter(s -> s.history().outcome() == Outcome.HELD)
+            .sorted(Comparator.comparingDouble(TimeCurrentSheet::settledAmps))
+            .toList();
+    List<HeldCurrent> lines = new ArrayList<>();
+    List<ComputedStart> group = new ArrayList<>();
+    for (ComputedStart start : starts) {
+      boolean far =
+          !group.isEmpty() && settledAmps(start) > settledAmps(group.get(0)) * (1.0 + SAME);
+      if (far) {
+        lines.add(line(group));
+        group.clear();
+      }
+      group.add(start);
+    }
+    if (!group.isEmpty()) {
+      lines.add(line(group));
+    }
+    return lines;
+  }
+
+  private static HeldCurrent line(List<ComputedStart> group) {
+    List<Integer> steps = group.stream().map(s -> s.scenario().step()).distinct().sorted().toList();
+    boolean running =
+        group.stream().allMatch(s -> s.scenario().load() == Scenario.LoadMode.RUNNING);
+    double amps = settledAmps(group.get(group.size() - 1));
+    String load = running ? " at running load" : "";
+    return new HeldCurrent("held on " + steps(steps) + load + ": " + Show.amps(amps), amps);
+  }
+
+  /** {@code step 2}, {@code steps 1–5} or {@code steps 1, 3}. */
+  static String steps(List<Integer> rising) {
+    int first = rising.get(0);
+    int last = rising.get(rising.size() - 1);
+    if (rising.size() == 1) {
+      return "step " + first;
+    }
+    return last - first == rising.size() - 1 && rising.size() > 2
+        ? "steps " + first + "–" + last
+        : "steps " + rising.stream().map(String::valueOf).collect(Collectors.joining(", "));
+  }
+
+  private static double settledAmps(ComputedStart start) {
+    Trace last = start.history().stages().get(start.history().stages().size() - 1).trace();
+    return last.statorAmps()[last.last()];
+  }
+
+  private static List<Stall> stall(Review review) {
+    Optional<ComputedStart> shorted = review.start("rings-shorted");
+    List<Stall> stall = new ArrayList<>();
+    shorted.ifPresent(
+        s -> {
+          double amps = settledAmps(s);
+          var motor = review.starter().motor();
+          motor
+              .stallColdSeconds()
+              .ifPresent(t -> stall.add(new Stall("stall limit cold", amps, t)));
+          motor.stallHotSeconds().ifPresent(t -> stall.add(new Stall("stall limit hot", amps, t)));
+        });
+    return stall;
+  }
+
+  private static String says(Review review, List<HeldCurrent> held) {
+    String meaning =
+        "A start has no single point here: its curve says how long the current stays at or above"
+            + " each value.";
+    double rated = review.starter().motor().current();
+    List<HeldCurrent> blind = held.stream().filter(h -> h.amps() < rated).toList();
+    if (blind.isEmpty()) {
+      return meaning;
+    }
+    return meaning
+        + " Held on a step the motor can settle at "
+        + Show.amps(blind.get(0).amps())
+        + ", below its rated "
+        + Show.amps(rated)
+        + ": left of every stator device.";
+  }
+
+  /** Greatest ampere of what is computed. */
+  public double greatestAmps() {
+    DoubleStream curves = starts.stream().flatMapToDouble(c -> DoubleStream.of(c.amps()));
+    DoubleStream stalls = stall.stream().mapToDouble(Stall::amps);
+    return DoubleStream.concat(curves, stalls).max().orElse(ratedAmps * 6.0);
+  }
+
+  /** Least ampere of what is computed. */
+  public double leastAmps() {
+    DoubleStream curves = starts.stream().flatMapToDouble(c -> DoubleStream.of(c.amps()));
+    DoubleStream lines = held.stream().mapToDouble(HeldCurrent::amps);
+    return Math.min(ratedAmps, DoubleStream.concat(curves, lines).min().orElse(ratedAmps));
+  }
+}

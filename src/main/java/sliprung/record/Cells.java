@@ -1,0 +1,53 @@
+package sliprung.record;
+
+import java.util.List;
+
+/** Tables of plain cells. */
+final class Cells {
+  private final Html page;
+
+  Cells(Html page) {
+    this.page = page;
+  }
+
+  /** Opens a table with a caption and its heads; a head that begins with {@code #} is numeric. */
+  Cells open(String caption, List<String> heads) {
+    page.open("div", "class", "wide").open("table").markup("\n");
+    page.element("caption", caption);
+    page.open("thead").open("tr");
+    for (String head : heads) {
+      if (head.startsWith("#")) {
+        page.element("th", head.substring(1), "scope", "col", "class", "number");
+      } else {
+        page.element("th", head, "scope", "col");
+      }
+    }
+    page.end().end();
+    page.open("tbody").markup("\n");
+    numeric = heads.stream().map(h -> h.startsWith("#")).toList();
+    return this;
+  }
+
+  private List<Boolean> numeric = List.of();
+
+  /** A row; its first cell heads it. */
+  Cells row(String... cells) {
+    page.open("tr");
+    for (int i = 0; i < cells.length; i++) {
+      if (i == 0) {
+        page.element("th", cells[i], "scope", "row");
+      } else if (numeric.get(i)) {
+        page.element("td", cells[i], "class", "number");
+      } else {
+        page.element("td", cells[i]);
+      }
+    }
+    page.end();
+    return this;
+  }
+
+  /** Closes the table. */
+  void close() {
+    page.end().end().end();
+  }
+}

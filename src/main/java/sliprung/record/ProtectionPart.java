@@ -1,0 +1,127 @@
+package sliprung.record;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import sliprung.chart.FaultRow;
+import sliprung.chart.FirstLimitChart;
+import sliprung.protection.DeviceResponse;
+import sliprung.protection.PartResponse;
+import sliprung.quantity.Show;
+import sliprung.review.PartText;
+import sliprung.review.Review;
+import sliprung.rulebook.ComputedStart;
+
+/** Devices and parts over the permitted starts, and every fault. */
+final class ProtectionPart {
+  private ProtectionPart() {}
+
+  static void write(Html page, Review review, FirstLimitChart firstLimit, ReviewPictures pictures) {
+    page.open("section").markup("\n");
+    page.element("h2", "Devices and parts");
+    ReviewHtml.figure(page, pictures.timeCurrent());
+    for (String id : List.of("cold", "hot")) {
+      review.start(id).ifPresent(s -> start(page, s));
+    }
+    faults(page, firstLimit);
+    page.end();
+  }
+
+  private static void start(Html page, ComputedStart start) {
+    String words = start.words();
+    Cells devices =
+        new Cells(page)
+            .open(
+                "Devices over the nominal "
+                    + words
+                    + " and 30 min of running after it; a use of 1.00 or more operates",
+                List.of(
+                    "device",
+                    "edge",
+                    "#use",
+                    "#use by run-up",
+                    "#operates",
+                    "#clears",
+                    "#current margin",
+                    "#stretch margin",
+                    "remark"));
+    for (DeviceResponse device : start.devices()) {
+      devices.row(cells(device));
+    }
+    devices.close();
+    Cells parts =
+        new Cells(page)
+            .open(
+                "Parts over the nominal " + words + "; a use of 1.00 or more is past the limit",
+                List.of("part", "#use", "#limit reached", "remark"));
+    for (PartResponse part : start.parts()) {
+      boolean known = part.missing().isEmpty();
+      parts.row(
+          PartText.words(part.part()),
+          known ? use(part.use()) : "–",
+          known ? Show.seconds(part.limitAtSeconds()) : "–",
+          part.missing().map(path -> "not judged: give " + path).orElse(""));
+    }
+    parts.close();
+  }
+
+  private static String[] cells(DeviceResponse device) {
+    boolean known = device.notJudged().isEmpty();
+    List<String> remarks = new ArrayList<>();
+    device.notJudged().ifPresent(why -> remarks.add("not judged: " + why));
+    device.bound().ifPresent(why -> remarks.add("a bound, not proven: " + why));
+    return new String[] {
+      device.device(),
+      device.edge().word(),
+      known ? use(device.use()) : "–",
+      known ? use(device.useAtRunUp()) : "–",
+      known ? Show.seconds(device.operatesAtSeconds()) : "–",
+      known ? Show.seconds(device.clearsAtSeconds()) : "–",
+      device.currentMargin().isPresent() ? Show.ratio(device.currentMargin().getAsDouble()) : "",
+      device.stretchMargin().isPresent() ? Show.ratio(device.stretchMargin().getAsDouble()) : "",
+      String.join("; ", remarks)
+    };
+  }
+
+  /** A use never rounds to 1: below is below, above is above. */
+  static String use(double use) {
+    String shown = Show.ratio(use);
+    if (!shown.equals("1.00") || use == 1.0) {
+      return Double.isInfinite(use) ? "∞" : shown;
+    }
+    return use < 1.0 ? "0.999" : "1.001";
+  }
+
+  private static void faults(Html page, FirstLimitChart chart) {
+    if (chart.rows().isEmpty()) {
+      return;
+    }
+    Cells cells =
+        new Cells(page)
+            .open(
+                "Faults, each at the corner and from the state where clearing and first limit lie"
+                    + " closest; device slow edge, times from line closing",
+                List.of(
+                    "fault",
+                    "decided at",
+                    "cleared by",
+                    "#at",
+                    "first part at its limit",
+                    "#at",
+                    "#clearing ratio",
+                    "finding"));
+    for (FaultRow row : chart.rows()) {
+      Optional<FaultRow.Limit> limit = row.limit();
+      cells.row(
+          row.start().words(),
+          row.start().corner().words(),
+          row.clearings().isEmpty() ? "nothing" : row.clearings().get(0).device(),
+          Show.seconds(row.clearingSeconds()),
+          limit.map(l -> PartText.words(l.part())).orElse("none within 30 min"),
+          Show.seconds(row.limitSeconds()),
+          limit.isEmpty() ? "–" : Show.ratio(row.ratio()),
+          row.open().map(why -> "not judged: " + why).orElse(row.finding()));
+    }
+    cells.close();
+  }
+}
