@@ -26,19 +26,29 @@ final class AccumulatingMeter implements Meter {
 
   @Override
   public double advance(Piece piece) {
-    double reached = level >= 1.0 ? 0.0 : Double.POSITIVE_INFINITY;
-    double passed = 0.0;
     peak = level;
+    if (piece.clearOf(breaks)) {
+      return advanceWithin(piece);
+    }
+    double reached = Double.POSITIVE_INFINITY;
+    double passed = 0.0;
     for (Piece part : piece.cutAt(breaks)) {
-      double before = level;
-      level = Math.max(0.0, before + part.integral(rate, 1.0));
-      if (level >= 1.0 && before < 1.0 && Double.isInfinite(reached)) {
-        reached = passed + Math.min(part.seconds(), reachedIn(part, 1.0 - before));
-      }
+      reached = Math.min(reached, passed + advanceWithin(part));
       passed += part.seconds();
-      peak = Math.max(peak, level);
     }
     return reached;
+  }
+
+  private double advanceWithin(Piece part) {
+    double before = level;
+    level = Math.max(0.0, before + part.integral(rate, 1.0));
+    peak = Math.max(peak, level);
+    if (before >= 1.0) {
+      return 0.0;
+    }
+    return level >= 1.0
+        ? Math.min(part.seconds(), reachedIn(part, 1.0 - before))
+        : Double.POSITIVE_INFINITY;
   }
 
   private double reachedIn(Piece part, double need) {

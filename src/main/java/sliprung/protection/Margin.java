@@ -8,7 +8,7 @@ final class Margin {
   private static final double GREATEST = 100.0;
 
   private static final double LEAST = 1e-3;
-  private static final double PRECISION = 1e-6;
+  private static final double PRECISION = 1e-5;
 
   private Margin() {}
 

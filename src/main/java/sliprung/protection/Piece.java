@@ -14,6 +14,9 @@ import java.util.Arrays;
  */
 record Piece(double seconds, double first, double middle, double last, boolean standing) {
   private static final double[] NODES = {0.5 - Math.sqrt(0.15), 0.5, 0.5 + Math.sqrt(0.15)};
+  private static final double SAME = 1e-5;
+  private static final double HARDLY = 1e-3;
+  private static final double LONGEST_VARYING = 0.5;
   private static final double[] WEIGHTS = {5.0 / 18.0, 8.0 / 18.0, 5.0 / 18.0};
 
   /** A piece of constant current with the rotor turning. */
@@ -67,15 +70,48 @@ record Piece(double seconds, double first, double middle, double last, boolean s
         (to - from) * seconds, amps(from), amps(0.5 * (from + to)), amps(to), standing);
   }
 
+  /**
+   * This piece and the one after it as one, if a single quadratic tells the same: within {@value
+   * #SAME} of the greatest current, and no longer than {@value #LONGEST_VARYING} s unless the
+   * current hardly varies (elements take a piece at its mean square).
+   *
+   * @return null where it does not
+   */
+  Piece joined(Piece next) {
+    if (standing != next.standing) {
+      return null;
+    }
+    double whole = seconds + next.seconds;
+    double greatest = Math.max(greatest(), next.greatest());
+    double least = Math.min(least(), next.least());
+    if (whole > LONGEST_VARYING && greatest - least > HARDLY * greatest) {
+      return null;
+    }
+    double cut = seconds / whole;
+    double halfway = cut >= 0.5 ? amps(0.5 / cut) : next.amps((0.5 - cut) / (1.0 - cut));
+    Piece one = new Piece(whole, first, halfway, next.last, standing);
+    double slack = SAME * greatest;
+    boolean same =
+        Math.abs(one.amps(0.5 * cut) - middle) <= slack
+            && Math.abs(one.amps(cut) - last) <= slack
+            && Math.abs(next.first - last) <= slack
+            && Math.abs(one.amps(0.5 * (1.0 + cut)) - next.middle) <= slack;
+    return same ? one : null;
+  }
+
+  private double least() {
+    return Math.min(first, Math.min(middle, last));
+  }
+
   /** Cut wherever the current passes one of the levels; mostly the piece itself, uncut. */
   Piece[] cutAt(double... levels) {
+    if (clearOf(levels)) {
+      return new Piece[] {this};
+    }
     double[] cuts = new double[2 * levels.length + 2];
     int count = 1;
     double slope = -3.0 * first + 4.0 * middle - last;
     double bend = 2.0 * (first - 2.0 * middle + last);
-    if (slope == 0.0 && bend == 0.0) {
-      return new Piece[] {this};
-    }
     for (double level : levels) {
       count = roots(bend, slope, first - level, cuts, count);
     }
@@ -93,6 +129,20 @@ record Piece(double seconds, double first, double middle, double last, boolean s
       }
     }
     return Arrays.copyOf(parts, kept);
+  }
+
+  /** Whether the current surely stays on one side of every level. */
+  boolean clearOf(double... levels) {
+    // a quadratic leaves the range of its three values by at most an eighth of their range
+    double least = least();
+    double greatest = greatest();
+    double excess = 0.125 * (greatest - least);
+    for (double level : levels) {
+      if (level >= least - excess && level <= greatest + excess && greatest > least) {
+        return false;
+      }
+    }
+    return true;
   }
 
   /** Appends the roots of {@code a x² + b x + c} that lie inside the piece. */

@@ -89,15 +89,21 @@ final class Waveform {
     private final List<Piece> pieces = new ArrayList<>();
     private final double runUp;
     private int runUpCount;
+    private int stageBegin;
 
     Collector(double runUp) {
       this.runUp = runUp;
     }
 
     void add(Stage stage, Channel channel) {
+      stageBegin = pieces.size();
       Trace trace = stage.trace();
       double share = channel.share(stage);
       double[] seconds = trace.seconds();
+      if (share == 0.0) {
+        add(new Piece(seconds[trace.last()] - seconds[0], 0.0, 0.0, 0.0, false), seconds[0]);
+        return;
+      }
       double[] values = channel.quantity(trace);
       double[] speed = trace.speed();
       for (int i = 0; i + 2 < seconds.length; i += 2) {
@@ -107,10 +113,7 @@ final class Waveform {
         }
         boolean standing = speed[i] == 0.0 && speed[i + 1] == 0.0 && speed[i + 2] == 0.0;
         boolean read =
-            share != 0.0
-                && channel.reads(trace, i)
-                && channel.reads(trace, i + 1)
-                && channel.reads(trace, i + 2);
+            channel.reads(trace, i) && channel.reads(trace, i + 1) && channel.reads(trace, i + 2);
         double k = read ? share : 0.0;
         add(
             new Piece(length, k * values[i], k * values[i + 1], k * values[i + 2], standing),
@@ -127,10 +130,21 @@ final class Waveform {
         pieces.add(piece.part(share, 1.0));
         return;
       }
-      pieces.add(piece);
+      Piece joined = joinedToLast(piece, from);
+      if (joined == null) {
+        pieces.add(piece);
+      } else {
+        pieces.set(pieces.size() - 1, joined);
+      }
       if (end <= runUp) {
         runUpCount = pieces.size();
       }
+    }
+
+    /** Neighbours of one stage are joined, but never across the end of the run-up. */
+    private Piece joinedToLast(Piece piece, double from) {
+      boolean apart = pieces.size() == stageBegin || pieces.size() == runUpCount && from >= runUp;
+      return apart ? null : pieces.get(pieces.size() - 1).joined(piece);
     }
   }
 }
