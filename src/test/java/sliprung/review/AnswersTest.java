@@ -73,7 +73,7 @@ class AnswersTest {
     List<Finding> trips =
         TIGHT.findings().stream().filter(f -> f.rule().startsWith("trip")).toList();
     assertThat(Answers.of(with(TIGHT, trips, List.of())).headline())
-        .isEqualTo("No breach. Thinnest: F3 comes within 7 % of tripping a hot start.");
+        .isEqualTo("No breach. Thinnest: F3 comes within 7\u00a0% of tripping a hot start.");
   }
 
   @Test
