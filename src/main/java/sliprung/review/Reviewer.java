@@ -68,8 +68,7 @@ public final class Reviewer {
   /** Computes everything that rules may look at. */
   public static Facts facts(
       Starter starter, Machine machine, Identification identification, String circuit) {
-    StartComputation.Computed computed =
-        new StartComputation(starter, machine, circuit).compute();
+    StartComputation.Computed computed = new StartComputation(starter, machine, circuit).compute();
     Bands bands = new Bands(starter);
     Map<String, Double> pickUps = new HashMap<>();
     for (Device device : starter.protection()) {

@@ -54,9 +54,7 @@ final class StartComputation {
   /** Corners share nothing, so both cores work on them; the order stays that of the corners. */
   Computed compute() {
     List<AtCorner> corners =
-        Corners.of(starter).entrySet().stream()
-            .toList()
-            .parallelStream()
+        Corners.of(starter).entrySet().stream().toList().parallelStream()
             .map(e -> at(e.getKey(), e.getValue()))
             .toList();
     List<ComputedStart> starts = new ArrayList<>();
@@ -74,15 +72,15 @@ final class StartComputation {
     // from before is then its rated current.
     Motor motor = starter.motor();
     double stator = running.map(r -> r.point().statorAmps()).orElse(motor.current());
-    double ring =
-        running.map(r -> r.point().ringAmps()).orElse(motor.rotorCurrent().orElse(0.0));
+    double ring = running.map(r -> r.point().ringAmps()).orElse(motor.rotorCurrent().orElse(0.0));
     Duty duty = starter.duty();
 
     List<ComputedStart> starts = new ArrayList<>();
     StartHistory permitted = simulator.run(Scenario.PERMITTED, conditions);
     for (int n = 1; n <= duty.coldStarts(); n++) {
       starts.add(
-          permitted(corner, permitted, ComputedStart.From.COLD, n, DevicePreload.COLD, PartPreload.COLD));
+          permitted(
+              corner, permitted, ComputedStart.From.COLD, n, DevicePreload.COLD, PartPreload.COLD));
     }
     List<Double> sections =
         evaluator.sectionLevelsAfter(permitted, PartPreload.COLD, Math.max(1, duty.coldStarts()));
@@ -96,7 +94,8 @@ final class StartComputation {
     PartPreload hot = new PartPreload(stator, ring, 0.0, sections);
     for (Scenario fault : faults()) {
       StartHistory history = simulator.run(fault, conditions);
-      starts.add(fault(corner, history, ComputedStart.From.COLD, DevicePreload.COLD, PartPreload.COLD));
+      starts.add(
+          fault(corner, history, ComputedStart.From.COLD, DevicePreload.COLD, PartPreload.COLD));
       starts.add(fault(corner, history, ComputedStart.From.HOT, forgotten, hot));
     }
     return new AtCorner(corner, running, starts);
