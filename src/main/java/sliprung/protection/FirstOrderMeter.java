@@ -5,6 +5,11 @@ package sliprung.protection;
  * a constant current over any length; a varying one enters each piece with the mean of its square.
  */
 final class FirstOrderMeter implements Meter {
+  /** An end value that is 1 but for rounding: approached for ever, never reached. */
+  static final double AT_LIMIT = 1.0 + 1e-12;
+
+  static final double BELOW_ONE = Math.nextDown(1.0);
+
   private final double referenceAmps;
   private final Piece.OfCurrent timeConstant;
   private double theta;
@@ -35,6 +40,9 @@ final class FirstOrderMeter implements Meter {
     double tau = timeConstant.at(Math.sqrt(square));
     double before = theta;
     theta = end + (before - end) * Math.exp(-piece.seconds() / tau);
+    if (before < 1.0 && end <= AT_LIMIT) {
+      theta = Math.min(theta, BELOW_ONE);
+    }
     peak = Math.max(before, theta);
     if (before >= 1.0) {
       return 0.0;

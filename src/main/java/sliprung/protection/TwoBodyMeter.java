@@ -44,6 +44,10 @@ final class TwoBodyMeter implements Meter {
     double top = humpAt > 0.0 ? at(end, pull, rest, humpAt) : before;
     double reached = Double.POSITIVE_INFINITY;
     double after = at(end, pull, rest, h);
+    if (before < 1.0 && end <= FirstOrderMeter.AT_LIMIT && heater <= FirstOrderMeter.AT_LIMIT) {
+      top = Math.min(top, FirstOrderMeter.BELOW_ONE);
+      after = Math.min(after, FirstOrderMeter.BELOW_ONE);
+    }
     if (before >= 1.0) {
       reached = 0.0;
     } else if (humpAt > 0.0 && top >= 1.0) {
