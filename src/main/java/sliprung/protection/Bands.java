@@ -59,6 +59,12 @@ public final class Bands {
     return model(device, edge, starter).seconds(amps);
   }
 
+  /** The same after a preload. */
+  public OptionalDouble operatingSeconds(
+      Device device, Edge edge, double amps, DevicePreload preload) {
+    return model(device, edge, starter).seconds(amps, preload);
+  }
+
   /**
    * The least constant current in A that ever operates an edge, to 1e-9; empty where there is none
    * up to a hundred thousand amperes or it cannot be told.

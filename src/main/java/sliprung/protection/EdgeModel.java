@@ -15,6 +15,11 @@ interface EdgeModel {
    */
   OptionalDouble seconds(double amps);
 
+  /** The same after a preload, where the device has a memory of one. */
+  default OptionalDouble seconds(double amps, DevicePreload preload) {
+    return seconds(amps);
+  }
+
   /** Empty, or why this edge cannot be computed whatever the start. */
   default Optional<String> unknown() {
     return Optional.empty();

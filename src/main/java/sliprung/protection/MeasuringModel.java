@@ -61,7 +61,12 @@ final class MeasuringModel implements EdgeModel {
 
   @Override
   public OptionalDouble seconds(double amps) {
-    Meter fresh = meter.apply(DevicePreload.COLD);
+    return seconds(amps, DevicePreload.COLD);
+  }
+
+  @Override
+  public OptionalDouble seconds(double amps, DevicePreload preload) {
+    Meter fresh = meter.apply(preload);
     double reached = fresh.advance(Piece.constant(LONGEST, amps));
     return fresh.doubt().isPresent() ? OptionalDouble.empty() : OptionalDouble.of(reached);
   }

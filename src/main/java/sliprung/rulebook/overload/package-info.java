@@ -1,0 +1,2 @@
+/** Rules about overload relays: what a dial means in amperes. */
+package sliprung.rulebook.overload;
