@@ -9,6 +9,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import sliprung.protection.Bands;
 import sliprung.review.PartText;
 import sliprung.review.Review;
 import sliprung.rulebook.ComputedStart;
@@ -48,7 +49,8 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
             review.identification(),
             review.starts(),
             Map.of(),
-            Map.of());
+            Map.of(),
+            new Bands(review.starter()));
     Map<String, List<ComputedStart>> faults = new LinkedHashMap<>();
     Set<String> without = new TreeSet<>();
     for (ComputedStart start : review.starts()) {

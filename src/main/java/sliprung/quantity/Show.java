@@ -4,15 +4,18 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
 
-/** Prints quantities for people: three significant figures, SI spacing, units always. */
+/**
+ * Prints quantities for people: three significant figures, SI spacing, units always. A no-break
+ * space keeps a figure and its unit together.
+ */
 public final class Show {
-  private static final String THIN = "\u00a0";
+  private static final String NO_BREAK = "\u00a0";
 
   private Show() {}
 
   /** {@code 208 A}, {@code 14.3 kA}, {@code ∞} never comes. */
   public static String amps(double amps) {
-    return Math.abs(amps) >= 9999.5 ? three(amps / 1000.0) + " kA" : three(amps) + " A";
+    return Math.abs(amps) >= 9999.5 ? three(amps / 1000.0) + "\u00a0kA" : three(amps) + "\u00a0A";
   }
 
   /** {@code 0.92 s}, {@code 13.7 s}, {@code 5.2 min} from ten minutes on; {@code never}. */
@@ -20,27 +23,29 @@ public final class Show {
     if (Double.isInfinite(seconds)) {
       return "never";
     }
-    return Math.abs(seconds) >= 599.5 ? three(seconds / 60.0) + " min" : three(seconds) + " s";
+    return Math.abs(seconds) >= 599.5
+        ? three(seconds / 60.0) + "\u00a0min"
+        : three(seconds) + "\u00a0s";
   }
 
   /** {@code 1 233 rpm} from rad/s. */
   public static String rpm(double radiansPerSecond) {
-    return grouped(Math.round(radiansPerSecond * 30.0 / Math.PI)) + " rpm";
+    return grouped(Math.round(radiansPerSecond * 30.0 / Math.PI)) + "\u00a0rpm";
   }
 
   /** {@code 1 290 N·m}. */
   public static String torque(double newtonMetres) {
-    return three(newtonMetres) + " N·m";
+    return three(newtonMetres) + "\u00a0N·m";
   }
 
   /** {@code 690 V}. */
   public static String volts(double volts) {
-    return three(volts) + " V";
+    return three(volts) + "\u00a0V";
   }
 
   /** {@code 7 %} of a share. */
   public static String percent(double share) {
-    return three(share * 100.0) + " %";
+    return three(share * 100.0) + "\u00a0%";
   }
 
   /** A margin or ratio with two decimals below ten: {@code 1.07}, {@code 7.93}, {@code 12.4}. */
@@ -83,7 +88,7 @@ public final class Show {
     StringBuilder out = new StringBuilder();
     for (int i = 0; i < whole.length(); i++) {
       if (i > 0 && (whole.length() - i) % 3 == 0) {
-        out.append(THIN);
+        out.append(NO_BREAK);
       }
       out.append(whole.charAt(i));
     }

@@ -1,0 +1,137 @@
+package sliprung.cli;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.nio.file.Path;
+import java.time.LocalDate;
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+import sliprung.chart.StatorBands;
+import sliprung.config.CurveLibraryReader;
+import sliprung.config.StarterReader;
+import sliprung.config.StarterReading;
+import sliprung.record.InputFile;
+import sliprung.record.RecordWriter;
+import sliprung.review.Review;
+import sliprung.review.Reviewer;
+import sliprung.rulebook.catalogue.Catalogue;
+
+/** The main job. */
+@Command(
+    name = "review",
+    mixinStandardHelpOptions = true,
+    description = "Reviews starters: findings on standard output, records with --out.")
+final class ReviewCommand implements Callable<Integer> {
+  private final PrintWriter out;
+  private final PrintWriter err;
+  private final Terminal terminal;
+
+  @Parameters(arity = "1..*", paramLabel = "FILE", description = "Starter descriptions, YAML.")
+  private List<Path> files;
+
+  @Option(
+      names = "--out",
+      paramLabel = "DIR",
+      description = "Write each record into DIR/(the file's stem).")
+  private Path directory;
+
+  @Option(
+      names = "--on",
+      paramLabel = "DATE",
+      description = "Judge accepted deviations at this date, such as 2027-01-31; today if absent.")
+  private LocalDate date;
+
+  @Option(names = "--all", description = "Print every clear finding.")
+  private boolean everything;
+
+  ReviewCommand(PrintWriter out, PrintWriter err, Terminal terminal) {
+    this.out = out;
+    this.err = err;
+    this.terminal = terminal;
+  }
+
+  private record Done(Path file, Review review, List<InputFile> inputs, double seconds) {}
+
+  @Override
+  public Integer call() {
+    List<StarterReading.Described> read = new ArrayList<>();
+    if (!readAll(read)) {
+      return ExitStatus.WRONG_INPUT;
+    }
+    LocalDate on = date == null ? LocalDate.now() : date;
+    List<Done> done = new ArrayList<>();
+    for (int i = 0; i < files.size(); i++) {
+      long from = System.nanoTime();
+      Review review = Reviewer.review(read.get(i).starter(), on);
+      double seconds = (System.nanoTime() - from) / 1e9;
+      List<InputFile> inputs =
+          read.get(i).inputs().stream()
+              .map(f -> new InputFile(base(f.name()), f.sha256(), f.text()))
+              .toList();
+      done.add(new Done(files.get(i), review, inputs, seconds));
+    }
+    Summary summary = new Summary(out, terminal, everything);
+    int status = ExitStatus.CLEAR;
+    for (Done one : done) {
+      summary.print(one.review(), one.seconds());
+      if (directory != null) {
+        Path place = directory.resolve(stem(one.file()));
+        try {
+          RecordWriter.write(
+              place,
+              RecordWriter.files(
+                  one.review(),
+                  one.inputs(),
+                  StatorBands.of(one.review().starter()),
+                  ProgramVersion.text()));
+        } catch (IOException e) {
+          out.flush();
+          err.println("sliprung: the record cannot be written to " + place + ": " + e.getMessage());
+          return ExitStatus.WRONG_INPUT;
+        }
+        summary.written(place.resolve("review.html").toString());
+      }
+      status = ExitStatus.worse(status, one.review().exitStatus());
+    }
+    return status;
+  }
+
+  /** Reads every file before anything is computed or written; false after a mistake in any. */
+  private boolean readAll(List<StarterReading.Described> into) {
+    StarterReader reader = new StarterReader(CurveLibraryReader.builtIn(), Catalogue.names());
+    boolean good = true;
+    Set<String> stems = new HashSet<>();
+    for (Path file : files) {
+      StarterReading reading = reader.read(file);
+      reading.diagnostics().forEach(d -> err.print(d.render()));
+      reading.described().ifPresent(into::add);
+      good &= reading.described().isPresent();
+      if (directory != null && !stems.add(stem(file))) {
+        err.println(
+            "sliprung: two files are named "
+                + stem(file)
+                + ": their records would overwrite each other in "
+                + directory);
+        good = false;
+      }
+    }
+    return good;
+  }
+
+  /** A record names its inputs without the folders of the machine it was made on. */
+  private static String base(String name) {
+    return String.valueOf(Path.of(name).getFileName());
+  }
+
+  private static String stem(Path file) {
+    String name = String.valueOf(file.getFileName());
+    int dot = name.lastIndexOf('.');
+    return dot > 0 ? name.substring(0, dot) : name;
+  }
+}
