@@ -9,6 +9,7 @@ import org.apache.batik.svggen.SVGGeneratorContext;
 import org.apache.batik.svggen.SVGGraphics2D;
 import org.apache.batik.svggen.SVGGraphics2DIOException;
 import org.apache.batik.svggen.SVGIDGenerator;
+import org.apache.batik.svggen.SVGSyntax;
 import org.w3c.dom.Document;
 import org.w3c.dom.Element;
 import org.w3c.dom.Node;
@@ -107,8 +108,14 @@ public final class Svg {
     return element;
   }
 
-  /** Puts the page's letters in the place of the logical fonts of Java. */
+  /**
+   * Puts the page's letters in the place of the logical fonts of Java, and takes away the one id,
+   * never referred to, that every picture would share.
+   */
   private static void letters(Element element) {
+    if (element.getAttribute("id").equals(SVGSyntax.ID_PREFIX_GENERIC_DEFS)) {
+      element.removeAttribute("id");
+    }
     if (!element.getAttribute("font-family").isEmpty()) {
       element.setAttribute("font-family", LETTERS);
     }

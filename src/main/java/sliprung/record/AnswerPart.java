@@ -109,10 +109,10 @@ final class AnswerPart {
     page.open("article", "class", "finding is-" + style(finding.verdict()));
     page.open("h3");
     page.open("span", "class", style(finding.verdict())).text(finding.verdict().word()).close();
-    page.text("  ").open("b").text(finding.subject()).close();
+    page.text(" ").open("b").text(finding.subject()).close();
     String margin = FindingText.marginOfWanted(finding);
     if (!margin.isEmpty()) {
-      page.text("  margin " + margin + (finding.wanted().isPresent() ? " wanted" : ""));
+      page.text(" margin " + margin + (finding.wanted().isPresent() ? " wanted" : ""));
     }
     page.end();
     page.element("p", finding.says());
@@ -133,7 +133,7 @@ final class AnswerPart {
                         + finding.until().map(d -> " until " + d).orElse("")
                         + "."));
     page.open("p", "class", "quiet");
-    page.text(evidence(finding)).text("  ");
+    page.text(evidence(finding)).text(" ");
     page.open("code").text(finding.rule()).close();
     page.end();
     page.end();

@@ -36,6 +36,15 @@ public final class Crusher {
 
   /** The starter under a name and with a reason that may be hostile text. */
   public static Starter named(String name) {
+    return starter(name, Map.of("AC-2", 315.0, "AC-3", 315.0));
+  }
+
+  /** The starter with a line contactor that nothing is known of. */
+  public static Starter withoutLineRatings(String name) {
+    return starter(name, Map.of());
+  }
+
+  private static Starter starter(String name, Map<String, Double> lineRatings) {
     Motor motor =
         new Motor(
             690,
@@ -80,7 +89,7 @@ public final class Crusher {
         new Contactor(
             "K1",
             Contactor.Place.LINE,
-            Map.of("AC-2", 315.0, "AC-3", 315.0),
+            lineRatings,
             of(690),
             Optional.empty(),
             none(),

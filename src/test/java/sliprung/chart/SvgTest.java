@@ -1,0 +1,82 @@
+package sliprung.chart;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import org.w3c.dom.Document;
+import org.w3c.dom.Element;
+import sliprung.record.Parsed;
+import sliprung.review.CrusherReview;
+import sliprung.review.Review;
+
+class SvgTest {
+  private static final Review REVIEW = CrusherReview.plain();
+  private static final Band BAND =
+      new Band(
+          "F3 <b> & \u0001",
+          new double[] {250, 500, 5000},
+          new double[] {Double.POSITIVE_INFINITY, 3, 0.1},
+          new double[] {Double.POSITIVE_INFINITY, 4, 0.2});
+
+  private static List<Picture> pictures() {
+    return List.of(
+        FirstLimitDrawing.picture(FirstLimitChart.of(REVIEW)),
+        StartDrawing.picture(StartOverTime.of(REVIEW).orElseThrow()),
+        TimeCurrentDrawing.picture(TimeCurrentSheet.of(REVIEW, List.of(BAND))));
+  }
+
+  @Test
+  void should_be_well_formed_and_scale() {
+    for (Picture picture : pictures()) {
+      Element root = Parsed.xml(Svg.inline(picture)).getDocumentElement();
+      assertThat(root.getTagName()).isEqualTo("svg");
+      assertThat(root.getAttribute("viewBox"))
+          .isEqualTo("0 0 " + picture.width() + " " + picture.height());
+      Parsed.xml(Svg.file(picture));
+    }
+  }
+
+  @Test
+  void should_carry_title_and_sentence_for_those_who_cannot_see_it() {
+    for (Picture picture : pictures()) {
+      Element root = Parsed.xml(Svg.inline(picture)).getDocumentElement();
+      assertThat(root.getElementsByTagName("title").item(0).getTextContent())
+          .isEqualTo(picture.title());
+      assertThat(root.getElementsByTagName("desc").item(0).getTextContent())
+          .isEqualTo(picture.says());
+    }
+  }
+
+  @Test
+  void should_stand_inside_a_page_without_document_type_or_foreign_ids() {
+    for (Picture picture : pictures()) {
+      String svg = Svg.inline(picture);
+      assertThat(svg).startsWith("<svg").doesNotContain("DOCTYPE").doesNotContain("<?xml");
+      Document document = Parsed.xml(svg);
+      assertThat(Parsed.elements(document))
+          .extracting(e -> e.getAttribute("id"))
+          .filteredOn(id -> !id.isEmpty())
+          .allSatisfy(id -> assertThat(id).startsWith(picture.name()));
+    }
+  }
+
+  @Test
+  void should_write_words_as_words_and_hostile_ones_too() {
+    String svg = Svg.inline(pictures().get(2));
+    Document document = Parsed.xml(svg);
+    assertThat(document.getDocumentElement().getTextContent())
+        .contains("F3 <b> & \uFFFD")
+        .contains("stator current, A RMS");
+    assertThat(svg).doesNotContain("<b>");
+  }
+
+  @Test
+  void should_write_the_same_bytes_twice() {
+    List<Picture> once = pictures();
+    List<Picture> twice = pictures();
+    for (int i = 0; i < once.size(); i++) {
+      assertThat(Svg.file(twice.get(i))).isEqualTo(Svg.file(once.get(i)));
+    }
+  }
+}
