@@ -162,23 +162,27 @@ public record Exposure(
         .orElse(0.0);
   }
 
-  /** {@code Section 2 reaches its limit after 109 s; F5 clears after 13.7 s.} */
-  public String sentence() {
+  /** {@code section 2 reaches its limit after 109 s; F5 clears after 13.7 s}. */
+  public String clause() {
     String limit =
         first
-            .map(
-                p ->
-                    name(p.part()) + " reaches its limit after " + Show.seconds(p.limitAtSeconds()))
-            .orElse("No part reaches its limit within 30 min");
+            .map(p -> limit(p.part()) + " after " + Show.seconds(p.limitAtSeconds()))
+            .orElse("no part reaches its limit within 30\u00a0min");
     String clears =
         clearing
             .map(d -> d.device() + " clears after " + Show.seconds(d.clearsAtSeconds()))
             .orElse("nothing clears it");
-    return limit + "; " + clears + ".";
+    return limit + "; " + clears;
   }
 
-  private static String reaches(String part) {
-    return part.equals("rings") ? " reach their" : " reaches its";
+  private static String limit(String part) {
+    String name = name(part);
+    String within = part.startsWith("section-") || name.startsWith("The ") ? lower(name) : name;
+    return within + (part.equals("rings") ? " reach their limit" : " reaches its limit");
+  }
+
+  private static String lower(String name) {
+    return Character.toLowerCase(name.charAt(0)) + name.substring(1);
   }
 
   /** A part's name at the beginning of a sentence. */

@@ -18,6 +18,7 @@ public final class Exposures {
         .map(s -> Exposure.of(facts, s))
         .min(
             Comparator.comparingDouble(Exposure::clearingRatio)
+                .thenComparingDouble(Exposure::limitAtSeconds)
                 .thenComparing(e -> -e.greatestUse()));
   }
 
@@ -29,11 +30,11 @@ public final class Exposures {
     builder.at(worst.start()).edge(sliprung.protection.Edge.SLOW);
     if (!worst.missing().isEmpty()) {
       return builder.notJudged(
-          worst.missing(), where(worst.start()) + " Its limits are not known.");
+          worst.missing(), where(worst.start()) + ": what it heats has no known limit.");
     }
     builder.figures(worst.clearedAtSeconds(), worst.limitAtSeconds(), "s");
     double ratio = worst.clearingRatio();
-    String sentence = where(worst.start()) + " " + worst.sentence();
+    String sentence = where(worst.start()) + ": " + worst.clause() + ".";
     if (ratio < facts.wanted(info.name()) && worst.unproven().isPresent()) {
       String tag =
           facts
@@ -69,33 +70,27 @@ public final class Exposures {
         : "";
   }
 
-  /** {@code Held on step 2 the motor settles at 1 233 rpm and draws 152 A.} */
+  /** {@code Held on step 2 the motor settles at 1 233 rpm and draws 152 A}, without a stop. */
   public static String where(ComputedStart start) {
     Stage last = start.history().stages().get(start.history().stages().size() - 1);
     Trace trace = last.trace();
     double speed = trace.speed()[trace.last()];
     String words = start.scenario().words();
     String scenario = Character.toUpperCase(words.charAt(0)) + words.substring(1);
-    String stator = Show.amps(trace.statorAmps()[trace.last()]);
-    String ring = Show.amps(trace.ringAmps()[trace.last()]);
-    if (speed == 0.0) {
-      return scenario
-          + ", the rotor stands and the motor draws "
-          + stator
-          + " on step "
-          + last.step()
-          + " ("
-          + ring
-          + " in the rings).";
-    }
-    return scenario
-        + ", the motor settles at "
-        + Show.rpm(speed)
-        + " and draws "
-        + stator
-        + " ("
-        + ring
-        + " in the rings).";
+    String draws =
+        "draws "
+            + Show.amps(trace.statorAmps()[trace.last()])
+            + " ("
+            + Show.amps(trace.ringAmps()[trace.last()])
+            + " in the rings)";
+    return switch (start.scenario().kind()) {
+      case LOCKED -> scenario + ", the motor ends on step " + last.step() + " and " + draws;
+      case LOCKED_STEP, RINGS_SHORTED -> scenario + " the motor " + draws;
+      default ->
+          speed == 0.0
+              ? scenario + " the rotor stands and " + draws
+              : scenario + " the motor settles at " + Show.rpm(speed) + " and " + draws;
+    };
   }
 
   private static String mend(Facts facts, Exposure worst) {

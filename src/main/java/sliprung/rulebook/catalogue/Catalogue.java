@@ -14,6 +14,8 @@ import java.util.TreeMap;
 import java.util.TreeSet;
 import sliprung.rulebook.DecidingDefaults;
 import sliprung.rulebook.Rule;
+import sliprung.rulebook.contactor.ContactorRules;
+import sliprung.rulebook.data.DataRules;
 import sliprung.rulebook.held.EveryHeldStepIsCleared;
 import sliprung.rulebook.held.SomethingSeesEveryHeldStep;
 import sliprung.rulebook.held.WhatOpensIsAbleToBreak;
@@ -21,6 +23,7 @@ import sliprung.rulebook.locked.LockedOnAStepIsCleared;
 import sliprung.rulebook.locked.LockedWithRingsShortedIsCleared;
 import sliprung.rulebook.locked.LockedWithSequenceRunningIsCleared;
 import sliprung.rulebook.locked.TheRotorBreaksAway;
+import sliprung.rulebook.overload.OverloadRules;
 import sliprung.rulebook.resistor.EverySectionStandsThePermittedStarts;
 import sliprung.rulebook.sequence.EveryStepPullsThrough;
 import sliprung.rulebook.sequence.NoLevelIsMetAtRest;
@@ -97,6 +100,9 @@ public final class Catalogue {
                 new NoLevelIsMetAtRest(),
                 new TheSequenceIsSupervised(),
                 new EverySectionStandsThePermittedStarts()));
+    rules.addAll(ContactorRules.ALL);
+    rules.addAll(OverloadRules.ALL);
+    rules.addAll(DataRules.ALL);
     rules.sort(Comparator.comparing(r -> r.info().name()));
     return List.copyOf(rules);
   }

@@ -82,7 +82,7 @@ public final class SomethingSeesEveryHeldStep implements Rule {
       return builder
           .says(
               where
-                  + " "
+                  + ": "
                   + list(seeing)
                   + (seeing.size() == 1 ? " sees it" : " see it")
                   + (blind.isEmpty() ? "." : "; " + list(blind) + blindVerb(blind) + " blind."))
@@ -92,7 +92,7 @@ public final class SomethingSeesEveryHeldStep implements Rule {
     Exposure worst = exposure.orElseThrow();
     if (!worst.missing().isEmpty()) {
       return builder.notJudged(
-          worst.missing(), where + " No fitted device sees it; what it heats is not known.");
+          worst.missing(), where + ": no fitted device sees it, and what it heats is not known.");
     }
     boolean harms = Double.isFinite(worst.limitAtSeconds());
     String heats =
@@ -106,7 +106,7 @@ public final class SomethingSeesEveryHeldStep implements Rule {
                 + ")."
             : " No part reaches its limit within 30 min.";
     return builder
-        .says(where + " No fitted device sees it at every corner." + heats + code(facts))
+        .says(where + ": no fitted device sees it at every corner." + heats + code(facts))
         .mend(
             harms
                 ? "Fit a sequence timer on the last step's auxiliary contact; an overload or"

@@ -45,6 +45,10 @@ public final class TheSequenceIsSupervised implements Rule {
               "timer-spread",
               "protection"));
 
+  private static final Comparator<Exposure> EARLIEST =
+      Comparator.comparingDouble(Exposure::clearingRatio)
+          .thenComparingDouble(Exposure::limitAtSeconds);
+
   @Override
   public Info info() {
     return INFO;
@@ -87,7 +91,7 @@ public final class TheSequenceIsSupervised implements Rule {
                 exposure.missing(),
                 "No sequence timer is fitted, and what a held step heats is not known.");
       }
-      if (worst == null || exposure.clearingRatio() < worst.clearingRatio()) {
+      if (worst == null || EARLIEST.compare(exposure, worst) < 0) {
         worst = exposure;
       }
     }
@@ -116,7 +120,11 @@ public final class TheSequenceIsSupervised implements Rule {
 
   private static String sentence(Exposure exposure) {
     String words = exposure.start().scenario().words();
-    return Character.toUpperCase(words.charAt(0)) + words.substring(1) + ": " + exposure.sentence();
+    return Character.toUpperCase(words.charAt(0))
+        + words.substring(1)
+        + ": "
+        + exposure.clause()
+        + ".";
   }
 
   private static Finding judge(Facts facts, Device.SequenceTimer timer) {

@@ -52,7 +52,8 @@ public final class NothingCreepsToATripInService implements Rule {
     }
     for (Device device : facts.starter().protection()) {
       Double pickUp = facts.fastPickUps().get(device.tag());
-      if (pickUp != null && device.fitting().place() != Device.Place.BANK) {
+      boolean timer = device instanceof Device.SequenceTimer || device instanceof Device.Standstill;
+      if (pickUp != null && !timer && device.fitting().place() != Device.Place.BANK) {
         findings.add(judge(facts, device, pickUp));
       }
     }
