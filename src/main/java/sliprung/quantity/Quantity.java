@@ -110,7 +110,7 @@ public final class Quantity {
     }
     Optional<Unit> known = Unit.find(unit, dimension);
     if (known.isPresent()) {
-      double value = number * known.get().factor() + known.get().offset();
+      double value = known.get().convert(number);
       return Double.isFinite(value)
           ? new Value(value)
           : mistake(dimension, "'" + clip(text) + "', which is beyond any number");
