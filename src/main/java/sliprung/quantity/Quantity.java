@@ -20,6 +20,9 @@ public final class Quantity {
   private static final Pattern DECIMAL_COMMA =
       Pattern.compile("[+\\-\u2212]?\\d+(?:[ .']?\\d{3})*,\\d+.*");
 
+  /** No quantity is longer, and no pattern is tried on more letters. */
+  private static final int LONGEST = 80;
+
   private Quantity() {}
 
   /** A quantity in the unit of its dimension, or what was wrong with the text. */
@@ -73,6 +76,9 @@ public final class Quantity {
     String trimmed = text.strip();
     if (trimmed.isEmpty()) {
       return mistake(dimension, "nothing");
+    }
+    if (trimmed.length() > LONGEST) {
+      return mistake(dimension, "'" + clip(trimmed) + "'");
     }
     Matcher gauge = WIRE_GAUGE.matcher(trimmed);
     if (gauge.matches()) {

@@ -88,6 +88,17 @@ class CurveFileTest {
   }
 
   @Test
+  void the_example_of_the_documentation_is_read() throws IOException {
+    String page = Files.readString(Path.of("curves/README.md"));
+    String example = page.split("```yaml\n", -1)[1].split("```", -1)[0];
+
+    Device.Points device =
+        (Device.Points)
+            inMemory(example).described().orElseThrow().starter().device("F3").orElseThrow();
+    assertThat(device.curve().slow().get(0)).isEqualTo(new PointCurve.Point(60, 600));
+  }
+
+  @Test
   void currents_may_be_amperes() {
     String amperes =
         CURVE.replace("multiples ", "amperes ").replaceAll("\\[([0-9.]+), ", "[$1 kA, ");

@@ -58,6 +58,29 @@ class HostileInputTest {
     assertThat(only(read(new byte[5 * 1024 * 1024])).message()).contains("1024 KiB");
   }
 
+  @ParameterizedTest
+  @ValueSource(strings = {"1", "1 234", "1e", "1,"})
+  void endless_quantities_are_refused_at_once(String piece) {
+    assertThat(only(read(StarterFiles.winchWith("55 kW", piece.repeat(100_000)))).path())
+        .isEqualTo("motor.power");
+  }
+
+  @Test
+  void an_endless_name_is_refused() {
+    assertThat(only(read(StarterFiles.winchWith("W-7 winch", "W".repeat(500)))).message())
+        .startsWith("expected the starter's tag of at most 400 letters");
+  }
+
+  @Test
+  void more_sections_than_any_bank_has_are_refused() {
+    String section = "    - {resistance: 0.5 ohm}\n";
+    assertThat(read(StarterFiles.winchWith("  sections:\n", "  sections:\n" + section.repeat(40))))
+        .extracting(Diagnostic::message)
+        .containsExactly(
+            "expected at most 40 sections but found 42",
+            "expected one step for each of the 42 sections but found 2");
+  }
+
   @Test
   void many_values_are_refused() {
     assertThat(only(read("[" + "a, ".repeat(60_000) + "]")).message())
