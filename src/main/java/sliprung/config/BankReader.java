@@ -12,6 +12,9 @@ import sliprung.starter.ShortTime;
 
 /** Reads {@code resistors}. */
 final class BankReader {
+  /** No starter has as many; each is simulated with all its faults. */
+  private static final int MOST_SECTIONS = 40;
+
   private final Section bank;
 
   private BankReader(Section bank) {
@@ -84,6 +87,12 @@ final class BankReader {
     }
     if (entries.get().isEmpty()) {
       field.get().mistake("expected at least one section but found an empty list");
+    }
+    if (entries.get().size() > MOST_SECTIONS) {
+      field
+          .get()
+          .mistake(
+              "expected at most " + MOST_SECTIONS + " sections but found " + entries.get().size());
     }
     List<ResistorBank.Section> sections = new ArrayList<>();
     for (Field entry : entries.get()) {

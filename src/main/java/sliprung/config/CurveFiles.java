@@ -1,5 +1,7 @@
 package sliprung.config;
 
+import java.util.Map;
+
 /**
  * Where the curve files that a starter names come from: a folder, or the stored inputs of a record.
  */
@@ -8,6 +10,18 @@ public interface CurveFiles {
 
   /** None can be reached. */
   CurveFiles NONE = path -> new Refusal("no curve files can be reached from here");
+
+  /**
+   * The stored inputs of a record.
+   *
+   * @param files content by the path as written in the starter file
+   */
+  static CurveFiles stored(Map<String, byte[]> files) {
+    return path ->
+        files.containsKey(path)
+            ? new Content(files.get(path))
+            : new Refusal("no stored file of that name");
+  }
 
   /**
    * Loads one.

@@ -17,6 +17,7 @@ import sliprung.quantity.Quantity;
  * @param value as typed
  */
 record Field(Reading reading, String path, String key, Place keyPlace, YamlNode value) {
+  private static final int LONGEST_TEXT = 400;
 
   /** A quantity in the dimension's unit; NaN after a mistake, which is then on record. */
   double number(Dimension dimension, Range range) {
@@ -93,6 +94,16 @@ record Field(Reading reading, String path, String key, Place keyPlace, YamlNode 
     Optional<String> text = scalar(expected, "…");
     if (text.isPresent() && text.get().codePoints().anyMatch(Field::isControl)) {
       mistake("expected " + expected + " on one line but found " + value.found());
+      return Optional.empty();
+    }
+    if (text.isPresent() && text.get().length() > LONGEST_TEXT) {
+      mistake(
+          "expected "
+              + expected
+              + " of at most "
+              + LONGEST_TEXT
+              + " letters but found "
+              + value.found());
       return Optional.empty();
     }
     return text.map(String::strip);

@@ -20,6 +20,9 @@ public final class Quantity {
   private static final Pattern DECIMAL_COMMA =
       Pattern.compile("[+\\-\u2212]?\\d+(?:[ .']?\\d{3})*,\\d+.*");
 
+  /** No quantity is longer, and no pattern is tried on more letters. */
+  private static final int LONGEST = 80;
+
   private Quantity() {}
 
   /** A quantity in the unit of its dimension, or what was wrong with the text. */
@@ -74,6 +77,9 @@ public final class Quantity {
     if (trimmed.isEmpty()) {
       return mistake(dimension, "nothing");
     }
+    if (trimmed.length() > LONGEST) {
+      return mistake(dimension, "'" + clip(trimmed) + "'");
+    }
     Matcher gauge = WIRE_GAUGE.matcher(trimmed);
     if (gauge.matches()) {
       return dimension == Dimension.AREA
@@ -110,7 +116,7 @@ public final class Quantity {
     }
     Optional<Unit> known = Unit.find(unit, dimension);
     if (known.isPresent()) {
-      double value = number * known.get().factor() + known.get().offset();
+      double value = known.get().convert(number);
       return Double.isFinite(value)
           ? new Value(value)
           : mistake(dimension, "'" + clip(text) + "', which is beyond any number");

@@ -29,6 +29,15 @@ record Unit(String symbol, Dimension dimension, double factor, double offset) {
 
   private static final Map<String, List<Unit>> BY_SPELLING = table();
 
+  /** A number of this unit in the dimension's own unit. */
+  double convert(double number) {
+    double inverse = 1.0 / factor;
+    // 94.5 / 100 is 0.945, 94.5 × 0.01 is not: thousandths and hundredths are divided.
+    double scaled =
+        factor < 1.0 && inverse == Math.rint(inverse) ? number / inverse : number * factor;
+    return scaled + offset;
+  }
+
   /** The unit of that spelling in that dimension. */
   static Optional<Unit> find(String spelling, Dimension dimension) {
     return BY_SPELLING.getOrDefault(normal(spelling), List.of()).stream()
