@@ -25,6 +25,16 @@ public record Band(String label, double[] amps, double[] fastSeconds, double[] s
     }
   }
 
+  /** Least of its amperes at which either edge ever operates, A; infinite: at none. */
+  public double firstAmps() {
+    for (int i = 0; i < amps.length; i++) {
+      if (Double.isFinite(fastSeconds[i]) || Double.isFinite(slowSeconds[i])) {
+        return amps[i];
+      }
+    }
+    return Double.POSITIVE_INFINITY;
+  }
+
   @Override
   public double[] amps() {
     return amps.clone();

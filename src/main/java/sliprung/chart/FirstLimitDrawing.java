@@ -5,6 +5,7 @@ import java.awt.Graphics2D;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
 import java.util.List;
 import org.jfree.chart.axis.NumberAxis;
 import sliprung.quantity.Show;
@@ -21,7 +22,6 @@ public final class FirstLimitDrawing {
   private static final int ROW = 36;
   private static final double CIRCLE = 5.0;
   private static final int LABEL_LETTERS = 33;
-  private static final double CLOSE = 120.0;
 
   private FirstLimitDrawing() {}
 
@@ -66,6 +66,7 @@ public final class FirstLimitDrawing {
     private final FaultRow row;
     private final double top;
     private final double line;
+    private final List<Rectangle2D> taken = new ArrayList<>();
 
     RowDrawing(Graphics2D g, Frame frame, FaultRow row, double top) {
       this.g = g;
@@ -99,28 +100,47 @@ public final class FirstLimitDrawing {
       Hatching.over(g, new Rectangle2D.Double(x, top + 2, area.getMaxX() - x, ROW - 4.0));
       g.setStroke(Ink.WALL);
       g.draw(new Line2D.Double(x, top + 2, x, top + ROW - 2));
-      String label = PartText.words(limit.part()) + " " + Show.seconds(limit.seconds());
-      double wide = words.width(label, Ink.SMALL);
-      // a circle just behind the wall keeps the room on the right for its own label
-      boolean circleBehind =
-          row.clearings().stream()
-              .mapToDouble(this::x)
-              .anyMatch(c -> c > x - 2 * CIRCLE && c < x + wide + CLOSE);
-      boolean onRight = !circleBehind && x + 8 + wide < area.getMaxX();
-      words.plate(label, Ink.SMALL, Ink.TEXT, onRight ? x + 6 : x - wide - 8, top + 14);
     }
 
     private void devices() {
       List<FaultRow.Clearing> clearings = row.clearings();
-      double taken = Double.NEGATIVE_INFINITY;
       for (int i = clearings.size() - 1; i >= 0; i--) {
         line(clearings.get(i), i == 0);
       }
       for (int i = 0; i < clearings.size(); i++) {
         FaultRow.Clearing clearing = clearings.get(i);
-        String label =
-            i == 0 ? clearing.device() + " " + Show.seconds(clearing.seconds()) : clearing.device();
-        taken = label(clearing, label, i == 0, taken);
+        boolean first = i == 0;
+        String text = clearing.device() + (first ? " " + Show.seconds(clearing.seconds()) : "");
+        label(text, first ? Ink.TEXT : Ink.QUIET, x(clearing), CIRCLE);
+      }
+      row.limit()
+          .ifPresent(
+              l ->
+                  label(
+                      PartText.words(l.part()) + " " + Show.seconds(l.seconds()),
+                      Ink.TEXT,
+                      frame.x(l.seconds()),
+                      -6.0));
+    }
+
+    /**
+     * Writes a label beside a place where it covers no other: on the preferred side (left for a
+     * positive gap), else on the other, else not at all: the text at the end of the row says it
+     * too.
+     */
+    private void label(String text, Color colour, double at, double gap) {
+      double wide = words.width(text, Ink.SMALL);
+      double before = at - wide - Math.abs(gap);
+      double behind = at + Math.abs(gap);
+      double[] sides = gap > 0 ? new double[] {before, behind} : new double[] {behind, before};
+      for (double from : sides) {
+        Rectangle2D place = new Rectangle2D.Double(from - 3, top, wide + 6, 1);
+        boolean inside = from >= frame.area().getX() && from + wide <= frame.area().getMaxX();
+        if (inside && taken.stream().noneMatch(place::intersects)) {
+          taken.add(place);
+          words.plate(text, Ink.SMALL, colour, from, top + 14);
+          return;
+        }
       }
     }
 
@@ -134,21 +154,6 @@ public final class FirstLimitDrawing {
       g.fill(circle);
       g.setColor(first ? Ink.DEVICE : Ink.QUIET);
       g.draw(circle);
-    }
-
-    /** Writes a label above its circle where there is room; returns where it ends. */
-    private double label(FaultRow.Clearing clearing, String text, boolean first, double taken) {
-      double wide = words.width(text, Ink.SMALL);
-      boolean behindWall = x(clearing) > frame.x(row.limitSeconds()) - 2 * CIRCLE;
-      double place = behindWall ? x(clearing) - CIRCLE : x(clearing) - wide - CIRCLE;
-      double x = Math.max(frame.area().getX() + 2, place);
-      boolean room = x > taken + 4 && x + wide < frame.area().getMaxX();
-      if (!first && !room) {
-        return taken;
-      }
-      Color colour = first ? Ink.TEXT : Ink.QUIET;
-      words.plate(text, Ink.SMALL, colour, x, top + 14);
-      return x + wide;
     }
 
     private double x(FaultRow.Clearing clearing) {

@@ -63,6 +63,7 @@ public final class StartDrawing {
     line(g, current, chart.statorAmps(), Ink.STATOR);
     ends(g, chart, speed, current);
     timers(g, chart, current);
+    chart.runningFrom().ifPresent(t -> running(g, speed, current, t));
   }
 
   private static Frame frame(StartOverTime chart, Rectangle2D area, String label, double greatest) {
@@ -135,6 +136,15 @@ public final class StartDrawing {
       words.left("shaded: all", Ink.SMALL, Ink.QUIET, x, current.area().getY() + 12);
       words.left(chart.corners() + " corners", Ink.SMALL, Ink.QUIET, x, current.area().getY() + 27);
     }
+  }
+
+  /** Where the running load comes on. */
+  private static void running(Graphics2D g, Frame speed, Frame current, double seconds) {
+    double x = current.x(seconds);
+    g.setColor(Ink.QUIET);
+    g.setStroke(Ink.EDGE);
+    g.draw(new Line2D.Double(x, speed.area().getY(), x, current.area().getMaxY()));
+    new Words(g).plate("running load", Ink.SMALL, Ink.QUIET, x + 5, current.area().getY() + 14);
   }
 
   private static void timers(Graphics2D g, StartOverTime chart, Frame current) {

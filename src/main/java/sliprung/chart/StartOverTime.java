@@ -20,6 +20,7 @@ import sliprung.starter.Device;
  * @param ringAmps RMS
  * @param stages columns
  * @param timers sequence timers, as ticks on the axis
+ * @param runningFrom when the running load comes on after the start, s; empty: not shown
  * @param corners how many permitted cold starts the bands cover
  * @param endSeconds of the picture
  * @param says what to see
@@ -30,6 +31,7 @@ public record StartOverTime(
     Banded ringAmps,
     List<Column> stages,
     List<TimerTick> timers,
+    OptionalDouble runningFrom,
     int corners,
     double endSeconds,
     String says) {
@@ -114,6 +116,7 @@ public record StartOverTime(
         banded(history, corners, Trace::ringAmps, 1.0, end),
         columns,
         timers.stream().filter(t -> t.seconds() <= end).toList(),
+        history.running().stream().mapToDouble(Stage::fromSeconds).filter(t -> t < end).findFirst(),
         corners.size(),
         end,
         says(history, corners));

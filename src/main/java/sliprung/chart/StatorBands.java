@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import sliprung.protection.Bands;
 import sliprung.protection.Edge;
+import sliprung.review.DeviceText;
 import sliprung.starter.Device;
 import sliprung.starter.Starter;
 
@@ -40,7 +41,7 @@ public final class StatorBands {
         any |= Double.isFinite(slow[i]) || Double.isFinite(fast[i]);
       }
       if (any) {
-        out.add(new Band(device.tag(), amps, fast, slow));
+        out.add(new Band(DeviceText.words(device), amps, fast, slow));
       }
     }
     return out;

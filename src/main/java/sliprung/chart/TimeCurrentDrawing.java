@@ -19,6 +19,10 @@ public final class TimeCurrentDrawing {
   private static final double LEAST_SECONDS = 0.1;
   private static final double GREATEST_SECONDS = 3000.0;
   private static final double FAR = 1e7;
+
+  /** Thin enough for two bands over each other to be told from one. */
+  private static final Color VEIL = new Color(0, 0, 0, 22);
+
   private static final int LABEL_LETTERS = 40;
   private static final double STALL_SPAN = 1.25;
   private static final double[] LABEL_SECONDS = {400.0, 120.0, 40.0, 15.0, 5.0, 1.5, 0.5};
@@ -60,6 +64,7 @@ public final class TimeCurrentDrawing {
       g.setColor(Ink.STATOR);
       g.setStroke(i == 0 ? Ink.COMPUTED : Ink.DASHED);
       g.draw(Shapes.line(frame, curve.amps(), curve.seconds()));
+      drop(g, frame, curve);
     }
     g.setClip(clip);
     verticals(g, frame, sheet);
@@ -67,7 +72,7 @@ public final class TimeCurrentDrawing {
   }
 
   private static void fill(Graphics2D g, Frame frame, Band band) {
-    g.setColor(new Color(0xE6, 0xE6, 0xE6, 190));
+    g.setColor(VEIL);
     g.fill(
         Shapes.between(frame, band.amps(), shown(band.fastSeconds()), shown(band.slowSeconds())));
   }
@@ -117,6 +122,13 @@ public final class TimeCurrentDrawing {
             Ink.TEXT,
             frame.x(limit.amps()) + 14,
             frame.y(limit.seconds()) - 2);
+  }
+
+  /** No current above the greatest: the curve falls to the foot of the sheet. */
+  private static void drop(Graphics2D g, Frame frame, DurationCurve curve) {
+    double x = frame.x(curve.amps()[0]);
+    double y = frame.y(Math.max(LEAST_SECONDS, curve.seconds()[0]));
+    g.draw(new Line2D.Double(x, y, x, frame.area().getMaxY()));
   }
 
   private static void verticals(Graphics2D g, Frame frame, TimeCurrentSheet sheet) {

@@ -71,7 +71,12 @@ public record TimeCurrentSheet(
     review.start("locked").ifPresent(s -> starts.add(curve("locked, sequence running", s)));
     List<HeldCurrent> held = held(review);
     return new TimeCurrentSheet(
-        bands, starts, held, review.starter().motor().current(), stall(review), says(review, held));
+        bands,
+        starts,
+        held,
+        review.starter().motor().current(),
+        stall(review),
+        says(review, bands, held));
   }
 
   private static DurationCurve curve(String label, ComputedStart start) {
@@ -154,21 +159,23 @@ public record TimeCurrentSheet(
     return stall;
   }
 
-  private static String says(Review review, List<HeldCurrent> held) {
+  private static String says(Review review, List<Band> bands, List<HeldCurrent> held) {
     String meaning =
         "A start has no single point here: its curve says how long the current stays at or above"
-            + " each value.";
+            + " each value. Grey: each device between its fast and its slow edge, at a constant"
+            + " current from cold.";
     double rated = review.starter().motor().current();
-    List<HeldCurrent> blind = held.stream().filter(h -> h.amps() < rated).toList();
-    if (blind.isEmpty()) {
+    if (held.isEmpty() || held.get(0).amps() >= rated) {
       return meaning;
     }
+    double amps = held.get(0).amps();
+    double first = bands.stream().mapToDouble(Band::firstAmps).min().orElse(0.0);
     return meaning
         + " Held on a step the motor can settle at "
-        + Show.amps(blind.get(0).amps())
+        + Show.amps(amps)
         + ", below its rated "
         + Show.amps(rated)
-        + ": left of every stator device.";
+        + (amps < first ? " and left of every device on this sheet." : ".");
   }
 
   /** Greatest ampere of what is computed. */

@@ -41,30 +41,40 @@ final class AnswerPart {
   }
 
   private static String worst(Answer answer) {
+    boolean last = answer.question() == Question.UNKNOWN;
     Optional<Finding> shown =
-        answer.first().filter(f -> f.verdict() == Verdict.BREACH).or(answer::thinnest);
-    String text =
-        shown
-            .or(answer::first)
-            .map(
-                f -> {
-                  String margin = FindingText.marginOfWanted(f);
-                  return f.subject()
-                      + (margin.isEmpty() ? ": " : ", margin " + margin + ": ")
-                      + FindingText.because(f)
-                      + ".";
-                })
-            .orElse(answer.question() == Question.UNKNOWN ? "" : "Nothing was judged.");
-    return (text + " " + pointer(answer)).strip();
+        last
+            ? answer.first().filter(f -> f.verdict() != Verdict.TIGHT)
+            : answer.first().filter(f -> f.verdict() == Verdict.BREACH).or(answer::thinnest);
+    List<String> texts = new ArrayList<>();
+    if (!answer.mustJudgeMissing().isEmpty()) {
+      texts.add(mustJudge(answer));
+    }
+    shown.or(() -> last ? Optional.empty() : answer.first()).ifPresent(f -> texts.add(line(f)));
+    if (!last && !answer.elsewhere().isEmpty()) {
+      texts.add(answer.elsewhere().size() + " not judged: see 4.");
+    }
+    if (last) {
+      texts.add("Unbalanced faults are never judged.");
+    } else if (texts.isEmpty()) {
+      texts.add("Nothing was judged.");
+    }
+    return String.join(" ", texts);
   }
 
-  /** What of a question stands under the last one. */
-  private static String pointer(Answer answer) {
-    if (answer.elsewhere().isEmpty()) {
-      return "";
-    }
-    int count = answer.elsewhere().size();
-    return count + " more could not be judged: see 4.";
+  private static String line(Finding finding) {
+    String margin = FindingText.marginOfWanted(finding);
+    return finding.subject()
+        + (margin.isEmpty() ? ": " : ", margin " + margin + ": ")
+        + FindingText.because(finding)
+        + ".";
+  }
+
+  private static String mustJudge(Answer answer) {
+    List<String> rules = answer.mustJudgeMissing();
+    return String.join(", ", rules)
+        + " must be judged and "
+        + (rules.size() == 1 ? "was not." : "were not.");
   }
 
   /** One question with its findings. */
@@ -85,8 +95,11 @@ final class AnswerPart {
       page.element("p", "Not judged, and listed under question 4: " + subjects + ".");
     }
     List<Finding> clear = new ArrayList<>();
+    List<Finding> defaults = new ArrayList<>();
     for (Finding finding : answer.findings()) {
-      if (finding.verdict() == Verdict.CLEAR) {
+      if (finding.rule().equals("data/assumed") && finding.verdict() != Verdict.BREACH) {
+        defaults.add(finding);
+      } else if (finding.verdict() == Verdict.CLEAR) {
         clear.add(finding);
       } else {
         block(page, finding);
@@ -94,6 +107,9 @@ final class AnswerPart {
     }
     if (!clear.isEmpty()) {
       clears(page, clear);
+    }
+    if (!defaults.isEmpty()) {
+      defaults(page, defaults);
     }
     if (answer.findings().isEmpty()) {
       page.element(
@@ -137,6 +153,17 @@ final class AnswerPart {
     page.open("code").text(finding.rule()).close();
     page.end();
     page.end();
+  }
+
+  private static void defaults(Html page, List<Finding> findings) {
+    Cells cells =
+        new Cells(page)
+            .open(
+                "Defaults, taken because the file is silent, that decided a verdict; tight: it"
+                    + " decided a breach or a tight margin",
+                List.of("input", "verdict", "what was taken, and what it decided", "next"));
+    findings.forEach(f -> cells.row(f.subject(), f.verdict().word(), f.says(), f.mend()));
+    cells.close();
   }
 
   private static String evidence(Finding finding) {

@@ -54,12 +54,20 @@ public record Answer(
     return findings.stream().findFirst();
   }
 
-  /** A short word for the state of the question, such as {@code tight} or {@code nothing}. */
+  /**
+   * A short word for the state of the question, such as {@code tight}; of the last one {@code 2
+   * rules} or {@code nothing}.
+   */
   public String word() {
     if (question != Question.UNKNOWN) {
       return worst().word();
     }
-    long open = findings.stream().filter(f -> f.verdict() == Verdict.NOT_JUDGED).count();
-    return open == 0 && mustJudgeMissing.isEmpty() ? "nothing" : open + " not judged";
+    long open =
+        Stream.concat(
+                findings.stream().filter(f -> f.verdict() == Verdict.NOT_JUDGED).map(Finding::rule),
+                mustJudgeMissing.stream())
+            .distinct()
+            .count();
+    return open == 0 ? "nothing" : open + (open == 1 ? " rule" : " rules");
   }
 }

@@ -23,6 +23,12 @@ public record Answers(String headline, List<Answer> answers) {
           .thenComparing(Finding::rule)
           .thenComparing(Finding::subject);
 
+  /** Under the last question what was not judged comes before defaults that decided something. */
+  private static final Comparator<Finding> OPEN_FIRST =
+      Comparator.<Finding>comparingInt(
+              f -> f.verdict() == Verdict.BREACH ? 0 : f.verdict() == Verdict.NOT_JUDGED ? 1 : 2)
+          .thenComparing(WORST_FIRST);
+
   /** Copies the list. */
   public Answers {
     answers = List.copyOf(answers);
@@ -75,7 +81,7 @@ public record Answers(String headline, List<Answer> answers) {
         elsewhere.add(finding);
       }
     }
-    here.sort(WORST_FIRST);
+    here.sort(question == Question.UNKNOWN ? OPEN_FIRST : WORST_FIRST);
     elsewhere.sort(WORST_FIRST);
     List<String> missing =
         review.mustJudgeMissing().stream()
@@ -151,7 +157,11 @@ public record Answers(String headline, List<Answer> answers) {
 
   /** The first sentence about a finding, led by its subject where the sentence does not name it. */
   private static String named(Finding finding) {
-    String sentence = FindingText.firstSentence(finding.says());
-    return sentence.contains(finding.subject()) ? sentence : finding.subject() + ": " + sentence;
+    String sentence = FindingText.gist(finding);
+    return sentence
+            .toLowerCase(java.util.Locale.ROOT)
+            .contains(finding.subject().toLowerCase(java.util.Locale.ROOT))
+        ? sentence
+        : finding.subject() + ": " + sentence;
   }
 }

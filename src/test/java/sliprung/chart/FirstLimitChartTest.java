@@ -50,10 +50,10 @@ class FirstLimitChartTest {
     FaultRow row = chart.rows().get(0);
     assertThat(row.state()).isEqualTo(FaultRow.State.NOT_CLEARED);
     assertThat(row.finding()).isEqualTo("nothing clears it");
-    assertThat(row.times()).isEqualTo("no device opens, section 2 109 s");
+    assertThat(row.times()).isEqualTo("no device opens, section 2 109\u00a0s");
     assertThat(chart.says())
         .startsWith("1 of 1 faults takes a part past its limit before anything clears.")
-        .contains("section 2 reaches its limit at 109 s");
+        .contains("section 2 reaches its limit at 109\u00a0s");
   }
 
   @Test

@@ -78,7 +78,7 @@ class SeriesOfAStartTest {
         .satisfiesExactly(
             l -> assertThat(l).startsWith("held on steps 1–5: "),
             l -> assertThat(l).startsWith("held on steps 1–5 at running load: "));
-    assertThat(sheet.says()).contains("no single point").contains("below its rated 208 A");
+    assertThat(sheet.says()).contains("no single point").contains("below its rated 208\u00a0A");
   }
 
   @Test
