@@ -64,4 +64,33 @@ class ReferenceStartersTest {
     }
     assertThat(checked).isEqualTo(27);
   }
+
+  /** Figures of the same independent implementation, within 2 %; none: never. */
+  @Test
+  void the_slow_edge_of_each_overload_on_a_rotor_locked_on_step_one() {
+    Scenario locked = new Scenario(Scenario.Kind.LOCKED_STEP, 1, Scenario.LoadMode.START);
+    Plants trolley = Plants.trolley480();
+    List<DeviceResponse> responses =
+        trolley
+            .evaluator()
+            .devices(trolley.simulator().run(locked, trolley.nominal()), DevicePreload.COLD);
+    assertThat(slow(responses, "OL1")).isCloseTo(300.8954967855897, within(6.0));
+    assertThat(slow(responses, "OL2")).isCloseTo(902.6864903567692, within(18.0));
+    for (Plants blind : List.of(Plants.fan500(), Plants.crusher6600())) {
+      List<DeviceResponse> none =
+          blind
+              .evaluator()
+              .devices(blind.simulator().run(locked, blind.nominal()), DevicePreload.COLD);
+      assertThat(slow(none, "OL1")).isInfinite();
+      assertThat(slow(none, "OL2")).isInfinite();
+    }
+  }
+
+  private static double slow(List<DeviceResponse> responses, String tag) {
+    return responses.stream()
+        .filter(d -> d.device().equals(tag) && d.edge() == Edge.SLOW)
+        .findFirst()
+        .orElseThrow()
+        .operatesAtSeconds();
+  }
 }
