@@ -158,10 +158,15 @@ public record FaultRow(
       return open.orElse("");
     }
     String clears =
-        clearings.isEmpty() ? "no device opens" : "open at " + Show.seconds(clearingSeconds());
+        clearings.isEmpty() ? "no device opens" : "open " + Show.seconds(clearingSeconds());
     return limit
-        .map(l -> clears + ", " + PartText.words(l.part()) + " " + Show.seconds(l.seconds()))
+        .map(l -> clears + ", " + PartText.words(l.part()) + " " + when(l.seconds()))
         .orElse(clears);
+  }
+
+  /** A part may be past its limit before the fault begins, by the load it ran under. */
+  private static String when(double seconds) {
+    return seconds > 0.0 ? Show.seconds(seconds) : "before it";
   }
 
   /** The finding as a sentence. */
@@ -169,15 +174,19 @@ public record FaultRow(
     String fault = start.words() + " (" + start.corner().words() + ")";
     String part =
         limit
-            .map(
-                l ->
-                    PartText.words(l.part()) + " reaches its limit at " + Show.seconds(l.seconds()))
+            .map(l -> PartText.words(l.part()) + reaches(l.seconds()))
             .orElse("no part with data reaches its limit within 30 min");
     String clears =
         clearings.isEmpty()
             ? "nothing clears it"
             : clearings.get(0).device() + " clears at " + Show.seconds(clearingSeconds());
     return fault + ": " + clears + ", " + part + ".";
+  }
+
+  private static String reaches(double seconds) {
+    return seconds > 0.0
+        ? " reaches its limit at " + Show.seconds(seconds)
+        : " is past its limit before the fault begins";
   }
 
   /** State and corner in the fewest words: {@code hot, 90 % V, heavy, low bank, late}. */

@@ -9,6 +9,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.stream.DoubleStream;
 import sliprung.protection.Bands;
 import sliprung.review.PartText;
 import sliprung.review.Review;
@@ -112,11 +113,12 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
     return rows.stream().filter(r -> r.start().scenario().id().equals(scenario)).findFirst();
   }
 
-  /** Least time shown, s: a whole decade below every clearing and limit, 0.01 at least. */
+  /** Least time shown, s: a decade below every clearing and limit after 0; 0.01 to 1. */
   public double fromSeconds() {
     double least =
         rows.stream()
-            .mapToDouble(r -> Math.min(r.clearingSeconds(), r.limitSeconds()))
+            .flatMapToDouble(r -> DoubleStream.of(r.clearingSeconds(), r.limitSeconds()))
+            .filter(t -> t > 0.0)
             .min()
             .orElse(1.0);
     double decade = Math.pow(10.0, Math.floor(Math.log10(Math.max(least * 0.8, 0.01))));

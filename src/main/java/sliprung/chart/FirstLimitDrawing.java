@@ -90,7 +90,7 @@ public final class FirstLimitDrawing {
       devices();
       double end = area.getMaxX() + 12;
       words.left(row.finding(), loud ? Ink.STRONG : Ink.LABEL, Ink.TEXT, end, top + 15);
-      words.left(row.times(), Ink.SMALL, Ink.QUIET, end, top + 30);
+      words.left(row.times(), Ink.FINE, Ink.QUIET, end, top + 30);
     }
 
     private void wall(FaultRow.Limit limit) {
@@ -114,6 +114,7 @@ public final class FirstLimitDrawing {
         label(text, first ? Ink.TEXT : Ink.QUIET, x(clearing), CIRCLE);
       }
       row.limit()
+          .filter(l -> l.seconds() > 0.0)
           .ifPresent(
               l ->
                   label(

@@ -23,6 +23,8 @@ public final class TimeCurrentDrawing {
   /** Thin enough for two bands over each other to be told from one. */
   private static final Color VEIL = new Color(0, 0, 0, 22);
 
+  private static final double[] FAST_SECONDS = {6.0, 200.0, 50.0, 2.0, 1.0, 0.6, 0.4};
+  private static final int TAG_LETTERS = 8;
   private static final int LABEL_LETTERS = 40;
   private static final double STALL_SPAN = 1.25;
   private static final double[] LABEL_SECONDS = {400.0, 120.0, 40.0, 15.0, 5.0, 1.5, 0.5};
@@ -162,12 +164,15 @@ public final class TimeCurrentDrawing {
     for (int i = 0; i < sheet.bands().size(); i++) {
       Band band = sheet.bands().get(i);
       double at = LABEL_SECONDS[i % LABEL_SECONDS.length];
-      double amps = ampsAt(band, at);
+      double amps = firstAmps(band.amps(), band.slowSeconds(), at);
       if (amps > 0.0) {
         String label = Lines.cut(band.label(), LABEL_LETTERS);
         double latest = frame.area().getMaxX() - words.width(label, Ink.LABEL) - 4;
         words.plate(label, Ink.LABEL, Ink.DEVICE, Math.min(latest, frame.x(amps) + 6), frame.y(at));
       }
+    }
+    for (int i = 0; i < sheet.bands().size(); i++) {
+      fastLabel(words, frame, sheet.bands().get(i), FAST_SECONDS[i % FAST_SECONDS.length]);
     }
     for (DurationCurve curve : sheet.starts()) {
       double[] amps = curve.amps();
@@ -186,12 +191,21 @@ public final class TimeCurrentDrawing {
     }
   }
 
-  /** Least current at which the slow edge is at or below a time; 0: nowhere in the band. */
-  private static double ampsAt(Band band, double seconds) {
-    double[] amps = band.amps();
-    double[] slow = band.slowSeconds();
+  /** Names the fast edge on its left, so that a wide band is known from both sides. */
+  private static void fastLabel(Words words, Frame frame, Band band, double seconds) {
+    double amps = firstAmps(band.amps(), band.fastSeconds(), seconds);
+    String tag = band.label().split(" ", 2)[0];
+    String text = Lines.cut(tag, TAG_LETTERS) + " fast";
+    double x = frame.x(amps) - words.width(text, Ink.FINE) - 5;
+    if (amps > 0.0 && x > frame.area().getX() && frame.x(amps) < frame.area().getMaxX()) {
+      words.plate(text, Ink.FINE, Ink.QUIET, x, frame.y(seconds));
+    }
+  }
+
+  /** Least current at which an edge is at or below a time; 0: nowhere in the band. */
+  private static double firstAmps(double[] amps, double[] edge, double seconds) {
     for (int i = 0; i < amps.length; i++) {
-      if (slow[i] <= seconds) {
+      if (edge[i] <= seconds) {
         return amps[i];
       }
     }

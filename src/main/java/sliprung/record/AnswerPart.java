@@ -2,6 +2,7 @@ package sliprung.record;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import sliprung.review.Answer;
@@ -64,10 +65,11 @@ final class AnswerPart {
 
   private static String line(Finding finding) {
     String margin = FindingText.marginOfWanted(finding);
-    return finding.subject()
-        + (margin.isEmpty() ? ": " : ", margin " + margin + ": ")
-        + FindingText.because(finding)
-        + ".";
+    String text = FindingText.because(finding) + ".";
+    String words = text.toLowerCase(Locale.ROOT);
+    boolean named = words.contains(finding.subject().toLowerCase(Locale.ROOT));
+    String lead = named ? "" : finding.subject() + ": ";
+    return lead + text + (margin.isEmpty() ? "" : " Margin " + margin + " wanted.");
   }
 
   private static String mustJudge(Answer answer) {

@@ -178,6 +178,15 @@ class FirstLimitChartTest {
   }
 
   @Test
+  void should_say_that_a_part_was_past_its_limit_before_the_fault() {
+    FirstLimitChart chart = chart(fault("F5", 10.0, "stator", 0.0));
+    assertThat(chart.rows().get(0).state()).isEqualTo(FaultRow.State.LATE);
+    assertThat(chart.rows().get(0).times()).endsWith("stator winding before it");
+    assertThat(chart.says()).contains("is past its limit before the fault begins");
+    assertThat(chart.fromSeconds()).isEqualTo(1.0);
+  }
+
+  @Test
   void should_call_the_nominal_corner_nominal() {
     ComputedStart start = REVIEW.start("held-2").orElseThrow();
     assertThat(chart(start).rows().get(0).circumstances()).isEqualTo("from cold, nominal");
