@@ -100,6 +100,14 @@ final class Summary {
             + " rules of the book: "
             + String.join(", ", review.notBuilt()),
         INDENT + " ".repeat(VERDICT));
+    if (!review.starter().notYetJudged().isEmpty()) {
+      wrapped(
+          INDENT,
+          "not yet used "
+              + "read and kept, no rule that is built asks for it: "
+              + Printable.of(String.join(", ", review.starter().notYetJudged())),
+          INDENT + " ".repeat(VERDICT));
+    }
     wrapped(
         INDENT,
         "not solved   unbalanced faults: one pole, one phase, an open section, a lifted brush",

@@ -82,7 +82,7 @@ public final class Machine {
     double i1Squared = phaseVolts * phaseVolts / (re * re + imSource * imSource);
     double i2Squared = i1Squared * xm * xm / d;
     double i1 = Math.sqrt(i1Squared);
-    double impedance = Math.hypot(re, im);
+    double impedance = Math.sqrt(re * re + im * im);
     return new OperatingPoint(
         i1,
         circuit.ratio() * Math.sqrt(i2Squared),
