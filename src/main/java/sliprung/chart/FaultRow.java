@@ -173,9 +173,7 @@ public record FaultRow(
   public String sentence() {
     String fault = start.words() + " (" + start.corner().words() + ")";
     String part =
-        limit
-            .map(l -> PartText.words(l.part()) + reaches(l.seconds()))
-            .orElse("no part with data reaches its limit within 30 min");
+        limit.map(FaultRow::reaches).orElse("no part with data reaches its limit within 30 min");
     String clears =
         clearings.isEmpty()
             ? "nothing clears it"
@@ -183,10 +181,15 @@ public record FaultRow(
     return fault + ": " + clears + ", " + part + ".";
   }
 
-  private static String reaches(double seconds) {
-    return seconds > 0.0
-        ? " reaches its limit at " + Show.seconds(seconds)
-        : " is past its limit before the fault begins";
+  private static String reaches(Limit limit) {
+    boolean many = limit.part().equals("rings");
+    String part = PartText.words(limit.part());
+    if (limit.seconds() > 0.0) {
+      return part
+          + (many ? " reach their limit at " : " reaches its limit at ")
+          + Show.seconds(limit.seconds());
+    }
+    return part + (many ? " are past their" : " is past its") + " limit before the fault begins";
   }
 
   /** State and corner in the fewest words: {@code hot, 90 % V, heavy, low bank, late}. */

@@ -6,7 +6,7 @@ import java.awt.Shape;
 import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
-import java.util.List;
+import sliprung.quantity.Show;
 
 /** Draws a {@link TimeCurrentSheet}. */
 public final class TimeCurrentDrawing {
@@ -24,6 +24,8 @@ public final class TimeCurrentDrawing {
   private static final Color VEIL = new Color(0, 0, 0, 22);
 
   private static final double[] FAST_SECONDS = {6.0, 200.0, 50.0, 2.0, 1.0, 0.6, 0.4};
+  private static final double HELD_LINE = 17.0;
+  private static final int HELD_LETTERS = 48;
   private static final int TAG_LETTERS = 8;
   private static final int LABEL_LETTERS = 40;
   private static final double STALL_SPAN = 1.25;
@@ -60,6 +62,7 @@ public final class TimeCurrentDrawing {
     frame.draw(g, true, true);
     g.clip(area);
     sheet.bands().forEach(band -> edges(g, frame, band));
+    rated(g, frame, sheet.ratedAmps());
     sheet.stall().forEach(limit -> stall(g, frame, limit));
     for (int i = 0; i < sheet.starts().size(); i++) {
       DurationCurve curve = sheet.starts().get(i);
@@ -133,29 +136,32 @@ public final class TimeCurrentDrawing {
     g.draw(new Line2D.Double(x, y, x, frame.area().getMaxY()));
   }
 
+  private static void rated(Graphics2D g, Frame frame, double amps) {
+    double x = frame.x(amps);
+    double foot = frame.area().getMaxY();
+    g.setColor(Ink.QUIET);
+    g.setStroke(Ink.EDGE);
+    g.draw(new Line2D.Double(x, foot - 18, x, foot));
+    new Words(g).plate("rated " + Show.amps(amps), Ink.SMALL, Ink.QUIET, x + 5, foot - 6);
+  }
+
   private static void verticals(Graphics2D g, Frame frame, TimeCurrentSheet sheet) {
     Words words = new Words(g);
     Rectangle2D area = frame.area();
-    int row = 0;
-    g.setColor(Ink.QUIET);
-    g.setStroke(Ink.EDGE);
-    double rated = frame.x(sheet.ratedAmps());
-    g.draw(new Line2D.Double(rated, area.getMaxY() - 18, rated, area.getMaxY()));
-    words.plate(
-        "rated " + sliprung.quantity.Show.amps(sheet.ratedAmps()),
-        Ink.SMALL,
-        Ink.QUIET,
-        rated + 5,
-        area.getMaxY() - 6);
-    List<TimeCurrentSheet.HeldCurrent> held = sheet.held();
-    for (TimeCurrentSheet.HeldCurrent line : held) {
+    int above = (int) sheet.held().stream().filter(h -> !h.label().isEmpty()).count();
+    for (TimeCurrentSheet.HeldCurrent line : sheet.held()) {
       double x = frame.x(line.amps());
-      double y = area.getY() - 10 - 17.0 * (held.size() - 1 - row);
       g.setColor(Ink.STATOR);
+      if (line.label().isEmpty()) {
+        g.setStroke(Ink.EDGE);
+        g.draw(new Line2D.Double(x, area.getY(), x, area.getMaxY()));
+        continue;
+      }
+      above--;
+      double y = area.getY() - 10 - HELD_LINE * above;
       g.setStroke(Ink.DASHED);
       g.draw(new Line2D.Double(x, y + 4, x, area.getMaxY()));
-      words.left(Lines.cut(line.label(), 48), Ink.SMALL, Ink.STATOR, x + 5, y);
-      row++;
+      words.left(Lines.cut(line.label(), HELD_LETTERS), Ink.SMALL, Ink.STATOR, x + 5, y);
     }
   }
 

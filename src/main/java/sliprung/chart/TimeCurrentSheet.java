@@ -34,10 +34,12 @@ public record TimeCurrentSheet(
   /** Two settled currents closer than this are drawn as one line. */
   private static final double SAME = 0.03;
 
+  private static final int MOST_LABELLED = 3;
+
   /**
    * The current on which held steps settle.
    *
-   * @param label which
+   * @param label which; empty for one of many between the least and the greatest
    * @param amps stator, RMS
    */
   public record HeldCurrent(String label, double amps) {}
@@ -114,6 +116,20 @@ public record TimeCurrentSheet(
     }
     if (!group.isEmpty()) {
       lines.add(line(group));
+    }
+    return lines.size() <= MOST_LABELLED ? lines : outermostLabelled(lines);
+  }
+
+  /** Of many lines only the least and the greatest keep a label; it says so. */
+  static List<HeldCurrent> outermostLabelled(List<HeldCurrent> rising) {
+    List<HeldCurrent> lines = new ArrayList<>();
+    for (int i = 0; i < rising.size(); i++) {
+      HeldCurrent line = rising.get(i);
+      String label =
+          i == 0
+              ? "least: " + line.label()
+              : i < rising.size() - 1 ? "" : "greatest: " + line.label();
+      lines.add(new HeldCurrent(label, line.amps()));
     }
     return lines;
   }

@@ -118,7 +118,7 @@ final class ProtectionPart {
           row.clearings().isEmpty() ? "nothing" : row.clearings().get(0).device(),
           Show.seconds(row.clearingSeconds()),
           limit.map(l -> PartText.words(l.part())).orElse("none within 30 min"),
-          Show.seconds(row.limitSeconds()),
+          row.limitSeconds() > 0.0 ? Show.seconds(row.limitSeconds()) : "before it",
           limit.isEmpty() ? "–" : Show.ratio(row.ratio()),
           row.open().map(why -> "not judged: " + why).orElse(row.finding()));
     }

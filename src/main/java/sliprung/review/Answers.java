@@ -157,7 +157,7 @@ public record Answers(String headline, List<Answer> answers) {
 
   /** The first sentence about a finding, led by its subject where the sentence does not name it. */
   private static String named(Finding finding) {
-    String sentence = FindingText.gist(finding);
+    String sentence = FindingText.firstSentence(finding.says());
     return sentence
             .toLowerCase(java.util.Locale.ROOT)
             .contains(finding.subject().toLowerCase(java.util.Locale.ROOT))

@@ -106,30 +106,7 @@ public final class FindingText {
     if (passes && finding.rule().equals("trip/start") && finding.start().isPresent()) {
       return circumstances(finding.start().get());
     }
-    return withoutStop(gist(finding));
-  }
-
-  /**
-   * The sentence that carries a finding: its first one, save for the fate of a failed start, where
-   * the first only describes the fault and the second says who comes first.
-   */
-  public static String gist(Finding finding) {
-    String further = furtherSentences(finding.says());
-    boolean fate = further.startsWith("No part ") || further.contains(" its limit after ");
-    if (!fate || finding.start().isEmpty() || !finding.start().get().scenario().isFault()) {
-      return firstSentence(finding.says());
-    }
-    String fault = finding.start().get().words();
-    return Character.toUpperCase(fault.charAt(0))
-        + fault.substring(1)
-        + ": "
-        + withSmallInitial(firstSentence(further));
-  }
-
-  /** A tag such as {@code F5} keeps its capital. */
-  private static String withSmallInitial(String sentence) {
-    boolean word = sentence.length() > 1 && Character.isLowerCase(sentence.charAt(1));
-    return word ? Character.toLowerCase(sentence.charAt(0)) + sentence.substring(1) : sentence;
+    return withoutStop(firstSentence(finding.says()));
   }
 
   /** The first sentence of a text; a decimal point ends none. */

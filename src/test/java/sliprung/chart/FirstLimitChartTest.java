@@ -187,6 +187,12 @@ class FirstLimitChartTest {
   }
 
   @Test
+  void should_speak_of_slip_rings_in_the_plural() {
+    assertThat(chart(fault("F5", 10.0, "rings", 12.0)).says())
+        .contains("slip rings reach their limit at 12\u00a0s");
+  }
+
+  @Test
   void should_call_the_nominal_corner_nominal() {
     ComputedStart start = REVIEW.start("held-2").orElseThrow();
     assertThat(chart(start).rows().get(0).circumstances()).isEqualTo("from cold, nominal");

@@ -82,6 +82,17 @@ class SeriesOfAStartTest {
   }
 
   @Test
+  void should_label_only_the_outermost_of_many_held_currents() {
+    List<TimeCurrentSheet.HeldCurrent> many =
+        java.util.stream.IntStream.rangeClosed(1, 5)
+            .mapToObj(k -> new TimeCurrentSheet.HeldCurrent("held on step " + k, 100.0 * k))
+            .toList();
+    assertThat(TimeCurrentSheet.outermostLabelled(many))
+        .extracting(TimeCurrentSheet.HeldCurrent::label)
+        .containsExactly("least: held on step 1", "", "", "", "greatest: held on step 5");
+  }
+
+  @Test
   void should_show_the_stall_limits_at_the_current_with_rings_shorted() {
     TimeCurrentSheet sheet = TimeCurrentSheet.of(REVIEW, List.of());
     assertThat(sheet.stall())
