@@ -3,65 +3,22 @@ package sliprung.protection;
 import sliprung.runup.Stage;
 import sliprung.runup.Trace;
 
-/** Which current of a history a device or part has, stage by stage. */
-interface Channel {
-
-  /** Its current over the quantity's, in one stage; 0: none. */
-  double share(Stage stage);
-
-  /** The quantity, one value for each sample. */
-  double[] quantity(Trace trace);
-
-  /** Whether it is measured at all at that sample. */
-  default boolean reads(Trace trace, int sample) {
-    return true;
-  }
-
+/**
+ * Which current of a history a device or part has.
+ *
+ * @param quantity sampled
+ * @param share its current over the quantity's, stage by stage; 0: none
+ */
+record Channel(Quantity quantity, Share share) {
   /** Stator line current. */
-  static Channel stator() {
-    return of(stage -> 1.0, Trace::statorAmps);
-  }
+  static final Quantity STATOR = Trace::statorAmps;
 
-  /** Ring current times a share that depends on the stage. */
-  static Channel ring(Share share) {
-    return of(share, Trace::ringAmps);
-  }
+  /** Ring current. */
+  static final Quantity RING = Trace::ringAmps;
 
-  /** A quantity times a share that depends on the stage. */
-  static Channel of(Share share, Quantity quantity) {
-    return new Channel() {
-      @Override
-      public double share(Stage stage) {
-        return share.in(stage);
-      }
-
-      @Override
-      public double[] quantity(Trace trace) {
-        return quantity.of(trace);
-      }
-    };
-  }
-
-  /** Likewise, but where the rotor's frequency is below a limit nothing is read. */
-  static Channel aboveFrequency(
-      Channel channel, double synchronousSpeed, double frequency, double leastHertz) {
-    double widest = leastHertz / frequency * synchronousSpeed;
-    return new Channel() {
-      @Override
-      public double share(Stage stage) {
-        return channel.share(stage);
-      }
-
-      @Override
-      public double[] quantity(Trace trace) {
-        return channel.quantity(trace);
-      }
-
-      @Override
-      public boolean reads(Trace trace, int sample) {
-        return Math.abs(synchronousSpeed - trace.speed()[sample]) >= widest;
-      }
-    };
+  /** A sampled quantity, one value for each sample. */
+  interface Quantity {
+    double[] of(Trace trace);
   }
 
   /** A share in one stage. */
@@ -69,8 +26,18 @@ interface Channel {
     double in(Stage stage);
   }
 
-  /** A sampled quantity. */
-  interface Quantity {
-    double[] of(Trace trace);
+  /** Stator line current in every stage. */
+  static Channel stator() {
+    return new Channel(STATOR, stage -> 1.0);
+  }
+
+  /** Ring current in every stage. */
+  static Channel ring() {
+    return new Channel(RING, stage -> 1.0);
+  }
+
+  /** Ring current times a share that depends on the stage. */
+  static Channel ring(Share share) {
+    return new Channel(RING, share);
   }
 }

@@ -105,7 +105,7 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
           case MIDDLE -> relays.middle();
           case SLOW -> relays.slow();
         };
-    return measuring(device, device.memoryKept(), meter);
+    return measuring(device, device.memoryKept(), meter, Margin.COARSE);
   }
 
   @Override
@@ -113,6 +113,7 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
     InverseTimeEdge law = new InverseTimeEdge(device, edge);
     return measuring(
         device,
+        device.blockedAboveAmps(),
         before -> {
           Supplier<Meter> meter =
               () ->
@@ -130,6 +131,7 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
     double threshold = edge == Edge.FAST ? pickUp / (1.0 + device.overreach()) : pickUp;
     return measuring(
         device,
+        device.blockedAboveAmps(),
         before ->
             blocked(new ThresholdMeter(threshold), device.blockedAboveAmps(), device.accuracy()));
   }
@@ -141,6 +143,7 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
     double dropOff = edge == Edge.FAST ? DROP_OFF * pickUp : pickUp;
     return measuring(
         device,
+        device.blockedAboveAmps(),
         before ->
             blocked(
                 new TimerMeter(pickUp, dropOff, seconds),
@@ -158,7 +161,8 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
         before -> {
           double share = before / reference;
           return new FirstOrderMeter(reference, tau, share * share);
-        });
+        },
+        Margin.COARSE);
   }
 
   @Override
@@ -184,9 +188,10 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
     double seconds = spread(device.seconds(), timerSpread);
     double below = edge == Edge.FAST ? SENSOR_SHARE : 0.0;
     return new MeasuringModel(
-        starts -> starts.standing(below),
+        currents -> currents.standing(below),
         preload -> 0.0,
-        before -> new TimerMeter(0.5, 0.5, seconds));
+        before -> new TimerMeter(0.5, 0.5, seconds),
+        Margin.COARSE);
   }
 
   private Meter blocked(Meter meter, OptionalDouble aboveAmps, Device.Accuracy accuracy) {
@@ -200,13 +205,21 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
   }
 
   private EdgeModel measuring(Device device, DoubleFunction<Meter> meter) {
-    return measuring(device, true, meter);
+    return measuring(device, true, meter, Margin.COARSE);
   }
 
-  private EdgeModel measuring(Device device, boolean memoryKept, DoubleFunction<Meter> meter) {
+  /** A block above a current lets use fall again with a rising factor on the current. */
+  private EdgeModel measuring(
+      Device device, OptionalDouble blockedAboveAmps, DoubleFunction<Meter> meter) {
+    return measuring(
+        device, true, meter, blockedAboveAmps.isPresent() ? Margin.FINE : Margin.COARSE);
+  }
+
+  private EdgeModel measuring(
+      Device device, boolean memoryKept, DoubleFunction<Meter> meter, double stride) {
     Device.Place place = device.fitting().place();
     return new MeasuringModel(
-        starts -> starts.current(place, device.fitting().measuresBy(), edge),
+        currents -> currents.at(place, device.fitting().measuresBy(), edge),
         preload -> {
           if (preload.onlyKeptMemory() && !memoryKept) {
             return 0.0;
@@ -217,6 +230,7 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
             case BANK -> 0.0;
           };
         },
-        meter);
+        meter,
+        stride);
   }
 }

@@ -10,17 +10,25 @@ final class Margin {
   private static final double LEAST = 1e-3;
   private static final double PRECISION = 1e-5;
 
+  /** Stride where use never falls with a rising factor. */
+  static final double COARSE = 1.5;
+
+  /** Stride where it may. */
+  static final double FINE = 1.04;
+
   private Margin() {}
 
   /**
    * Searches the factor.
    *
-   * @param use of a factor; never falls while the factor rises, but may jump
+   * @param use of a factor; may jump; where it falls again with a rising factor (a relay that is
+   *     blocked above a current) the stride must be small
    * @param atOne use at factor 1
+   * @param stride ratio of two factors tried in turn until one is past the first at which use is 1
    * @return 0 where no factor from 0.001 up keeps it below 1; infinite where none up to 100 brings
    *     it to 1
    */
-  static double of(DoubleUnaryOperator use, double atOne) {
+  static double of(DoubleUnaryOperator use, double atOne, double stride) {
     double low;
     double lowUse;
     double high;
@@ -28,9 +36,9 @@ final class Margin {
     if (atOne < 1.0) {
       low = 1.0;
       lowUse = atOne;
-      // heat goes with the square of the current: where everything comes from the start, it is
-      // there
-      high = atOne > 0.0 ? Math.min(GREATEST, 1.001 / Math.sqrt(atOne)) : 2.0;
+      // heat goes with the square of the current: where all of it is the start's, it is there
+      boolean jumps = stride >= COARSE && atOne > 0.0;
+      high = jumps ? Math.min(GREATEST, 1.001 / Math.sqrt(atOne)) : stride;
       highUse = use.applyAsDouble(high);
       while (highUse < 1.0) {
         if (high >= GREATEST) {
@@ -38,13 +46,13 @@ final class Margin {
         }
         low = high;
         lowUse = highUse;
-        high = Math.min(GREATEST, 1.5 * high);
+        high = Math.min(GREATEST, stride * high);
         highUse = use.applyAsDouble(high);
       }
     } else {
       high = 1.0;
       highUse = atOne;
-      low = 1.0 / 1.5;
+      low = 1.0 / stride;
       lowUse = use.applyAsDouble(low);
       while (lowUse >= 1.0) {
         if (low <= LEAST) {
@@ -52,7 +60,7 @@ final class Margin {
         }
         high = low;
         highUse = lowUse;
-        low = low / 1.5;
+        low = low / stride;
         lowUse = use.applyAsDouble(low);
       }
     }

@@ -11,8 +11,9 @@ final class MeasuringModel implements EdgeModel {
   /** Long enough for every operating time that a standard knows, s. */
   private static final double LONGEST = 1e6;
 
-  private final Function<Starts, Waveform> current;
+  private final Function<Currents, Waveform> current;
   private final Function<DevicePreload, Meter> meter;
+  private final double stride;
 
   /**
    * An edge.
@@ -20,18 +21,21 @@ final class MeasuringModel implements EdgeModel {
    * @param current the current it measures
    * @param preloadAmps the part of a preload at its place
    * @param meter a new meter after that steady current
+   * @param stride of its current margin, see {@link Margin}
    */
   MeasuringModel(
-      Function<Starts, Waveform> current,
+      Function<Currents, Waveform> current,
       java.util.function.ToDoubleFunction<DevicePreload> preloadAmps,
-      DoubleFunction<Meter> meter) {
+      DoubleFunction<Meter> meter,
+      double stride) {
     this.current = current;
+    this.stride = stride;
     this.meter = preload -> meter.apply(preloadAmps.applyAsDouble(preload));
   }
 
   @Override
   public EdgeOutcome over(Starts starts, boolean withMargins) {
-    Waveform waveform = current.apply(starts);
+    Waveform waveform = current.apply(starts.currents());
     Meter used = meter.apply(starts.preload());
     Passage passage = Passage.of(used, waveform, starts.count());
     Optional<String> doubt = used.doubt();
@@ -46,8 +50,8 @@ final class MeasuringModel implements EdgeModel {
     DoubleUnaryOperator byTime = f -> use(starts, waveform.scaled(1.0, f));
     return new EdgeOutcome(
         passage,
-        OptionalDouble.of(Margin.of(byCurrent, passage.use())),
-        OptionalDouble.of(Margin.of(byTime, passage.use())),
+        OptionalDouble.of(Margin.of(byCurrent, passage.use(), stride)),
+        OptionalDouble.of(Margin.of(byTime, passage.use(), Margin.COARSE)),
         used.bound(),
         doubt);
   }

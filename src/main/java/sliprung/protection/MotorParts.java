@@ -58,7 +58,7 @@ final class MotorParts {
     double ratio = machine.circuit().ratio();
     return Part.of(
             "rotor",
-            Channel.ring(stage -> 1.0),
+            Channel.ring(),
             preload ->
                 new RotorWindingMeter(
                     winding, winding.levelAt(preload.ringAmps()) * cooled(preload)))
@@ -87,7 +87,7 @@ final class MotorParts {
     double budget = limit.jouleIntegral();
     return Part.of(
         "rings",
-        Channel.ring(stage -> 1.0),
+        Channel.ring(),
         preload -> new OnlyAtRestMeter(new AccumulatingMeter(i -> i * i / budget, 0.0)));
   }
 

@@ -45,15 +45,18 @@ record Part(
   }
 
   /** What it goes through in the last of some starts in a row. */
-  PartResponse over(StartHistory history, PartPreload preload, int starts) {
+  PartResponse over(Currents currents, PartPreload preload, int starts) {
     if (missing.isPresent()) {
       return PartResponse.missing(name, missing.get());
     }
-    Waveform waveform = Waveform.of(history, channel);
+    Waveform waveform = currents.of(channel);
     Passage passage = Passage.of(meter.apply(preload), waveform, starts);
     OptionalDouble energy =
         threePhaseOhms
-            .map(ohms -> OptionalDouble.of(ohms.applyAsDouble(history) * waveform.jouleIntegral()))
+            .map(
+                ohms ->
+                    OptionalDouble.of(
+                        ohms.applyAsDouble(currents.history()) * waveform.jouleIntegral()))
             .orElse(OptionalDouble.empty());
     return new PartResponse(
         name, passage.use(), passage.reachedAtSeconds(), energy, Optional.empty());

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import sliprung.machine.Machine;
 import sliprung.runup.StartHistory;
@@ -14,8 +15,8 @@ import sliprung.starter.Starter;
  * What every device and every heated part of one starter makes of a computed start.
  *
  * <p>Several starts in a row are equal and follow each other without pause and without running in
- * between; the answer is about the last. The models are built once: keep one evaluator for a
- * starter and a machine and ask it for every start.
+ * between; the answer is about the last. The models are built once and never change: keep one
+ * evaluator for a starter and a machine, on any number of threads.
  */
 public final class ProtectionEvaluator {
   private final Starter starter;
@@ -47,33 +48,42 @@ public final class ProtectionEvaluator {
             "stator-conductor", "conductors.stator", starter.statorConductor(), Channel.stator()));
     parts.add(
         ConductorParts.part(
-            "rotor-conductor",
-            "conductors.rotor",
-            starter.rotorConductor(),
-            Channel.ring(stage -> 1.0)));
+            "rotor-conductor", "conductors.rotor", starter.rotorConductor(), Channel.ring()));
     parts.addAll(new ContactorParts(starter).parts());
   }
 
-  /**
-   * Every device at every edge over a single start; see {@link #devices(StartHistory,
-   * DevicePreload, int)}.
-   */
+  /** A history to ask about; several questions about one cost little more than one. */
+  public StartProtection over(StartHistory history) {
+    return new StartProtection(
+        this, new Currents(history, synchronousSpeed, starter.supply().frequency()));
+  }
+
+  /** {@link StartProtection#devices} over a single start. */
   public List<DeviceResponse> devices(StartHistory history, DevicePreload preload) {
     return devices(history, preload, 1);
   }
 
-  /**
-   * Every device at every edge, in the file's order, over the last of some starts in a row. Margins
-   * come with the fast edge of a permitted start: their factor applies to every start of the row,
-   * never to the preload nor to the running after the last.
-   *
-   * @param history of each of the starts
-   * @param preload before the first
-   * @param starts 1 or more
-   */
+  /** {@link StartProtection#devices}. */
   public List<DeviceResponse> devices(StartHistory history, DevicePreload preload, int starts) {
-    Starts row =
-        new Starts(history, starts, preload, synchronousSpeed, starter.supply().frequency());
+    return over(history).devices(preload, starts);
+  }
+
+  /** {@link StartProtection#parts} over a single start. */
+  public List<PartResponse> parts(StartHistory history, PartPreload preload) {
+    return parts(history, preload, 1);
+  }
+
+  /** {@link StartProtection#parts}. */
+  public List<PartResponse> parts(StartHistory history, PartPreload preload, int starts) {
+    return over(history).parts(preload, starts);
+  }
+
+  /** {@link StartProtection#sectionLevelsAfter}. */
+  public List<Double> sectionLevelsAfter(StartHistory history, PartPreload preload, int starts) {
+    return over(history).sectionLevelsAfter(preload, starts);
+  }
+
+  List<DeviceResponse> devices(Starts row) {
     List<DeviceResponse> responses = new ArrayList<>();
     for (Map.Entry<Device, Map<Edge, EdgeModel>> entry : devices.entrySet()) {
       for (Map.Entry<Edge, EdgeModel> model : entry.getValue().entrySet()) {
@@ -83,8 +93,16 @@ public final class ProtectionEvaluator {
     return responses;
   }
 
+  List<PartResponse> parts(Currents currents, PartPreload preload, int starts) {
+    return parts.stream().map(part -> part.over(currents, preload, starts)).toList();
+  }
+
+  List<Double> sectionLevelsAfter(Currents currents, PartPreload preload, int starts) {
+    return sections.levelsAfter(currents, preload, starts);
+  }
+
   private DeviceResponse respond(Device device, Edge edge, EdgeModel model, Starts row) {
-    boolean withMargins = edge == Edge.FAST && !row.history().scenario().isFault();
+    boolean withMargins = edge == Edge.FAST && !row.currents().history().scenario().isFault();
     EdgeModel.EdgeOutcome outcome = model.over(row, withMargins);
     if (outcome.notJudged().isPresent()) {
       return DeviceResponse.notJudged(device.tag(), edge, outcome.notJudged().get());
@@ -99,7 +117,7 @@ public final class ProtectionEvaluator {
         clears(device, operates),
         outcome.currentMargin(),
         outcome.stretchMargin(),
-        operates < Double.POSITIVE_INFINITY ? outcome.bound() : java.util.Optional.empty(),
+        operates < Double.POSITIVE_INFINITY ? outcome.bound() : Optional.empty(),
         outcome.notJudged());
   }
 
@@ -115,30 +133,5 @@ public final class ProtectionEvaluator {
     OptionalDouble opening =
         device.trips().map(starter::openingSeconds).orElse(OptionalDouble.empty());
     return opening.isPresent() ? operates + opening.getAsDouble() : Double.POSITIVE_INFINITY;
-  }
-
-  /** Every part over a single start. */
-  public List<PartResponse> parts(StartHistory history, PartPreload preload) {
-    return parts(history, preload, 1);
-  }
-
-  /**
-   * Every part over the last of some starts in a row: sections, windings, rings, conductors, then
-   * contactors in the file's order.
-   *
-   * @param history of each of the starts
-   * @param preload before the first
-   * @param starts 1 or more
-   */
-  public List<PartResponse> parts(StartHistory history, PartPreload preload, int starts) {
-    return parts.stream().map(part -> part.over(history, preload, starts)).toList();
-  }
-
-  /**
-   * Level of every section at the end of some starts in a row, to be carried into a {@link
-   * PartPreload}; 0 for a section whose data are missing.
-   */
-  public List<Double> sectionLevelsAfter(StartHistory history, PartPreload preload, int starts) {
-    return sections.levelsAfter(history, preload, starts);
   }
 }

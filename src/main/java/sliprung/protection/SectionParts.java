@@ -3,7 +3,6 @@ package sliprung.protection;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import sliprung.runup.StartHistory;
 import sliprung.starter.ResistorBank;
 
 /**
@@ -49,7 +48,7 @@ final class SectionParts {
   }
 
   /** Levels of all sections after some starts in a row; a section without data counts as 0. */
-  List<Double> levelsAfter(StartHistory history, PartPreload preload, int starts) {
+  List<Double> levelsAfter(Currents currents, PartPreload preload, int starts) {
     List<Double> levels = new ArrayList<>();
     for (Part part : parts()) {
       if (part.missing().isPresent()) {
@@ -57,7 +56,7 @@ final class SectionParts {
         continue;
       }
       Meter meter = part.meter().apply(preload);
-      Waveform waveform = Waveform.of(history, part.channel());
+      Waveform waveform = currents.of(part.channel());
       for (int n = 0; n < starts; n++) {
         Passage.throughStart(meter, waveform);
       }

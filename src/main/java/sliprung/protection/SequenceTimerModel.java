@@ -28,8 +28,8 @@ final class SequenceTimerModel implements EdgeModel {
 
   @Override
   public EdgeOutcome over(Starts starts, boolean withMargins) {
-    StartHistory history = starts.history();
-    double stop = stopSeconds(history, starts.synchronousSpeed());
+    StartHistory history = starts.currents().history();
+    double stop = stopSeconds(history, starts.currents().synchronousSpeed());
     double elapsed = Math.min(stop, history.endSeconds());
     double runUp =
         history.scenario().isFault()

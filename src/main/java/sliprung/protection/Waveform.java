@@ -12,31 +12,42 @@ import sliprung.runup.Trace;
  */
 final class Waveform {
   private final Piece[] pieces;
+  private final int[] stageOf;
   private final double startsAt;
   private final int startCount;
   private final int runUpCount;
 
-  private Waveform(Piece[] pieces, double startsAt, int startCount, int runUpCount) {
+  private Waveform(Piece[] pieces, int[] stageOf, double startsAt, int startCount, int runUpCount) {
     this.pieces = pieces;
+    this.stageOf = stageOf;
     this.startsAt = startsAt;
     this.startCount = startCount;
     this.runUpCount = runUpCount;
   }
 
-  /** Takes a current out of a history; a piece that contains the end of the run-up is cut there. */
-  static Waveform of(StartHistory history, Channel channel) {
+  /** Whether a sample is measured at all. */
+  interface Readable {
+    boolean at(Trace trace, int sample);
+  }
+
+  /**
+   * Takes a quantity out of a history. Neighbours that one quadratic describes are joined; a piece
+   * that contains the end of the run-up is cut there.
+   */
+  static Waveform of(StartHistory history, Channel.Quantity quantity, Readable readable) {
     double runUp =
         history.scenario().isFault()
             ? Double.POSITIVE_INFINITY
             : history.runUpSeconds().orElse(Double.POSITIVE_INFINITY);
     Collector collector = new Collector(runUp);
     for (Stage stage : history.stages()) {
-      collector.add(stage, channel);
+      collector.add(stage, quantity, readable);
     }
     int startCount = collector.pieces.size();
-    history.running().ifPresent(stage -> collector.add(stage, channel));
+    history.running().ifPresent(stage -> collector.add(stage, quantity, readable));
     return new Waveform(
         collector.pieces.toArray(Piece[]::new),
+        collector.stageOf.stream().mapToInt(Integer::intValue).toArray(),
         history.stages().get(0).trace().seconds()[0],
         startCount,
         collector.runUpCount);
@@ -73,7 +84,17 @@ final class Waveform {
     for (int i = 0; i < startCount; i++) {
       changed[i] = pieces[i].scaled(onCurrent, onTime);
     }
-    return new Waveform(changed, startsAt * onTime, startCount, runUpCount);
+    return new Waveform(changed, stageOf, startsAt * onTime, startCount, runUpCount);
+  }
+
+  /** The current times one share for each stage, the running after the start included. */
+  Waveform masked(double[] shares) {
+    Piece[] changed = pieces.clone();
+    for (int i = 0; i < changed.length; i++) {
+      double share = shares[stageOf[i]];
+      changed[i] = share == 1.0 ? pieces[i] : pieces[i].scaled(share, 1.0);
+    }
+    return new Waveform(changed, stageOf, startsAt, startCount, runUpCount);
   }
 
   /** Integral of the square of the current over the start, A²s. */
@@ -87,24 +108,21 @@ final class Waveform {
 
   private static final class Collector {
     private final List<Piece> pieces = new ArrayList<>();
+    private final List<Integer> stageOf = new ArrayList<>();
     private final double runUp;
     private int runUpCount;
     private int stageBegin;
+    private int stages;
 
     Collector(double runUp) {
       this.runUp = runUp;
     }
 
-    void add(Stage stage, Channel channel) {
+    void add(Stage stage, Channel.Quantity quantity, Readable readable) {
       stageBegin = pieces.size();
       Trace trace = stage.trace();
-      double share = channel.share(stage);
       double[] seconds = trace.seconds();
-      if (share == 0.0) {
-        add(new Piece(seconds[trace.last()] - seconds[0], 0.0, 0.0, 0.0, false), seconds[0]);
-        return;
-      }
-      double[] values = channel.quantity(trace);
+      double[] values = quantity.of(trace);
       double[] speed = trace.speed();
       for (int i = 0; i + 2 < seconds.length; i += 2) {
         double length = seconds[i + 2] - seconds[i];
@@ -113,32 +131,39 @@ final class Waveform {
         }
         boolean standing = speed[i] == 0.0 && speed[i + 1] == 0.0 && speed[i + 2] == 0.0;
         boolean read =
-            channel.reads(trace, i) && channel.reads(trace, i + 1) && channel.reads(trace, i + 2);
-        double k = read ? share : 0.0;
-        add(
-            new Piece(length, k * values[i], k * values[i + 1], k * values[i + 2], standing),
-            seconds[i]);
+            readable.at(trace, i) && readable.at(trace, i + 1) && readable.at(trace, i + 2);
+        Piece piece =
+            read
+                ? new Piece(length, values[i], values[i + 1], values[i + 2], standing)
+                : new Piece(length, 0.0, 0.0, 0.0, standing);
+        add(piece, seconds[i]);
       }
+      stages++;
     }
 
     private void add(Piece piece, double from) {
       double end = from + piece.seconds();
       if (from < runUp && runUp < end) {
         double share = (runUp - from) / piece.seconds();
-        pieces.add(piece.part(0.0, share));
+        append(piece.part(0.0, share));
         runUpCount = pieces.size();
-        pieces.add(piece.part(share, 1.0));
+        append(piece.part(share, 1.0));
         return;
       }
       Piece joined = joinedToLast(piece, from);
       if (joined == null) {
-        pieces.add(piece);
+        append(piece);
       } else {
         pieces.set(pieces.size() - 1, joined);
       }
       if (end <= runUp) {
         runUpCount = pieces.size();
       }
+    }
+
+    private void append(Piece piece) {
+      pieces.add(piece);
+      stageOf.add(stages);
     }
 
     /** Neighbours of one stage are joined, but never across the end of the run-up. */

@@ -9,10 +9,10 @@ import sliprung.machine.Machine;
 import sliprung.protection.DevicePreload;
 import sliprung.protection.PartPreload;
 import sliprung.protection.ProtectionEvaluator;
+import sliprung.protection.StartProtection;
 import sliprung.rulebook.ComputedStart;
 import sliprung.runup.Conditions;
 import sliprung.runup.Scenario;
-import sliprung.runup.StartHistory;
 import sliprung.runup.StartSimulator;
 import sliprung.runup.StartSimulator.RunningPoint;
 import sliprung.starter.Duty;
@@ -76,14 +76,14 @@ final class StartComputation {
     Duty duty = starter.duty();
 
     List<ComputedStart> starts = new ArrayList<>();
-    StartHistory permitted = simulator.run(Scenario.PERMITTED, conditions);
+    StartProtection permitted = evaluator.over(simulator.run(Scenario.PERMITTED, conditions));
     for (int n = 1; n <= duty.coldStarts(); n++) {
       starts.add(
           permitted(
               corner, permitted, ComputedStart.From.COLD, n, DevicePreload.COLD, PartPreload.COLD));
     }
     List<Double> sections =
-        evaluator.sectionLevelsAfter(permitted, PartPreload.COLD, Math.max(1, duty.coldStarts()));
+        permitted.sectionLevelsAfter(PartPreload.COLD, Math.max(1, duty.coldStarts()));
     DevicePreload warm = DevicePreload.running(stator, ring);
     PartPreload restarted = new PartPreload(stator, ring, duty.restartAfterSeconds(), sections);
     for (int n = 1; n <= duty.hotStarts(); n++) {
@@ -93,7 +93,7 @@ final class StartComputation {
     DevicePreload forgotten = DevicePreload.remembered(stator, ring);
     PartPreload hot = new PartPreload(stator, ring, 0.0, sections);
     for (Scenario fault : faults()) {
-      StartHistory history = simulator.run(fault, conditions);
+      StartProtection history = evaluator.over(simulator.run(fault, conditions));
       starts.add(
           fault(corner, history, ComputedStart.From.COLD, DevicePreload.COLD, PartPreload.COLD));
       starts.add(fault(corner, history, ComputedStart.From.HOT, forgotten, hot));
@@ -103,7 +103,7 @@ final class StartComputation {
 
   private ComputedStart permitted(
       Corner corner,
-      StartHistory history,
+      StartProtection start,
       ComputedStart.From from,
       int place,
       DevicePreload devices,
@@ -113,26 +113,26 @@ final class StartComputation {
         from,
         place,
         corner,
-        history,
-        evaluator.devices(history, devices, place),
-        evaluator.parts(history, parts, place),
+        start.history(),
+        start.devices(devices, place),
+        start.parts(parts, place),
         circuit);
   }
 
   private ComputedStart fault(
       Corner corner,
-      StartHistory history,
+      StartProtection start,
       ComputedStart.From from,
       DevicePreload devices,
       PartPreload parts) {
     return new ComputedStart(
-        history.scenario(),
+        start.history().scenario(),
         from,
         1,
         corner,
-        history,
-        evaluator.devices(history, devices),
-        evaluator.parts(history, parts),
+        start.history(),
+        start.devices(devices, 1),
+        start.parts(parts, 1),
         circuit);
   }
 

@@ -110,4 +110,18 @@ class MarginsTest {
     assertThat(Plants.fan500().evaluator().devices(held, DevicePreload.COLD))
         .allSatisfy(d -> assertThat(d.currentMargin()).isEmpty());
   }
+
+  @Test
+  void a_margin_finds_the_narrow_range_below_a_block() {
+    Device.Instantaneous element =
+        new Device.Instantaneous(
+            Devices.at("I", Device.Place.STATOR, "K1"),
+            2000,
+            Device.Measures.RMS,
+            0,
+            Devices.EXACT,
+            java.util.OptionalDouble.of(2200));
+    DeviceResponse as = fast(element, start(1, 1), DevicePreload.COLD, 1);
+    assertThat(as.currentMargin().getAsDouble()).isCloseTo(2000.0 / 380, within(1e-3));
+  }
 }
