@@ -4,12 +4,13 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
-import java.util.Map;
 import java.util.OptionalDouble;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.TestFactory;
+import sliprung.config.CurveLibraryReader;
+import sliprung.curve.CurveLibrary;
 import sliprung.curve.FuseGates;
 import sliprung.curve.GgBounds;
 import sliprung.curve.InverseLaw;
@@ -25,19 +26,10 @@ import sliprung.starter.Device;
 /** Laws and elements against standards, textbooks and independently computed cases. */
 @Tag("outside")
 class OutsideCasesTest {
-  private static final Map<String, InverseLaw> LAWS =
-      Map.of(
-          "standard", law(0.14, 0.02, 0, OptionalDouble.empty()),
-          "very", law(13.5, 1, 0, OptionalDouble.empty()),
-          "extremely", law(80, 2, 0, OptionalDouble.empty()),
-          "long-time", law(120, 1, 0, OptionalDouble.empty()),
-          "short-time", law(0.05, 0.04, 0, OptionalDouble.empty()),
-          "ieee-moderately", law(0.0515, 0.02, 0.1140, OptionalDouble.of(4.85)),
-          "ieee-very", law(19.61, 2, 0.491, OptionalDouble.of(21.6)),
-          "ieee-extremely", law(28.2, 2, 0.1217, OptionalDouble.of(29.1)));
+  private static final CurveLibrary LIBRARY = CurveLibraryReader.builtIn();
 
-  private static InverseLaw law(double k, double alpha, double c, OptionalDouble reset) {
-    return new InverseLaw("", "", k, alpha, c, reset, "", "");
+  private static InverseLaw law(Row row) {
+    return LIBRARY.inverseLaw(row.text("law") + "-inverse").orElseThrow();
   }
 
   @TestFactory
@@ -45,7 +37,7 @@ class OutsideCasesTest {
     return OutsideTable.read("inverse-time")
         .tests(
             row -> {
-              InverseLaw law = LAWS.get(row.text("law"));
+              InverseLaw law = law(row);
               double multiple = row.number("multiple");
               double timeMultiplier = row.number("time_multiplier");
               double seconds =
@@ -64,7 +56,7 @@ class OutsideCasesTest {
               Device.InverseTime relay =
                   new Device.InverseTime(
                       Devices.at("51", Device.Place.STATOR, "Q1"),
-                      LAWS.get(row.text("law")),
+                      law(row),
                       100.0,
                       1.0,
                       java.util.Optional.empty(),
@@ -144,19 +136,7 @@ class OutsideCasesTest {
     return OutsideTable.read("trip-class-range")
         .tests(
             row -> {
-              OptionalDouble shortest =
-                  row.has("shortest_s")
-                      ? OptionalDouble.of(row.number("shortest_s"))
-                      : OptionalDouble.empty();
-              TripClass tripClass =
-                  new TripClass(
-                      "class",
-                      row.number("multiple"),
-                      shortest,
-                      row.number("longest_s"),
-                      row.number("multiple") > 7 ? OptionalDouble.of(240) : OptionalDouble.empty(),
-                      "",
-                      "");
+              TripClass tripClass = LIBRARY.tripClass(row.text("class")).orElseThrow();
               OverloadRelays relays =
                   new OverloadRelays(Devices.overload("F2", tripClass, 100), 20.0);
               Meter meter =
@@ -170,7 +150,7 @@ class OutsideCasesTest {
 
   @TestFactory
   Stream<DynamicTest> edges_of_a_gg_fuse() {
-    FuseGates gates = new FuseGates(100, 290, 580, 820, 1450, 27e3, 86e3, 125, 160, 7200, "", "");
+    FuseGates gates = LIBRARY.ggGates(100).orElseThrow();
     PointEdge straight =
         new PointEdge(List.of(new PointCurve.Point(290, 10), new PointCurve.Point(820, 0.1)));
     return OutsideTable.read("gg-100")

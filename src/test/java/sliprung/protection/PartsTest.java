@@ -8,6 +8,8 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import sliprung.machine.Source;
+import sliprung.runup.Scenario;
+import sliprung.runup.Stage;
 import sliprung.runup.StartHistory;
 import sliprung.starter.Conductor;
 import sliprung.starter.ResistorBank;
@@ -265,5 +267,26 @@ class PartsTest {
     assertThat(part(Plants.crusher6600(), "K1", medium, PartPreload.COLD, 1).missing())
         .as("above 1000 V another standard holds")
         .hasValue("contactors.K1.short-time");
+  }
+
+  @Test
+  void a_computed_locked_start_heats_the_rings_and_every_section_that_its_steps_leave_in() {
+    StartHistory locked =
+        FAN.simulator()
+            .run(new Scenario(Scenario.Kind.LOCKED, 0, Scenario.LoadMode.START), FAN.nominal());
+    assertThat(part("rings", locked).limitAtSeconds()).isBetween(5.0, 40.0);
+    assertThat(part("rotor", locked).limitAtSeconds()).isBetween(14.0, 60.0);
+    for (int n = 1; n <= 4; n++) {
+      Stage stage = locked.stages().get(n - 1);
+      double square = stage.trace().integralOfSquare(stage.trace().ringAmps());
+      double before = 0;
+      for (int k = 0; k < n - 1; k++) {
+        Stage earlier = locked.stages().get(k);
+        before += earlier.trace().integralOfSquare(earlier.trace().ringAmps());
+      }
+      double ohms = FAN.starter().resistors().sections().get(n - 1).ohms();
+      assertThat(part("section-" + n, locked).energyJoules().getAsDouble())
+          .isCloseTo(3 * ohms * (before + square), within(1e-4 * 3 * ohms * square));
+    }
   }
 }
