@@ -11,6 +11,7 @@ import sliprung.rulebook.Facts;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.Rule;
 import sliprung.rulebook.Verdict;
+import sliprung.tolerance.Corner;
 
 class MakingTest {
   private static final String RATINGS = "ratings: {AC-2: 315 A, AC-3: 315 A}";
@@ -97,6 +98,19 @@ class MakingTest {
     assertThat(Asymmetry.against(0.2, 0.35))
         .isCloseTo(Asymmetry.factor(0.2) / Asymmetry.factor(0.35), within(1e-12))
         .isGreaterThan(1.1);
+  }
+
+  @Test
+  void the_corner_of_the_greatest_closing_current_decides() {
+    Facts facts =
+        CrusherFacts.of(
+            "band: [0 %, 0 %]", "band: [-5 %, +10 %]", "tolerance: 0 %", "tolerance: 8 %");
+    Finding finding = CrusherFacts.finding(RULE, facts, "K1");
+    Corner corner = finding.start().orElseThrow().corner();
+
+    assertThat(corner.supplyPu()).isCloseTo(1.10, within(1e-12));
+    assertThat(corner.bank()).isEqualTo(Corner.Bank.LOW);
+    assertThat(finding.value().getAsDouble()).isGreaterThan(closing() * 1.09);
   }
 
   @Test
