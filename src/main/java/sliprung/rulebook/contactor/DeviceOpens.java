@@ -134,15 +134,20 @@ final class DeviceOpens {
             ? "put a fuse in series that is quicker above " + Show.amps(proven.amps())
             : "take a short-circuit device that is quicker above " + Show.amps(proven.amps()));
     ways.add("a contactor that breaks " + Show.amps(amps));
-    ways.add(
-        facts.starter().breakers().isEmpty()
-            ? "block " + device.tag() + " above " + Show.amps(proven.amps())
-            : "let "
-                + device.tag()
-                + " open a breaker, or block it above "
-                + Show.amps(proven.amps()));
+    if (!facts.starter().breakers().isEmpty()) {
+      ways.add("let " + device.tag() + " open a breaker");
+    }
+    if (canBeBlocked()) {
+      ways.add("block " + device.tag() + " above " + Show.amps(proven.amps()));
+    }
     String text = String.join(", or ", ways) + ".";
     return Character.toUpperCase(text.charAt(0)) + text.substring(1);
+  }
+
+  private boolean canBeBlocked() {
+    return device instanceof Device.InverseTime
+        || device instanceof Device.DefiniteTime
+        || device instanceof Device.Instantaneous;
   }
 
   private Finding notJudged(WinningDevice winning) {

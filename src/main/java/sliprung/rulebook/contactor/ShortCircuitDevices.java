@@ -10,8 +10,11 @@ import sliprung.starter.Device;
 import sliprung.starter.Starter;
 
 /**
- * The devices that clear a short circuit in the stator line without a contactor: fuses, devices
- * given by points that open by themselves, and relays that open a breaker.
+ * The devices that clear a short circuit in the stator line without a contactor.
+ *
+ * <p>Made for it are fuses, devices given by points, and instantaneous elements that open a
+ * breaker. Relays with a delay that open a breaker are counted only where there is none of those: a
+ * contactor's breaking capacity shall not hang on the setting of a delayed relay next to a fuse.
  */
 final class ShortCircuitDevices {
   private final List<Member> members;
@@ -24,23 +27,29 @@ final class ShortCircuitDevices {
 
   /** Those of a starter. */
   static ShortCircuitDevices of(Starter starter) {
-    List<Member> members = new ArrayList<>();
+    List<Member> made = new ArrayList<>();
+    List<Member> delayed = new ArrayList<>();
     for (Device device : starter.protection()) {
-      if (device.fitting().place() != Device.Place.STATOR || !seesCurrent(device)) {
+      if (device.fitting().place() != Device.Place.STATOR) {
         continue;
       }
       Optional<Breaker> breaker = device.trips().flatMap(starter::breaker);
-      boolean byItself =
-          device instanceof Device.Fuse
-              || device instanceof Device.Points && device.trips().isEmpty();
-      if (byItself || breaker.isPresent()) {
-        members.add(new Member(device, breaker.map(Breaker::openingSeconds).orElse(0.0)));
+      Member member = new Member(device, breaker.map(Breaker::openingSeconds).orElse(0.0));
+      boolean opensByItself = device.trips().isEmpty();
+      if (device instanceof Device.Fuse) {
+        made.add(new Member(device, 0.0));
+      } else if (device instanceof Device.Points && (opensByItself || breaker.isPresent())) {
+        made.add(member);
+      } else if (device instanceof Device.Instantaneous && breaker.isPresent()) {
+        made.add(member);
+      } else if (breaker.isPresent() && measuresCurrent(device)) {
+        delayed.add(member);
       }
     }
-    return new ShortCircuitDevices(members);
+    return new ShortCircuitDevices(made.isEmpty() ? delayed : made);
   }
 
-  private static boolean seesCurrent(Device device) {
+  private static boolean measuresCurrent(Device device) {
     return !(device instanceof Device.SequenceTimer) && !(device instanceof Device.Standstill);
   }
 

@@ -24,7 +24,7 @@ public final class TheLineContactorMakesWhatItClosesOnto implements Rule {
       new Info(
           "contactor/making",
           "Is the line contactor proven to make the current it closes onto?",
-          "IEC 60947-4-1 table 7 (occasional) and table 10 (routine)",
+          "IEC 60947-4-1 table 7 (occasional) and table 10 (routine, from memory)",
           List.of("supply.band", "motor", "resistors", "interlocks", "contactors.{subject}"));
 
   @Override

@@ -180,7 +180,7 @@ public final class TheRelayTakesOverFromTheFuse implements Rule {
       return builder
           .margin(meanMargin)
           .figures(mean, proven.amps(), "A")
-          .says(points + " " + breaks + " Over the whole bands that is not sure: " + band)
+          .says(points + " " + breaks + " Over the whole bands that is not sure. " + band)
           .mend(
               "Declare the tested coordination ("
                   + coordinationPath(contactor)

@@ -23,7 +23,7 @@ final class BankPlausibility {
   }
 
   private static String path(int section) {
-    return "resistors.sections." + section;
+    return "resistors.sections[" + section + "]";
   }
 
   /** Tapped to the star point, each section is smaller than the one cut out before it. */
@@ -108,7 +108,7 @@ final class BankPlausibility {
     Starter starter = tally.facts().starter();
     for (int k = 1; k <= starter.steps().size(); k++) {
       Step.ClosingRule rule = starter.steps().get(k - 1).rule();
-      String path = "steps." + k;
+      String path = "steps[" + k + "]";
       if (rule instanceof Step.StatorBelow below) {
         tally.ratio(
             "current-level",

@@ -127,14 +127,14 @@ final class DrivePlausibility {
         "ambient.motor",
         OptionalDouble.of(ambient.motorCelsius()),
         "The air around the motor",
-        t -> Show.three(t) + " °C",
+        t -> Show.three(t) + "\u00a0°C",
         "Degrees Celsius.");
     tally.check(
         "air",
         "ambient.panel",
         OptionalDouble.of(ambient.panelCelsius()),
         "The air in the panel",
-        t -> Show.three(t) + " °C",
+        t -> Show.three(t) + "\u00a0°C",
         "Degrees Celsius.");
   }
 }

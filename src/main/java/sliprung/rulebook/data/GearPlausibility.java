@@ -86,7 +86,7 @@ final class GearPlausibility {
                 path,
                 Tally.over(cable.ampacity(), cable.squareMillimetres()),
                 "Ampacity over area of the cable",
-                density -> Show.three(density) + " A/mm²",
+                density -> Show.three(density) + "\u00a0A/mm²",
                 "Area in mm² of one phase, and what that area carries."));
   }
 }

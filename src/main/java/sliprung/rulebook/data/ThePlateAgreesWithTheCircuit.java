@@ -122,7 +122,7 @@ public final class ThePlateAgreesWithTheCircuit implements Rule {
   }
 
   private static String quantity(double value, String unit) {
-    return unit.isEmpty() ? Show.three(value) : Show.three(value) + " " + unit;
+    return unit.isEmpty() ? Show.three(value) : Show.three(value) + "\u00a0" + unit;
   }
 
   private static String notes(Facts facts) {

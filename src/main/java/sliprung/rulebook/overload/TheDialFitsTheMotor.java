@@ -37,7 +37,7 @@ public final class TheDialFitsTheMotor implements Rule {
       new Info(
           "overload/dial",
           "At what current does the overload relay trip in the end, and may it?",
-          "IEC 60947-4-1 table 3; NFPA 70 430.32",
+          "IEC 60947-4-1 table 3 (from memory); NFPA 70 430.32",
           List.of(
               "motor.current",
               "motor.service-factor",
@@ -107,7 +107,10 @@ public final class TheDialFitsTheMotor implements Rule {
             * serviceFactor;
     double limit = share * rated;
     double margin = snapped(limit / trip.mostAmps());
-    builder.margin(margin).figures(trip.mostAmps(), limit, "A").reference("IEC 60947-4-1 table 3");
+    builder
+        .margin(margin)
+        .figures(trip.mostAmps(), limit, "A")
+        .reference("IEC 60947-4-1 table 3 (from memory)");
     String says =
         trip.sentence(rated)
             + " The limit is "
