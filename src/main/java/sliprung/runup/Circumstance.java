@@ -30,6 +30,9 @@ record Circumstance(
   /** Share of synchronous speed within which a speed counts as settled. */
   static final double SETTLED = 1e-9;
 
+  /** A shorter time than any contactor's moves nothing, and no integrator steps through it. */
+  private static final double SHORTEST_SECONDS = 1e-9;
+
   private static final int SCAN = 400;
 
   OperatingPoint at(double speed) {
@@ -141,6 +144,9 @@ record Circumstance(
   Motion move(double fromTime, double speed, double toTime, List<DoubleUnaryOperator> stops) {
     if (speed == 0.0 && stands()) {
       return Motion.constant(fromTime, fromTime, 0.0, End.SETTLED);
+    }
+    if (toTime - fromTime < SHORTEST_SECONDS) {
+      return Motion.constant(fromTime, toTime, speed, End.TIME);
     }
     double balance = balanceFrom(speed);
     double tolerance = SETTLED * machine.synchronousSpeed();
