@@ -15,6 +15,9 @@ import sliprung.quantity.Dimension;
  * <em>silent</em>: it yields nothing and, since its own mistake is on record, no second one.
  */
 final class Section {
+  /** Above so many known keys a message names the nearest one only. */
+  private static final int MOST_LISTED = 10;
+
   private final Reading reading;
   private final String path;
   private final Place place;
@@ -52,20 +55,25 @@ final class Section {
       Reading reading, String path, Place place, YamlNode.Mapping mapping, String... known) {
     Section section = absent(reading, path, place, known);
     Set<String> words = new TreeSet<>(List.of(known));
+    Map<String, YamlNode.Entry> misspelt = new LinkedHashMap<>();
     for (YamlNode.Entry entry : mapping.entries()) {
-      section.take(entry, words, List.of(known));
+      section.take(entry, words, List.of(known)).ifPresent(w -> misspelt.putIfAbsent(w, entry));
     }
+    // A misspelt key is read as the word it was meant for: its content may hold mistakes as well,
+    // and the word itself is not missing.
+    misspelt.forEach(section::takeMisspelt);
     return section;
   }
 
-  private void take(YamlNode.Entry entry, Set<String> words, List<String> known) {
+  /** Takes one entry; the known word it was meant for where its key is misspelt. */
+  private Optional<String> take(YamlNode.Entry entry, Set<String> words, List<String> known) {
     if (entry.key() instanceof YamlNode.Refused) {
-      return;
+      return Optional.empty();
     }
     if (!(entry.key() instanceof YamlNode.Scalar key)) {
       reading.mistake(
           entry.key().place(), path, "expected a word as key but found " + entry.key().found());
-      return;
+      return Optional.empty();
     }
     String name = key.text();
     if (name.equals("<<")) {
@@ -73,12 +81,11 @@ final class Section {
           key.place(),
           path,
           "expected a key but found a merge key, '<<'",
-          hint("write the values out"));
-      return;
+          Optional.of("write the values out"));
+      return Optional.empty();
     }
     if (!words.isEmpty() && !words.contains(name)) {
-      refuse(key, known);
-      return;
+      return refuse(key, known);
     }
     Field before = fields.get(name);
     if (before != null) {
@@ -91,29 +98,43 @@ final class Section {
               + before.keyPlace().line()
               + ", column "
               + before.keyPlace().column());
-      return;
+      return Optional.empty();
     }
-    Field field = new Field(reading, child(name), name, key.place(), entry.value());
+    put(name, key.place(), entry.value());
+    return Optional.empty();
+  }
+
+  private void takeMisspelt(String word, YamlNode.Entry entry) {
+    if (!fields.containsKey(word)) {
+      put(word, entry.key().place(), entry.value());
+    }
+  }
+
+  private void put(String name, Place keyPlace, YamlNode value) {
+    Field field = new Field(reading, child(name), name, keyPlace, value);
     reading.know(field.path());
-    reading.keep(field.path(), entry.value().place());
+    reading.keep(field.path(), value.place());
     fields.put(name, field);
   }
 
-  private void refuse(YamlNode.Scalar key, List<String> known) {
+  /** Tells of an unknown key; the known word nearest to it. */
+  private Optional<String> refuse(YamlNode.Scalar key, List<String> known) {
     Optional<String> outside = OutsideScope.sentence(key.text());
     if (outside.isPresent()) {
       reading.mistake(key.place(), child(key.text()), outside.get());
-      return;
+      return Optional.empty();
     }
+    Optional<String> nearest = Wording.nearest(key.text(), known);
+    String expected =
+        nearest.isPresent() && known.size() > MOST_LISTED
+            ? "a key of this format"
+            : Wording.oneOf(known);
     reading.mistake(
         key.place(),
         path,
-        "expected " + Wording.oneOf(known) + " but found " + key.found(),
-        Wording.nearest(key.text(), known).map(w -> "did you mean '" + w + "'?"));
-  }
-
-  private static Optional<String> hint(String text) {
-    return Optional.of(text);
+        "expected " + expected + " but found " + key.found(),
+        nearest.map(w -> "did you mean '" + w + "'?"));
+    return nearest;
   }
 
   private String child(String key) {
@@ -168,7 +189,7 @@ final class Section {
           place,
           child(key),
           "expected " + expected + " but found nothing",
-          hint("add for example '" + key + ": " + example + "'"));
+          Optional.of("add for example '" + key + ": " + example + "'"));
     }
     return Optional.ofNullable(field);
   }

@@ -235,6 +235,40 @@ class AlternativesTest {
   }
 
   @Test
+  void an_overload_in_the_rotor_circuit_is_taken_to_measure_by_transformer() {
+    assertThat(
+            device("{kind: overload, class: 10, dial: 140 A, place: rotor, trips: K1}").fitting())
+        .isEqualTo(fitting(Device.Place.ROTOR, Device.Measurement.CT, "K1"));
+  }
+
+  @Test
+  void neighbouring_keys_are_not_mixed_up() {
+    Starter starter =
+        starter(
+            winchWith(
+                "cut-out: star-point\n",
+                "cut-out: star-point\n  tolerance: 7 %\n  hot-rise: 25 %\n",
+                "closing: 50 ms, opening: 50 ms",
+                "closing: 40 ms, opening: 30 ms",
+                "duty:\n",
+                "timer-spread: 3 %\nlevel-spread: 8 %\nsequence: cascaded\n"
+                    + "ambient: {motor: 45 °C, panel: 35 °C}\n"
+                    + "interlocks: {steps-open-before-line: true}\nduty:\n"));
+
+    assertThat(starter.resistors().tolerance()).isEqualTo(0.07);
+    assertThat(starter.resistors().hotRise()).isEqualTo(0.25);
+    assertThat(starter.contactor("K1").orElseThrow().closingSeconds()).isEqualTo(0.04);
+    assertThat(starter.contactor("K1").orElseThrow().openingSeconds()).isEqualTo(0.03);
+    assertThat(starter.timerSpread()).isEqualTo(0.03);
+    assertThat(starter.levelSpread()).isEqualTo(0.08);
+    assertThat(starter.sequence()).isEqualTo(Starter.Sequence.CASCADED);
+    assertThat(starter.ambient().motorCelsius()).isEqualTo(45);
+    assertThat(starter.ambient().panelCelsius()).isEqualTo(35);
+    assertThat(starter.interlocks().stepsOpenBeforeLine()).isTrue();
+    assertThat(starter.interlocks().everyStepProven()).isFalse();
+  }
+
+  @Test
   void a_fuse_without_gates_in_the_standard_is_no_mistake() {
     Device.Fuse odd = (Device.Fuse) device("{kind: fuse, class: gG, rating: 224 A}");
     Device.Fuse motorFuse = (Device.Fuse) device("{kind: fuse, class: aM, rating: 160 A}");

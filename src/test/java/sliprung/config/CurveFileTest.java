@@ -160,7 +160,7 @@ class CurveFileTest {
         "[8, 5 s] | [8, 5 A] | 5:37 | expected a time but found a current",
         "[8, 5 s] | [8] | 5:33 | expected a pair [current, time] but found a list of 1",
         "multiples  | ratios | 4:11 | expected amperes or multiples but found 'ratios'",
-        "title: | titel: | 1:1 | expected a title but found nothing"
+        "title: | name: | 1:1 | expected a title but found nothing"
       })
   void a_mistake_of_a_curve_file_is_told_at_its_place(
       String sound, String broken, String place, String words) {
