@@ -85,7 +85,7 @@ public record Facts(
         starter.assumptions().stream().filter(a -> underAny(a.path(), roots)).findFirst();
     Optional<Map.Entry<String, EvidenceGrade>> graded =
         starter.evidence().entrySet().stream()
-            .filter(e -> underAny(e.getKey(), roots))
+            .filter(e -> underAny(e.getKey(), roots) || anyUnder(roots, e.getKey()))
             .max(Comparator.comparing(Map.Entry::getValue));
     EvidenceGrade common =
         roots.stream().anyMatch(r -> !r.startsWith("motor"))
@@ -101,6 +101,11 @@ public record Facts(
       return graded.get().getKey() + ": " + graded.get().getValue().word();
     }
     return (roots.isEmpty() ? "file" : roots.get(roots.size() - 1)) + ": " + common.word();
+  }
+
+  /** Whether one of these paths lies below a path. */
+  private static boolean anyUnder(List<String> roots, String path) {
+    return roots.stream().anyMatch(root -> root.startsWith(path + "."));
   }
 
   /** Whether a path is one of these or lies below one. */
