@@ -51,13 +51,31 @@ public final class NothingCreepsToATripInService implements Rule {
       }
     }
     for (Device device : facts.starter().protection()) {
-      Double pickUp = facts.fastPickUps().get(device.tag());
       boolean timer = device instanceof Device.SequenceTimer || device instanceof Device.Standstill;
-      if (pickUp != null && !timer && device.fitting().place() != Device.Place.BANK) {
+      if (timer || device.fitting().place() == Device.Place.BANK) {
+        continue;
+      }
+      Double pickUp = facts.fastPickUps().get(device.tag());
+      if (pickUp != null) {
         findings.add(judge(facts, device, pickUp));
+      } else {
+        // Unknown is not the same as none: a class without a shortest time has a pick-up that nobody
+        // pins.
+        facts
+            .bands()
+            .unknown(device, Edge.FAST)
+            .map(why -> unknown(facts, device, why))
+            .ifPresent(findings::add);
       }
     }
     return Answer.of(findings, "no device measures current in service");
+  }
+
+  private static Finding unknown(Facts facts, Device device, String why) {
+    return FindingBuilder.of(facts, INFO, device.tag())
+        .edge(Edge.FAST)
+        .mend("Give the device's own curve as points.")
+        .notJudged(List.of("protection." + device.tag() + ".curve"), why);
   }
 
   private static Finding judge(Facts facts, Device device, double pickUp) {
