@@ -7,6 +7,7 @@ import java.util.Optional;
 import sliprung.protection.DeviceResponse;
 import sliprung.protection.Edge;
 import sliprung.quantity.Show;
+import sliprung.rulebook.BreakingCapacity;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Exposure;
 import sliprung.rulebook.Facts;
@@ -165,6 +166,10 @@ public final class TheSequenceIsSupervised implements Rule {
           .byMargin();
     }
     Exposure own = earliest.get();
+    Exposure alone = Exposure.of(facts, own.start(), allBut(facts, timer));
+    if (alone.clearing().isEmpty()) {
+      return clearsNothing(builder, facts, timer, own, alone);
+    }
     double opening =
         timer.trips().map(t -> facts.starter().openingSeconds(t).orElse(0.0)).orElse(0.0);
     double clears = timer.seconds() * (1.0 + spread) + opening;
@@ -203,6 +208,36 @@ public final class TheSequenceIsSupervised implements Rule {
                     ? "Set it inside its window."
                     : "Shorten the start or strengthen the part that reaches its limit first."
                 : "")
+        .byMargin();
+  }
+
+  private static List<String> allBut(Facts facts, Device.SequenceTimer timer) {
+    return facts.starter().protection().stream()
+        .map(Device::tag)
+        .filter(tag -> !tag.equals(timer.tag()))
+        .toList();
+  }
+
+  /** The timer elapses, but what it opens does not end the start, or nothing proves that it does. */
+  private static Finding clearsNothing(
+      FindingBuilder builder,
+      Facts facts,
+      Device.SequenceTimer timer,
+      Exposure own,
+      Exposure alone) {
+    builder.at(own.start()).edge(Edge.SLOW);
+    String opens = timer.trips().orElse("nothing");
+    if (alone.unproven().isPresent()) {
+      return builder
+          .mend("Give what " + opens + " is proven to break.")
+          .notJudged(
+              List.of(BreakingCapacity.missingPath(facts, opens)),
+              sentence(own) + " Nothing proves that " + opens + " breaks this current.");
+    }
+    return builder
+        .margin(0.0)
+        .says(sentence(own) + " " + timer.tag() + " opens " + opens + ", which clears nothing.")
+        .mend("Let it open the line contactor or a breaker that breaks this current.")
         .byMargin();
   }
 
