@@ -174,7 +174,8 @@ public final class StartSimulator {
           Outcome.LOCKED,
           List.of(stage),
           Optional.empty(),
-          OptionalDouble.empty(),
+          // the last step is in from the beginning: what waits for it has nothing to wait for
+          OptionalDouble.of(0.0),
           OptionalDouble.empty(),
           0);
     }
