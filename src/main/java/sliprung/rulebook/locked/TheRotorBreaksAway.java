@@ -42,7 +42,9 @@ public final class TheRotorBreaksAway implements Rule {
   @Override
   public Answer judge(Facts facts) {
     Load load = facts.starter().load();
-    double breakaway = load.breakawayTorque().orElse(load.torque().at(0.0));
+    // a load that is easy to break loose must still be moved on
+    double atRest = load.torque().at(0.0);
+    double breakaway = Math.max(atRest, load.breakawayTorque().orElse(atRest));
     if (breakaway <= 0.0) {
       return new Answer.NotApplicable("the load has no torque at rest");
     }
