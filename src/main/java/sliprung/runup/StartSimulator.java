@@ -174,8 +174,7 @@ public final class StartSimulator {
           Outcome.LOCKED,
           List.of(stage),
           Optional.empty(),
-          // the last step is in from the beginning: what waits for it has nothing to wait for
-          OptionalDouble.of(0.0),
+          OptionalDouble.of(0.0), // what waits for the last step has nothing to wait for
           OptionalDouble.empty(),
           0);
     }
@@ -290,11 +289,12 @@ public final class StartSimulator {
       } else {
         settle(horizon, allClosed);
       }
-      boolean running = settled && allClosed && onStableSide();
+      boolean running = isRunning(allClosed);
       if (!rotorLocked && !permitted && scenario.load() == Scenario.LoadMode.RUNNING) {
         endStage();
         beginStage(heldRunningTorque());
         settle(horizon, false);
+        running = isRunning(allClosed);
       }
       if (!(permitted && running)) {
         advance(horizon);
@@ -334,9 +334,9 @@ public final class StartSimulator {
       }
     }
 
-    private boolean onStableSide() {
-      double slip = machine.slip(speed);
-      return slip <= machine.breakdownSlip(conditions.source(), circumstance.externalOhms());
+    private boolean isRunning(boolean allClosed) {
+      double breakdown = machine.breakdownSlip(conditions.source(), circumstance.externalOhms());
+      return settled && allClosed && speed > 0.0 && machine.slip(speed) <= breakdown;
     }
 
     private Outcome outcome(boolean running) {
