@@ -1,5 +1,7 @@
 package sliprung.tolerance;
 
+import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.Locale;
 
 /**
@@ -54,8 +56,8 @@ public record Corner(double supplyPu, LoadSide load, Bank bank, Timers timers) {
     }
     return String.format(
         Locale.ROOT,
-        "%dv-%s-%s-%s",
-        Math.round(supplyPu * 100.0),
+        "%sv-%s-%s-%s",
+        percent(),
         load.name().toLowerCase(Locale.ROOT),
         bank.name().toLowerCase(Locale.ROOT),
         timers.name().toLowerCase(Locale.ROOT));
@@ -73,12 +75,20 @@ public record Corner(double supplyPu, LoadSide load, Bank bank, Timers timers) {
           case HIGH -> "cold bank, high tolerance";
           case HOT -> "hot bank, high tolerance";
         };
-    return Math.round(supplyPu * 100.0)
+    return percent()
         + " % volts, "
         + load.name().toLowerCase(Locale.ROOT)
         + " load, "
         + bankWords
         + ", timers "
         + timers.name().toLowerCase(Locale.ROOT);
+  }
+
+  /** Voltage in per cent, as many digits as it takes: two corners never share an id. */
+  private String percent() {
+    return BigDecimal.valueOf(supplyPu * 100.0)
+        .setScale(6, RoundingMode.HALF_UP)
+        .stripTrailingZeros()
+        .toPlainString();
   }
 }
