@@ -28,7 +28,8 @@ public final class Exposures {
     FindingBuilder builder = FindingBuilder.of(facts, info, subject);
     Exposure worst = worst(facts, starts.stream()).orElseThrow();
     builder.at(worst.start()).edge(sliprung.protection.Edge.SLOW);
-    if (!worst.missing().isEmpty()) {
+    // what is known may already be past its limit: what is not known makes that no better
+    if (!worst.missing().isEmpty() && worst.clearingRatio() >= 1.0) {
       return builder.notJudged(
           worst.missing(), where(worst.start()) + ": what it heats has no known limit.");
     }

@@ -90,7 +90,7 @@ public final class SomethingSeesEveryHeldStep implements Rule {
     }
     Optional<Exposure> exposure = Exposures.worst(facts, starts.stream());
     Exposure worst = exposure.orElseThrow();
-    if (!worst.missing().isEmpty()) {
+    if (!worst.missing().isEmpty() && worst.clearingRatio() >= 1.0) {
       return builder.notJudged(
           worst.missing(), where + ": no fitted device sees it, and what it heats is not known.");
     }
