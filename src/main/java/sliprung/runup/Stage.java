@@ -1,6 +1,7 @@
 package sliprung.runup;
 
 import java.util.List;
+import java.util.Optional;
 
 /**
  * The time a start spends on one step.
@@ -13,6 +14,7 @@ import java.util.List;
  * @param settled the speed settled before the stage ended
  * @param closedBy tag of the contactor whose closing began it; the line contactor's for the first
  * @param trace samples from first to last; a settled speed is held to the end
+ * @param peak of the closing that began it; empty where the transient was not computed
  */
 public record Stage(
     int step,
@@ -22,7 +24,30 @@ public record Stage(
     double toSeconds,
     boolean settled,
     String closedBy,
-    Trace trace) {
+    Trace trace,
+    Optional<ClosingPeak> peak) {
+
+  /** A stage of a steady computation. */
+  public Stage(
+      int step,
+      List<Integer> sectionsIn,
+      double externalOhms,
+      double fromSeconds,
+      double toSeconds,
+      boolean settled,
+      String closedBy,
+      Trace trace) {
+    this(
+        step,
+        sectionsIn,
+        externalOhms,
+        fromSeconds,
+        toSeconds,
+        settled,
+        closedBy,
+        trace,
+        Optional.empty());
+  }
 
   /** Copies the list. */
   public Stage {
