@@ -7,6 +7,7 @@ import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.function.DoubleUnaryOperator;
 import sliprung.machine.Machine;
+import sliprung.machine.OperatingPoint;
 import sliprung.starter.Load;
 import sliprung.starter.Motor;
 import sliprung.starter.Starter;
@@ -32,6 +33,7 @@ final class StartRun {
   private int stageStep;
   private List<Integer> stageSections;
   private Circumstance circumstance;
+  private OperatingPoint entry;
   private boolean settled;
   private double runUp = Double.NaN;
 
@@ -85,6 +87,7 @@ final class StartRun {
   private StartHistory ringsShorted() {
     circumstance = simulator.circumstance(conditions, List.of(), startingTorque, breakaway);
     drive.enter(circumstance);
+    entry = circumstance.at(0.0);
     drive.stand(StartHistory.HORIZON_SECONDS);
     Stage stage =
         new Stage(
@@ -96,6 +99,7 @@ final class StartRun {
             true,
             closedBy,
             drive.trace(),
+            entry,
             drive.peak());
     return new StartHistory(
         scenario,
@@ -111,6 +115,7 @@ final class StartRun {
   private void beginStage(DoubleUnaryOperator loadTorque) {
     circumstance = simulator.circumstance(conditions, sequence.sectionsIn(), loadTorque, breakaway);
     drive.enter(circumstance);
+    entry = circumstance.at(drive.speed());
     stageStep = sequence.step();
     stageSections = sequence.sectionsIn();
     stageFrom = drive.time();
@@ -131,6 +136,7 @@ final class StartRun {
             settled,
             closedBy,
             drive.trace(),
+            entry,
             drive.peak()));
   }
 
@@ -306,6 +312,7 @@ final class StartRun {
         settled,
         closedBy,
         drive.trace(),
+        entry,
         Optional.empty());
   }
 }

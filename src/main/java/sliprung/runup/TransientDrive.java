@@ -2,6 +2,7 @@ package sliprung.runup;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.DoubleUnaryOperator;
 import sliprung.machine.FluxModel;
 import sliprung.numeric.SystemFlow;
 
@@ -15,7 +16,7 @@ import sliprung.numeric.SystemFlow;
  */
 final class TransientDrive implements Drive {
   /** Error of a step, over the flux at no load and over synchronous speed. */
-  private static final double ERROR = 1e-9;
+  private static final double ERROR = 1e-8;
 
   /** Rates below this share of the scale a second count as settled. */
   private static final double SETTLED = 1e-6;
@@ -23,7 +24,14 @@ final class TransientDrive implements Drive {
   /** A speed this close to the balance of torques is taken for it, over synchronous speed. */
   private static final double AT_BALANCE = 1e-4;
 
+  /** Longest time in s that a stage is followed with the transient before it goes on steady. */
+  private static final double LONGEST = 30.0;
+
+  /** A speed beyond which a drive that runs away goes on steady, over synchronous speed. */
+  private static final double RUNS_AWAY = 2.0;
+
   private double time;
+  private double stageFrom;
   private double[] state = new double[FluxModel.STATES];
   private Circumstance circumstance;
   private FluxModel model;
@@ -57,10 +65,50 @@ final class TransientDrive implements Drive {
       cycles = new CycleMean(2.0 * Math.PI / model.electricalSpeed());
     }
     samples = new TransientSamples(entered, model, cycles);
+    stageFrom = time;
   }
 
   @Override
   public Circumstance.End move(double to, List<Level> stops) {
+    double limit = Math.min(to, stageFrom + LONGEST);
+    if (time < limit && !runsAway(state)) {
+      Circumstance.End end = moveWithTransient(limit, stops);
+      if (end != Circumstance.End.TIME || time >= to) {
+        return end;
+      }
+    }
+    return moveSteadily(to, stops);
+  }
+
+  private boolean runsAway(double[] at) {
+    return Math.abs(at[FluxModel.SPEED])
+        >= RUNS_AWAY * circumstance.machine().synchronousSpeed() * (1.0 - 1e-9);
+  }
+
+  /** The closing is long past, or no step follows: currents have caught up with the speed. */
+  private Circumstance.End moveSteadily(double to, List<Level> stops) {
+    List<DoubleUnaryOperator> functions =
+        stops.stream()
+            .map(level -> (DoubleUnaryOperator) w -> value(level, model.settledAt(w)))
+            .toList();
+    Circumstance.Motion motion = circumstance.move(time, speed(), to, functions);
+    double[] times = motion.times();
+    double[] speeds = motion.speeds();
+    for (int i = 0; i + 2 < times.length && motion.endTime() > times[0]; i += 2) {
+      samples.piece(
+          times[i],
+          model.settledAt(speeds[i]),
+          times[i + 1],
+          model.settledAt(speeds[i + 1]),
+          times[i + 2],
+          model.settledAt(speeds[i + 2]));
+    }
+    time = motion.endTime();
+    state = model.settledAt(motion.endSpeed());
+    return motion.end();
+  }
+
+  private Circumstance.End moveWithTransient(double to, List<Level> stops) {
     if (state[FluxModel.SPEED] == 0.0 && circumstance.stands()) {
       return run(to, true, true, stops);
     }
@@ -69,7 +117,7 @@ final class TransientDrive implements Drive {
     while (end == Circumstance.End.SETTLED && !atBalance() && time < to) {
       // A crawl past a dip of the torque is slow, too: go on for a while, whatever the rates.
       end = run(Math.min(to, time + 0.1 + 0.1 * (time - from)), false, false, stops);
-      if (end == Circumstance.End.TIME && time < to) {
+      if (end == Circumstance.End.TIME && time < to && !runsAway(state)) {
         end = run(to, false, true, stops);
       }
     }
@@ -92,13 +140,15 @@ final class TransientDrive implements Drive {
     if (untilSettled && restless(held, state) <= 0.0) {
       return Circumstance.End.SETTLED;
     }
-    SystemFlow.Stop[] all = new SystemFlow.Stop[stops.size() + (untilSettled ? 1 : 0)];
+    double fastest = RUNS_AWAY * circumstance.machine().synchronousSpeed();
+    SystemFlow.Stop[] all = new SystemFlow.Stop[stops.size() + (untilSettled ? 2 : 1)];
     for (int i = 0; i < stops.size(); i++) {
       Level level = stops.get(i);
       all[i] = y -> value(level, y);
     }
+    all[stops.size()] = y -> fastest - Math.abs(y[FluxModel.SPEED]);
     if (untilSettled) {
-      all[stops.size()] = y -> restless(held, y);
+      all[stops.size() + 1] = y -> restless(held, y);
     }
     double flux = ERROR * model.ratedFlux();
     double speed = ERROR * circumstance.machine().synchronousSpeed();
@@ -114,10 +164,10 @@ final class TransientDrive implements Drive {
             all);
     time = end.time();
     state = end.state();
-    if (end.crossed() < 0) {
+    if (end.crossed() < 0 || end.crossed() == stops.size()) {
       return Circumstance.End.TIME;
     }
-    return end.crossed() == stops.size() ? Circumstance.End.SETTLED : Circumstance.End.STOP;
+    return end.crossed() > stops.size() ? Circumstance.End.SETTLED : Circumstance.End.STOP;
   }
 
   private void rates(boolean held, double[] at, double[] rate) {

@@ -10,7 +10,7 @@ import sliprung.numeric.SystemFlow;
  */
 final class TransientSamples implements SystemFlow.Steps {
   /** Greatest share by which halving a piece may change the integral of a squared current. */
-  private static final double CHANGE = 1e-7;
+  private static final double CHANGE = 1e-6;
 
   private static final int MOST_HALVINGS = 6;
   private static final double RMS = Math.sqrt(2.0);
@@ -111,8 +111,14 @@ final class TransientSamples implements SystemFlow.Steps {
 
   /** Everything stays as it is until a time. */
   void constant(double from, double to, double[] state) {
-    begin(from, state);
-    piece(sample(from, state), sample(0.5 * (from + to), state), sample(to, state));
+    piece(from, state, 0.5 * (from + to), state, to, state);
+  }
+
+  /** A piece of motion by its beginning, its middle in time and its end. */
+  void piece(
+      double from, double[] first, double halfway, double[] middle, double to, double[] end) {
+    begin(from, first);
+    piece(last, sample(halfway, middle), sample(to, end));
   }
 
   private void append(Sample sample) {
