@@ -47,6 +47,7 @@ final class Summary {
     for (String line : wrap(Printable.of(answers.headline()), terminal.columns())) {
       out.println(terminal.strong(line));
     }
+    review.method().ifPresent(m -> wrapped("", "Model error: " + Printable.of(m.says()), "  "));
     for (Answer answer : answers.answers()) {
       out.println();
       out.println(terminal.strong(answer.question().number() + "  " + answer.question().words()));

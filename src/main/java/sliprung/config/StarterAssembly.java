@@ -39,6 +39,7 @@ final class StarterAssembly {
     "resistors",
     "steps",
     "sequence",
+    "method",
     "timer-spread",
     "level-spread",
     "contactors",
@@ -58,6 +59,15 @@ final class StarterAssembly {
   /** Names of parts in a record: a device of that tag could not be told from the part. */
   private static final Set<String> PARTS =
       Set.of("stator", "rotor", "rings", "stator-conductor", "rotor-conductor");
+
+  private static final Map<String, Starter.Method> METHODS =
+      Words.inOrder(
+          "auto",
+          Starter.Method.AUTO,
+          "steady",
+          Starter.Method.STEADY,
+          "transient",
+          Starter.Method.TRANSIENT);
 
   private final Reading reading;
   private final CurveLibrary library;
@@ -122,6 +132,8 @@ final class StarterAssembly {
                 "chained", Starter.Sequence.CHAINED, "cascaded", Starter.Sequence.CASCADED),
             Starter.Sequence.CHAINED,
             "chained");
+    Starter.Method method =
+        root.optional("method").flatMap(f -> f.choice(METHODS)).orElse(Starter.Method.AUTO);
     double timerSpread = root.numberOr("timer-spread", Dimension.SHARE, Range.SPREAD, 0.05, "5 %");
     double levelSpread = root.numberOr("level-spread", Dimension.SHARE, Range.SPREAD, 0.10, "10 %");
     List<Device> devices = new DeviceReader(library, this::pointCurve).read(root, switchgear);
@@ -169,7 +181,8 @@ final class StarterAssembly {
             evidence,
             accepted,
             reading.assumptions(),
-            reading.notYetJudged()));
+            reading.notYetJudged(),
+            method));
   }
 
   /** One tag, one thing: findings name their subject by its tag. */

@@ -24,6 +24,7 @@ import sliprung.starter.Motor.CircuitData;
 public final class Machine {
   private final CircuitData circuit;
   private final double synchronousSpeed;
+  private final int polePairs;
 
   /**
    * A machine.
@@ -35,6 +36,7 @@ public final class Machine {
   public Machine(CircuitData circuit, double frequency, int polePairs) {
     this.circuit = circuit;
     this.synchronousSpeed = 2.0 * Math.PI * frequency / polePairs;
+    this.polePairs = polePairs;
   }
 
   /** The equivalent circuit in ohms. */
@@ -45,6 +47,11 @@ public final class Machine {
   /** Synchronous speed, rad/s. */
   public double synchronousSpeed() {
     return synchronousSpeed;
+  }
+
+  /** Pole pairs. */
+  public int polePairs() {
+    return polePairs;
   }
 
   /** Slip, per unit, of a speed in rad/s. */

@@ -88,6 +88,7 @@ final class BasisPart {
             + "; stator to rotor ratio "
             + Show.three(c.ratio())
             + ".");
+    review.method().ifPresent(method -> page.element("p", method.says()));
     review.identification().notes().forEach(note -> page.element("p", note));
     if (!review.identification().residuals().isEmpty()) {
       Cells cells =

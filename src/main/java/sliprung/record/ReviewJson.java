@@ -14,8 +14,10 @@ import sliprung.machine.Identification;
 import sliprung.machine.Machine;
 import sliprung.machine.Source;
 import sliprung.review.Review;
+import sliprung.review.RunUpMethod;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Finding;
+import sliprung.runup.RunUpFigures;
 import sliprung.starter.Motor;
 import sliprung.tolerance.Corner;
 
@@ -51,6 +53,9 @@ public final class ReviewJson {
       json.writeStringField("date", review.date().toString());
       inputs(json, inputs);
       motor(fields, review);
+      if (review.method().isPresent()) {
+        method(fields, review.method().get());
+      }
       json.writeArrayFieldStart("starts");
       for (ComputedStart start : RecordedStarts.of(review)) {
         StartJson.write(fields, start);
@@ -109,6 +114,30 @@ public final class ReviewJson {
     }
     json.writeEndObject();
     json.writeEndObject();
+  }
+
+  private static void method(JsonFields fields, RunUpMethod method) throws IOException {
+    JsonGenerator json = fields.json();
+    json.writeObjectFieldStart("model_error");
+    json.writeStringField("asked", method.asked().word());
+    json.writeStringField("used", method.used().word());
+    fields.number("criterion", RunUpMethod.CRITERION);
+    figures(fields, "steady", method.error().steady());
+    figures(fields, "transient", method.error().withTransient());
+    fields.number("run_up", method.error().runUp());
+    fields.number("stator_i2t", method.error().statorSquare());
+    fields.number("rotor_i2t", method.error().ringSquare());
+    json.writeStringField("says", method.says());
+    json.writeEndObject();
+  }
+
+  private static void figures(JsonFields fields, String name, RunUpFigures figures)
+      throws IOException {
+    fields.json().writeObjectFieldStart(name);
+    fields.number("run_up_s", figures.runUpSeconds());
+    fields.number("stator_i2t_a2s", figures.statorSquare());
+    fields.number("rotor_i2t_a2s", figures.ringSquare());
+    fields.json().writeEndObject();
   }
 
   private static void finding(JsonFields fields, Finding finding) throws IOException {

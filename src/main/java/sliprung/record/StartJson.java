@@ -7,6 +7,7 @@ import java.util.Locale;
 import sliprung.protection.DeviceResponse;
 import sliprung.protection.PartResponse;
 import sliprung.rulebook.ComputedStart;
+import sliprung.runup.ClosingPeak;
 import sliprung.runup.Stage;
 import sliprung.runup.StartHistory;
 import sliprung.runup.Trace;
@@ -77,15 +78,15 @@ final class StartJson {
     fields.number("to_s", last && stage.settled() ? Double.NaN : stage.toSeconds());
     fields.number("speed_from_rpm", trace.speed()[0] * RPM);
     fields.number("speed_to_rpm", trace.speed()[end] * RPM);
-    fields.number("stator_from_a", trace.statorAmps()[0]);
+    fields.number("stator_from_a", stage.entry().statorAmps());
     fields.number("stator_to_a", trace.statorAmps()[end]);
-    fields.number("rotor_from_a", trace.ringAmps()[0]);
+    fields.number("rotor_from_a", stage.entry().ringAmps());
     fields.number("rotor_to_a", trace.ringAmps()[end]);
-    fields.number("torque_from_nm", trace.torque()[0]);
+    fields.number("torque_from_nm", stage.entry().torque());
     fields.number("torque_to_nm", trace.torque()[end]);
     json.writeBooleanField("settled", stage.settled());
-    json.writeNullField("stator_peak_a");
-    json.writeNullField("torque_peak_nm");
+    fields.number("stator_peak_a", stage.peak().map(ClosingPeak::statorAmps).orElse(Double.NaN));
+    fields.number("torque_peak_nm", stage.peak().map(ClosingPeak::torque).orElse(Double.NaN));
     json.writeEndObject();
   }
 

@@ -29,9 +29,19 @@ final class StartPart {
         new Cells(page)
             .open(
                 "Stages of the nominal cold start: each quantity just after the closing that begins"
-                    + " the stage, and at its end",
+                    + " the stage, and at its end (RMS); then the greatest instantaneous values of the"
+                    + " electrical transient",
                 List.of(
-                    "step", "closed by", "#from", "#to", "#speed", "#stator", "#ring", "#torque"));
+                    "step",
+                    "closed by",
+                    "#from",
+                    "#to",
+                    "#speed",
+                    "#stator",
+                    "#ring",
+                    "#torque",
+                    "#stator peak",
+                    "#torque peak"));
     List<Stage> stages = start.history().stages();
     for (Stage stage : stages) {
       boolean last = stage == stages.get(stages.size() - 1);
@@ -43,9 +53,11 @@ final class StartPart {
           Show.seconds(stage.fromSeconds()),
           last && stage.settled() ? "settled" : Show.seconds(stage.toSeconds()),
           Show.rpm(trace.speed()[0]) + " → " + Show.rpm(trace.speed()[end]),
-          Show.amps(trace.statorAmps()[0]) + " → " + Show.amps(trace.statorAmps()[end]),
-          Show.amps(trace.ringAmps()[0]) + " → " + Show.amps(trace.ringAmps()[end]),
-          Show.torque(trace.torque()[0]) + " → " + Show.torque(trace.torque()[end]));
+          Show.amps(stage.entry().statorAmps()) + " → " + Show.amps(trace.statorAmps()[end]),
+          Show.amps(stage.entry().ringAmps()) + " → " + Show.amps(trace.ringAmps()[end]),
+          Show.torque(stage.entry().torque()) + " → " + Show.torque(trace.torque()[end]),
+          stage.peak().map(p -> Show.amps(p.statorAmps())).orElse("–"),
+          stage.peak().map(p -> Show.torque(p.torque())).orElse("–"));
     }
     cells.close();
   }

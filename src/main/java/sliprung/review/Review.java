@@ -2,6 +2,7 @@ package sliprung.review;
 
 import java.time.LocalDate;
 import java.util.List;
+import java.util.Optional;
 import sliprung.machine.Identification;
 import sliprung.machine.Machine;
 import sliprung.rulebook.ComputedStart;
@@ -21,6 +22,7 @@ import sliprung.starter.Starter;
  * @param notApplicable rules without a subject, each with its reason
  * @param notBuilt rules of the rule book that this version does not hold
  * @param mustJudgeMissing must-judge rules that could not be judged
+ * @param method how the starts were computed; empty where none was
  */
 public record Review(
     Starter starter,
@@ -31,7 +33,8 @@ public record Review(
     List<Finding> findings,
     List<NotApplicable> notApplicable,
     List<String> notBuilt,
-    List<String> mustJudgeMissing) {
+    List<String> mustJudgeMissing,
+    Optional<RunUpMethod> method) {
 
   /**
    * A rule without a subject in this starter.
@@ -40,6 +43,30 @@ public record Review(
    * @param because why
    */
   public record NotApplicable(String rule, String because) {}
+
+  /** A review without the model error. */
+  public Review(
+      Starter starter,
+      LocalDate date,
+      Machine machine,
+      Identification identification,
+      List<ComputedStart> starts,
+      List<Finding> findings,
+      List<NotApplicable> notApplicable,
+      List<String> notBuilt,
+      List<String> mustJudgeMissing) {
+    this(
+        starter,
+        date,
+        machine,
+        identification,
+        starts,
+        findings,
+        notApplicable,
+        notBuilt,
+        mustJudgeMissing,
+        Optional.empty());
+  }
 
   /** Copies the lists. */
   public Review {
@@ -59,7 +86,7 @@ public record Review(
   }
 
   /** The start of that id. */
-  public java.util.Optional<ComputedStart> start(String id) {
+  public Optional<ComputedStart> start(String id) {
     return starts.stream().filter(s -> s.id().equals(id)).findFirst();
   }
 }

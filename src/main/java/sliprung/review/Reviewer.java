@@ -8,6 +8,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
 import java.util.TreeSet;
 import sliprung.machine.Identification;
@@ -44,11 +45,15 @@ public final class Reviewer {
     List<RuleBook.Answers> answers = new ArrayList<>();
     List<ComputedStart> starts = new ArrayList<>();
     Machine first = null;
+    RunUpMethod method = null;
     for (int i = 0; i < identifications.size(); i++) {
       Machine machine = machine(starter, identifications.get(i));
       first = first == null ? machine : first;
       String circuit = i == 0 ? "" : "circuit-" + (i + 1);
-      Facts facts = facts(starter, machine, identifications.get(i), circuit);
+      StartComputation.Computed computed =
+          new StartComputation(starter, machine, circuit).compute();
+      method = method == null ? computed.method() : method;
+      Facts facts = facts(starter, machine, identifications.get(i), computed);
       starts.addAll(facts.starts());
       answers.add(new RuleBook(Catalogue.rules()).ask(facts, date));
     }
@@ -62,13 +67,25 @@ public final class Reviewer {
         notApplicable(answers),
         List.copyOf(Catalogue.notBuilt().keySet()),
         List.copyOf(
-            new TreeSet<>(answers.stream().flatMap(a -> a.mustJudgeMissing().stream()).toList())));
+            new TreeSet<>(answers.stream().flatMap(a -> a.mustJudgeMissing().stream()).toList())),
+        Optional.ofNullable(method));
   }
 
   /** Computes everything that rules may look at. */
   public static Facts facts(
       Starter starter, Machine machine, Identification identification, String circuit) {
-    StartComputation.Computed computed = new StartComputation(starter, machine, circuit).compute();
+    return facts(
+        starter,
+        machine,
+        identification,
+        new StartComputation(starter, machine, circuit).compute());
+  }
+
+  private static Facts facts(
+      Starter starter,
+      Machine machine,
+      Identification identification,
+      StartComputation.Computed computed) {
     Bands bands = new Bands(starter);
     Map<String, Double> pickUps = new HashMap<>();
     for (Device device : starter.protection()) {

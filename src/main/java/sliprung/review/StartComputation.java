@@ -12,7 +12,9 @@ import sliprung.protection.ProtectionEvaluator;
 import sliprung.protection.StartProtection;
 import sliprung.rulebook.ComputedStart;
 import sliprung.runup.Conditions;
+import sliprung.runup.ModelError;
 import sliprung.runup.Scenario;
+import sliprung.runup.StartHistory;
 import sliprung.runup.StartSimulator;
 import sliprung.runup.StartSimulator.RunningPoint;
 import sliprung.starter.Duty;
@@ -45,17 +47,29 @@ final class StartComputation {
    *
    * @param starts nominal corner first; within a corner permitted starts, then faults
    * @param running the running point at each corner
+   * @param method how the starts were computed
    */
-  record Computed(List<ComputedStart> starts, Map<Corner, Optional<RunningPoint>> running) {}
+  record Computed(
+      List<ComputedStart> starts,
+      Map<Corner, Optional<RunningPoint>> running,
+      RunUpMethod method) {}
 
   private record AtCorner(
       Corner corner, Optional<RunningPoint> running, List<ComputedStart> starts) {}
 
   /** Corners share nothing, so both cores work on them; the order stays that of the corners. */
   Computed compute() {
+    Map<Corner, Conditions> conditions = Corners.of(starter);
+    Conditions nominal = conditions.get(Corner.NOMINAL);
+    RunUpMethod method =
+        RunUpMethod.choose(
+            starter.method(),
+            ModelError.between(
+                simulator.run(Scenario.PERMITTED, nominal),
+                simulator.runTransient(Scenario.PERMITTED, nominal)));
     List<AtCorner> corners =
-        Corners.of(starter).entrySet().stream().toList().parallelStream()
-            .map(e -> at(e.getKey(), e.getValue()))
+        conditions.entrySet().stream().toList().parallelStream()
+            .map(e -> at(e.getKey(), e.getValue(), method))
             .toList();
     List<ComputedStart> starts = new ArrayList<>();
     Map<Corner, Optional<RunningPoint>> running = new LinkedHashMap<>();
@@ -63,10 +77,31 @@ final class StartComputation {
       starts.addAll(at.starts());
       running.put(at.corner(), at.running());
     }
-    return new Computed(starts, running);
+    return new Computed(starts, running, method);
   }
 
-  private AtCorner at(Corner corner, Conditions conditions) {
+  /**
+   * The history of a start. Peaks are computed for every permitted start and for the faults of the
+   * nominal corner; where the two methods disagree on how a permitted start ends, the transient
+   * stands.
+   */
+  private StartHistory history(
+      Scenario scenario, Corner corner, Conditions conditions, RunUpMethod method) {
+    if (method.isTransient()) {
+      return simulator.runTransient(scenario, conditions);
+    }
+    StartHistory steady = simulator.run(scenario, conditions);
+    if (scenario.isFault() && !corner.isNominal()) {
+      return steady;
+    }
+    StartHistory withTransient = simulator.runTransient(scenario, conditions);
+    boolean disagree = !scenario.isFault() && steady.outcome() != withTransient.outcome();
+    return disagree && starter.method() == Starter.Method.AUTO
+        ? withTransient
+        : steady.withPeaksOf(withTransient);
+  }
+
+  private AtCorner at(Corner corner, Conditions conditions, RunUpMethod method) {
     Optional<RunningPoint> running = simulator.runningPoint(conditions);
     // A motor that cannot carry its load at this corner is found by trip/running; what it was warm
     // from before is then its rated current.
@@ -76,7 +111,8 @@ final class StartComputation {
     Duty duty = starter.duty();
 
     List<ComputedStart> starts = new ArrayList<>();
-    StartProtection permitted = evaluator.over(simulator.run(Scenario.PERMITTED, conditions));
+    StartProtection permitted =
+        evaluator.over(history(Scenario.PERMITTED, corner, conditions, method));
     for (int n = 1; n <= duty.coldStarts(); n++) {
       starts.add(
           permitted(
@@ -93,7 +129,7 @@ final class StartComputation {
     DevicePreload forgotten = DevicePreload.remembered(stator, ring);
     PartPreload hot = new PartPreload(stator, ring, 0.0, sections);
     for (Scenario fault : faults()) {
-      StartProtection history = evaluator.over(simulator.run(fault, conditions));
+      StartProtection history = evaluator.over(history(fault, corner, conditions, method));
       starts.add(
           fault(corner, history, ComputedStart.From.COLD, DevicePreload.COLD, PartPreload.COLD));
       starts.add(fault(corner, history, ComputedStart.From.HOT, forgotten, hot));

@@ -4,8 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalInt;
-import java.util.function.DoubleUnaryOperator;
-import sliprung.machine.OperatingPoint;
+import sliprung.machine.Machine;
 import sliprung.starter.ResistorBank;
 import sliprung.starter.Starter;
 import sliprung.starter.Step;
@@ -107,20 +106,17 @@ final class Sequence {
     return next + 1;
   }
 
-  /** What is measured minus the level, as a function of speed: the level is met at 0 and below. */
-  DoubleUnaryOperator aboveLevel(Circumstance circumstance) {
+  /** What is measured minus the level: the level is met at 0 and below. */
+  Level aboveLevel(Machine machine) {
     Step.ClosingRule rule = current().rule();
     if (rule instanceof Step.RotorFrequencyBelow below) {
       double level = below.hertz() * conditions.levelFactor();
-      return w -> Math.abs(circumstance.machine().slip(w)) * frequency - level;
+      return Level.ofSpeed(w -> Math.abs(machine.slip(w)) * frequency - level);
     }
     boolean stator = rule instanceof Step.StatorBelow;
     double amps = stator ? ((Step.StatorBelow) rule).amps() : ((Step.RotorBelow) rule).amps();
     double level = amps * conditions.levelFactor();
-    return w -> {
-      OperatingPoint point = circumstance.at(w);
-      return (stator ? point.statorAmps() : point.ringAmps()) - level;
-    };
+    return (speed, statorAmps, ringAmps) -> (stator ? statorAmps : ringAmps) - level;
   }
 
   /** The level is met now. */

@@ -35,6 +35,30 @@ public record StartHistory(
     stages = List.copyOf(stages);
   }
 
+  /**
+   * This history with the peaks of another computation of the same start: of each stage in turn, as
+   * long as the same contactors closed.
+   */
+  public StartHistory withPeaksOf(StartHistory other) {
+    java.util.ArrayList<Stage> with = new java.util.ArrayList<>(stages);
+    for (int i = 0; i < Math.min(stages.size(), other.stages.size()); i++) {
+      Stage theirs = other.stages.get(i);
+      if (!theirs.closedBy().equals(stages.get(i).closedBy())) {
+        break;
+      }
+      with.set(i, stages.get(i).with(theirs.peak()));
+    }
+    return new StartHistory(
+        scenario,
+        conditions,
+        outcome,
+        with,
+        running,
+        lastClosingSeconds,
+        runUpSeconds,
+        levelNeverReached);
+  }
+
   /** Every stage with its samples, the running after the start included. */
   public List<Stage> everything() {
     if (running.isEmpty()) {

@@ -3,47 +3,42 @@ package sliprung.runup;
 import java.util.Arrays;
 import sliprung.machine.OperatingPoint;
 
-/** Gathers the pieces of motion of one stage into a trace. */
+/** Gathers the samples of one stage into a trace. */
 final class TraceBuilder {
-  private final Circumstance circumstance;
   private double[] seconds = new double[64];
   private double[][] rows = new double[7][64];
   private int count;
-
-  TraceBuilder(Circumstance circumstance) {
-    this.circumstance = circumstance;
-  }
 
   boolean isEmpty() {
     return count == 0;
   }
 
-  /** Appends motion; a piece without duration adds nothing. */
-  void add(Circumstance.Motion motion) {
-    if (motion.endTime() <= motion.times()[0]) {
-      return;
-    }
-    for (int i = count == 0 ? 0 : 1; i < motion.times().length; i++) {
-      append(motion.times()[i], motion.speeds()[i]);
-    }
+  /** A sample of the steady circuit at a speed. */
+  void append(double time, double speed, Circumstance circumstance) {
+    OperatingPoint point = circumstance.at(speed);
+    append(
+        time,
+        speed,
+        point.statorAmps(),
+        point.ringAmps(),
+        point.torque(),
+        circumstance.loadTorque().applyAsDouble(speed),
+        point.terminalVolts(),
+        point.inputWatts());
   }
 
-  private void append(double time, double speed) {
+  /** A sample: time and then the columns of the trace. */
+  void append(double time, double... columns) {
     if (count == seconds.length) {
       seconds = Arrays.copyOf(seconds, 2 * count);
       for (int r = 0; r < rows.length; r++) {
         rows[r] = Arrays.copyOf(rows[r], 2 * count);
       }
     }
-    OperatingPoint point = circumstance.at(speed);
     seconds[count] = time;
-    rows[0][count] = speed;
-    rows[1][count] = point.statorAmps();
-    rows[2][count] = point.ringAmps();
-    rows[3][count] = point.torque();
-    rows[4][count] = circumstance.loadTorque().applyAsDouble(speed);
-    rows[5][count] = point.terminalVolts();
-    rows[6][count] = point.inputWatts();
+    for (int r = 0; r < rows.length; r++) {
+      rows[r][count] = columns[r];
+    }
     count++;
   }
 

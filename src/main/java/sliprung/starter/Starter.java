@@ -1,6 +1,7 @@
 package sliprung.starter;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -34,6 +35,7 @@ import java.util.TreeMap;
  * @param accepted deviations someone answers for
  * @param assumptions defaults that were filled in
  * @param notYetJudged keys that were read and are kept for rules not built yet
+ * @param method how starts are computed
  */
 public record Starter(
     String name,
@@ -60,7 +62,8 @@ public record Starter(
     Map<String, EvidenceGrade> evidence,
     List<AcceptedDeviation> accepted,
     List<Assumption> assumptions,
-    List<String> notYetJudged) {
+    List<String> notYetJudged,
+    Method method) {
 
   /** The rule book a starter is held against. */
   public enum Practice {
@@ -74,6 +77,77 @@ public record Starter(
     CHAINED,
     /** A step's timer starts when the timer before has elapsed. */
     CASCADED
+  }
+
+  /** How starts are computed. */
+  public enum Method {
+    /** Currents and torque follow the speed at once. */
+    STEADY,
+    /** With the electrical transient of every closing. */
+    TRANSIENT,
+    /** Steady where that is accurate enough for this starter. */
+    AUTO;
+
+    /** As written in files and records. */
+    public String word() {
+      return name().toLowerCase(Locale.ROOT);
+    }
+  }
+
+  /** A starter whose method is left to the review. */
+  public Starter(
+      String name,
+      Practice practice,
+      Supply supply,
+      Motor motor,
+      Load load,
+      ResistorBank resistors,
+      List<Step> steps,
+      Sequence sequence,
+      double timerSpread,
+      double levelSpread,
+      List<Contactor> contactors,
+      List<Breaker> breakers,
+      List<Device> protection,
+      Optional<Conductor> statorConductor,
+      Optional<Conductor> rotorConductor,
+      Duty duty,
+      Limits limits,
+      Map<String, Double> margins,
+      double fuseWear,
+      Interlocks interlocks,
+      Ambient ambient,
+      Map<String, EvidenceGrade> evidence,
+      List<AcceptedDeviation> accepted,
+      List<Assumption> assumptions,
+      List<String> notYetJudged) {
+    this(
+        name,
+        practice,
+        supply,
+        motor,
+        load,
+        resistors,
+        steps,
+        sequence,
+        timerSpread,
+        levelSpread,
+        contactors,
+        breakers,
+        protection,
+        statorConductor,
+        rotorConductor,
+        duty,
+        limits,
+        margins,
+        fuseWear,
+        interlocks,
+        ambient,
+        evidence,
+        accepted,
+        assumptions,
+        notYetJudged,
+        Method.AUTO);
   }
 
   /** Copies the collections and checks that each section has its step. */

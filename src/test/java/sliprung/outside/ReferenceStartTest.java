@@ -187,8 +187,7 @@ class ReferenceStartTest {
     return each(
         "preload",
         (c, expected) -> {
-          StartSimulator simulator =
-              new StartSimulator(c.review().starter(), c.review().machine());
+          StartSimulator simulator = new StartSimulator(c.review().starter(), c.review().machine());
           double amps =
               simulator
                   .runningPoint(Corners.conditions(c.review().starter(), Corner.NOMINAL))

@@ -19,7 +19,8 @@ class AcceptedDeviationTest {
     return StarterText.sound()
         .line(
             "F5:",
-            StarterText.text("F5: {kind: sequence-timer, time: %s s, until: last-step, trips: K1}", seconds));
+            StarterText.text(
+                "F5: {kind: sequence-timer, time: %s s, until: last-step, trips: K1}", seconds));
   }
 
   /** The timer breaches trip/start and sequence/supervision alike; both are accepted, or one. */
@@ -59,8 +60,7 @@ class AcceptedDeviationTest {
   @Test
   void a_tight_margin_may_be_accepted_too() {
     assertThat(timer(6.3).finding("trip/start", "F5").verdict()).isEqualTo(Verdict.TIGHT);
-    assertThat(
-            accepting(6.3, "F5", "1.0", DAY.plusYears(1)).finding("trip/start", "F5").verdict())
+    assertThat(accepting(6.3, "F5", "1.0", DAY.plusYears(1)).finding("trip/start", "F5").verdict())
         .isEqualTo(Verdict.ACCEPTED);
   }
 
@@ -128,8 +128,7 @@ class AcceptedDeviationTest {
                 "accepted:\n  - {rule: locked/sequence, subject: sequence, not-below: 0, reason:"
                     + " unknown, by: plant manager, until: 2030-01-01}");
 
-    assertThat(text.finding("locked/sequence", "sequence").verdict())
-        .isEqualTo(Verdict.NOT_JUDGED);
+    assertThat(text.finding("locked/sequence", "sequence").verdict()).isEqualTo(Verdict.NOT_JUDGED);
     assertThat(text.review().mustJudgeMissing()).contains("locked/sequence");
     assertThat(text.review().exitStatus()).isEqualTo(4);
   }

@@ -254,7 +254,10 @@ class ReviewTest {
   @Test
   void an_open_breakdown_torque_is_run_at_both_ends() {
     StarterText plate =
-        SOUND.without("circuit:").without("breakdown-torque:").with("starter: two-steps", "starter: open");
+        SOUND
+            .without("circuit:")
+            .without("breakdown-torque:")
+            .with("starter: two-steps", "starter: open");
     Review review = plate.review();
 
     assertThat(review.starts().stream().map(ComputedStart::circuit).distinct().count())

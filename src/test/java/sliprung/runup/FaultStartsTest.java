@@ -21,8 +21,7 @@ import sliprung.tolerance.Corners;
 /** Starts and failed starts as wired, on a starter of two steps without any spread. */
 class FaultStartsTest {
   private static final StarterText SMALL = StarterText.small();
-  private static final StarterText CASCADED =
-      SMALL.with("sequence: chained", "sequence: cascaded");
+  private static final StarterText CASCADED = SMALL.with("sequence: chained", "sequence: cascaded");
   private static final StarterText BRIDGING =
       CASCADED.with("cut-out: star-point", "cut-out: bridging");
 
@@ -142,7 +141,8 @@ class FaultStartsTest {
   @Test
   void a_level_already_met_closes_once_the_current_has_built_up() {
     StarterText met =
-        SMALL.with("{contactor: K12, after: 2 s}", "{contactor: K12, rotor-frequency-below: 45 Hz}");
+        SMALL.with(
+            "{contactor: K12, after: 2 s}", "{contactor: K12, rotor-frequency-below: 45 Hz}");
     begins(run(met, Scenario.PERMITTED), 0.0, 4.05, 4.05 + 0.1 + 0.05);
 
     StarterText dwelling =
@@ -220,7 +220,9 @@ class FaultStartsTest {
     assertThat(history.runUpSeconds()).isEmpty();
   }
 
-  /** 720 N·m is more than step 1 gives at any speed: the motor turns, is loaded and comes to rest. */
+  /**
+   * 720 N·m is more than step 1 gives at any speed: the motor turns, is loaded and comes to rest.
+   */
   @Test
   void a_load_that_is_too_much_for_a_held_step_stops_the_rotor() {
     StartHistory history =
@@ -326,15 +328,18 @@ class FaultStartsTest {
   void a_locked_rotor_passes_time_closed_steps_and_waits_for_frequencies() {
     begins(run(SMALL, fault(Scenario.Kind.LOCKED, 0)), 0.0, 4.05, 6.10);
     StarterText frequency =
-        SMALL.with("{contactor: K12, after: 2 s}", "{contactor: K12, rotor-frequency-below: 20 Hz}");
+        SMALL.with(
+            "{contactor: K12, after: 2 s}", "{contactor: K12, rotor-frequency-below: 20 Hz}");
     begins(run(frequency, fault(Scenario.Kind.LOCKED, 0)), 0.0, 4.05);
   }
 
   /** 195 A in the rings at rest on step 1: a level of 200 A is met, one of 190 A is not. */
   @Test
   void a_locked_rotor_passes_a_current_level_that_it_already_meets() {
-    StarterText low = SMALL.with("{contactor: K11, after: 4 s}", "{contactor: K11, rotor-below: 190 A}");
-    StarterText high = SMALL.with("{contactor: K11, after: 4 s}", "{contactor: K11, rotor-below: 200 A}");
+    StarterText low =
+        SMALL.with("{contactor: K11, after: 4 s}", "{contactor: K11, rotor-below: 190 A}");
+    StarterText high =
+        SMALL.with("{contactor: K11, after: 4 s}", "{contactor: K11, rotor-below: 200 A}");
 
     begins(run(low, fault(Scenario.Kind.LOCKED, 0)), 0.0);
     begins(run(high, fault(Scenario.Kind.LOCKED, 0)), 0.0, 0.15, 2.20);
@@ -352,8 +357,7 @@ class FaultStartsTest {
   /** Leads and permanent resistance are what is left of the circuit. */
   @Test
   void leads_and_permanent_resistance_stay_whatever_closes() {
-    StarterText text =
-        SMALL.under("resistors:", "  permanent: 0.010 ohm\n  leads: 0.004 ohm");
+    StarterText text = SMALL.under("resistors:", "  permanent: 0.010 ohm\n  leads: 0.004 ohm");
     for (Scenario scenario : List.of(Scenario.PERMITTED, fault(Scenario.Kind.RINGS_SHORTED, 0))) {
       assertThat(last(run(text, scenario)).externalOhms()).isCloseTo(0.014, within(1e-12));
     }
@@ -396,8 +400,7 @@ class FaultStartsTest {
 
     Machine machine = machine(weak);
     for (int i = 0; i < t.size(); i += 40) {
-      OperatingPoint point =
-          machine.at(new Source(400.0, x), 0.85, machine.slip(t.speed()[i]));
+      OperatingPoint point = machine.at(new Source(400.0, x), 0.85, machine.slip(t.speed()[i]));
       double drop = x * t.statorAmps()[i];
       double volts = t.terminalVolts()[i] / Math.sqrt(3.0);
       double sin = Math.sqrt(1.0 - point.powerFactor() * point.powerFactor());

@@ -1,6 +1,7 @@
 package sliprung.rulebook.contactor;
 
 import java.util.Optional;
+import sliprung.machine.OperatingPoint;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Exposure;
 import sliprung.rulebook.Facts;
@@ -63,34 +64,37 @@ record GreatestStatorCurrent(double amps, double powerFactor, ComputedStart star
             ? Exposure.of(facts, start).clearedAtSeconds()
             : Double.POSITIVE_INFINITY;
     Stage stage = null;
-    int sample = 0;
-    double amps = -1.0;
+    OperatingPoint greatest = null;
     for (Stage candidate : start.history().everything()) {
       Trace trace = candidate.trace();
       for (int i = 0; i < trace.size(); i++) {
         boolean beyond = (i == 0 ? candidate.fromSeconds() : trace.seconds()[i - 1]) > end;
-        if (!beyond && trace.statorAmps()[i] > amps) {
-          amps = trace.statorAmps()[i];
+        if (beyond) {
+          break;
+        }
+        // capacities are RMS figures: without the offset that samples of a transient hold
+        OperatingPoint point =
+            facts
+                .machine()
+                .at(
+                    start.history().conditions().source(),
+                    candidate.externalOhms(),
+                    facts.machine().slip(trace.speed()[i]));
+        if (greatest == null || point.statorAmps() > greatest.statorAmps()) {
+          greatest = point;
           stage = candidate;
-          sample = i;
         }
       }
     }
-    if (stage == null) {
+    if (greatest == null) {
       return Optional.empty();
     }
-    double slip = facts.machine().slip(stage.trace().speed()[sample]);
-    double powerFactor =
-        facts
-            .machine()
-            .at(start.history().conditions().source(), stage.externalOhms(), slip)
-            .powerFactor();
     boolean isRunning =
         start.history().running().isPresent() && stage == start.history().running().get();
     return Optional.of(
         new GreatestStatorCurrent(
-            amps,
-            powerFactor,
+            greatest.statorAmps(),
+            greatest.powerFactor(),
             start,
             isRunning ? "running" : start.words() + ", on step " + stage.step()));
   }

@@ -63,7 +63,16 @@ final class RotorContactorOpened {
     Greatest greatest = null;
     for (ComputedStart start : facts.starts()) {
       for (Stage stage : start.history().everything()) {
-        for (double amps : stage.trace().ringAmps()) {
+        for (double speed : stage.trace().speed()) {
+          // an RMS figure: without the offset that samples of a transient hold
+          double amps =
+              facts
+                  .machine()
+                  .at(
+                      start.history().conditions().source(),
+                      stage.externalOhms(),
+                      facts.machine().slip(speed))
+                  .ringAmps();
           if (greatest == null || amps > greatest.ringAmps()) {
             greatest = new Greatest(amps, start);
           }

@@ -54,7 +54,7 @@ public final class TheRotorBreaksAway implements Rule {
     double needed = 0.0;
     for (ComputedStart start :
         facts.faultsOnStep(1, k -> k == Scenario.Kind.LOCKED_STEP).toList()) {
-      double torque = start.history().stages().get(0).trace().torque()[0];
+      double torque = start.history().stages().get(0).entry().torque();
       double need = breakaway * start.history().conditions().loadFactor();
       if (torque / need < least) {
         least = torque / need;
@@ -63,7 +63,7 @@ public final class TheRotorBreaksAway implements Rule {
         needed = need;
       }
     }
-    double amps = worst.history().stages().get(0).trace().statorAmps()[0];
+    double amps = worst.history().stages().get(0).entry().statorAmps();
     return new Answer.Findings(
         List.of(
             FindingBuilder.of(facts, INFO, "step 1")

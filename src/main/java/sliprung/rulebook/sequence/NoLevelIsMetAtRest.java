@@ -67,7 +67,7 @@ public final class NoLevelIsMetAtRest implements Rule {
       double amps =
           stage == null
               ? standing(facts, start, step, stator)
-              : stator ? stage.trace().statorAmps()[0] : stage.trace().ringAmps()[0];
+              : stator ? stage.entry().statorAmps() : stage.entry().ringAmps();
       double level =
           EveryStepPullsThrough.levelOf(rule) * start.history().conditions().levelFactor();
       if (amps / level < least) {

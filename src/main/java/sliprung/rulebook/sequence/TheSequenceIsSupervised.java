@@ -218,7 +218,9 @@ public final class TheSequenceIsSupervised implements Rule {
         .toList();
   }
 
-  /** The timer elapses, but what it opens does not end the start, or nothing proves that it does. */
+  /**
+   * The timer elapses, but what it opens does not end the start, or nothing proves that it does.
+   */
   private static Finding clearsNothing(
       FindingBuilder builder,
       Facts facts,

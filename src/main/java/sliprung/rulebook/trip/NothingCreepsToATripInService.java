@@ -59,7 +59,8 @@ public final class NothingCreepsToATripInService implements Rule {
       if (pickUp != null) {
         findings.add(judge(facts, device, pickUp));
       } else {
-        // Unknown is not the same as none: a class without a shortest time has a pick-up that nobody
+        // Unknown is not the same as none: a class without a shortest time has a pick-up that
+        // nobody
         // pins.
         facts
             .bands()

@@ -23,7 +23,8 @@ class HeldStepTest {
   private static StarterText timer(double seconds) {
     return SMALL.line(
         "F5:",
-        StarterText.text("F5: {kind: sequence-timer, time: %s s, until: last-step, trips: K1}", seconds));
+        StarterText.text(
+            "F5: {kind: sequence-timer, time: %s s, until: last-step, trips: K1}", seconds));
   }
 
   private static StarterText dial(double amps) {
@@ -165,7 +166,8 @@ class HeldStepTest {
   @Test
   void seen_at_heavy_load_alone_is_blind() {
     double held = SMALL.finding(BLIND, "step 1").value().orElseThrow();
-    StarterText spread = dial(held / 1.20 * 0.95).with("spread: [0 %, 0 %]", "spread: [-30 %, 0 %]");
+    StarterText spread =
+        dial(held / 1.20 * 0.95).with("spread: [0 %, 0 %]", "spread: [-30 %, 0 %]");
 
     assertThat(spread.finding(BLIND, "step 1").verdict()).isEqualTo(Verdict.BREACH);
     assertThat(spread.finding(BLIND, "step 1").value().orElseThrow()).isLessThan(held);

@@ -40,7 +40,8 @@ class OpensWhatTest {
 
   @Test
   void a_step_contactor_clears_nothing() {
-    Finding finding = SMALL.with("dial: 104 A, trips: K1", "dial: 104 A, trips: K11").finding(RULE, "F2");
+    Finding finding =
+        SMALL.with("dial: 104 A, trips: K1", "dial: 104 A, trips: K11").finding(RULE, "F2");
 
     assertThat(finding.verdict()).isEqualTo(Verdict.BREACH);
     assertThat(finding.margin().orElseThrow()).isZero();
@@ -78,8 +79,7 @@ class OpensWhatTest {
     Finding alone = SMALL.finding(RULE, "F2");
     assertThat(alone.start().orElseThrow().scenario().id()).isEqualTo("locked");
     StarterText fast =
-        SMALL.under(
-            "F2:", "  F3: {kind: definite-time, pick-up: 300 A, time: 0 s, trips: Q1}");
+        SMALL.under("F2:", "  F3: {kind: definite-time, pick-up: 300 A, time: 0 s, trips: Q1}");
 
     assertThat(fast.review().findings())
         .anyMatch(f -> f.rule().equals(RULE) && f.subject().equals("F3"))

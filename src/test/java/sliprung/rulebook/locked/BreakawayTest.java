@@ -49,8 +49,7 @@ class BreakawayTest {
         starter.resistors().sections().stream().mapToDouble(s -> s.ohms()).sum() * 1.1 * 1.2;
     Source source = new Source(0.9 * 690.0, 690.0 / Math.sqrt(3.0) / 9000.0);
     double torque = crusher.review().machine().torque(source, ohms, 1.0);
-    assertThat(finding.margin().orElseThrow())
-        .isCloseTo(torque / (700.0 * 1.2), within(1e-9));
+    assertThat(finding.margin().orElseThrow()).isCloseTo(torque / (700.0 * 1.2), within(1e-9));
   }
 
   @Test
@@ -75,10 +74,7 @@ class BreakawayTest {
 
   @Test
   void a_load_without_torque_at_rest_is_no_subject() {
-    StarterText fan =
-        SMALL
-            .without("breakaway:")
-            .line("torque: {0", "torque: {square: 250 N·m}");
+    StarterText fan = SMALL.without("breakaway:").line("torque: {0", "torque: {square: 250 N·m}");
 
     assertThat(fan.review().notApplicable()).anyMatch(n -> n.rule().equals(RULE));
   }

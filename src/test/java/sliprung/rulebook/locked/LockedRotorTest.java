@@ -66,7 +66,8 @@ class LockedRotorTest {
   @Test
   void a_timer_on_the_last_step_sees_a_sequence_that_a_frequency_stops() {
     StarterText frequency =
-        SMALL.with("{contactor: K12, after: 2 s}", "{contactor: K12, rotor-frequency-below: 12 Hz}");
+        SMALL.with(
+            "{contactor: K12, after: 2 s}", "{contactor: K12, rotor-frequency-below: 12 Hz}");
     Finding finding = frequency.finding("locked/sequence", "sequence");
 
     assertThat(finding.value().orElseThrow()).isCloseTo(9.05, within(1e-6));
@@ -103,7 +104,9 @@ class LockedRotorTest {
   void a_missing_limit_is_named_and_never_passes(
       String rule, String subject, String piece, String path) {
     Finding finding =
-        SENSOR.with(piece, piece.contains("same-limit") ? "  same-limit: false" : "").finding(rule, subject);
+        SENSOR
+            .with(piece, piece.contains("same-limit") ? "  same-limit: false" : "")
+            .finding(rule, subject);
 
     assertThat(finding.verdict()).isEqualTo(Verdict.NOT_JUDGED);
     assertThat(finding.missing()).anyMatch(m -> m.startsWith(path));

@@ -86,7 +86,9 @@ class SectionsInStartsTest {
   @Test
   void ratings_that_contradict_each_other_are_not_judged() {
     Finding finding =
-        SMALL.with("current: 200 A, time: 20 s", "current: 50 A, time: 5 s").finding(RULE, "section 1");
+        SMALL
+            .with("current: 200 A, time: 20 s", "current: 50 A, time: 5 s")
+            .finding(RULE, "section 1");
 
     assertThat(finding.verdict()).isEqualTo(Verdict.NOT_JUDGED);
     assertThat(finding.missing()).containsExactly("resistors.sections[1].short-time");

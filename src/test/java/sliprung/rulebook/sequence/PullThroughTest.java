@@ -55,9 +55,7 @@ class PullThroughTest {
     Judged load = Judged.over(THROUGH, "start", PullThroughTest::constantLoad);
     double limit = load.limit(1000.0, 300.0);
 
-    assertThat(limit)
-        .isGreaterThan(400.0)
-        .isLessThan(machine.breakdownTorque(source));
+    assertThat(limit).isGreaterThan(400.0).isLessThan(machine.breakdownTorque(source));
     load.turns(limit, Verdict.CLEAR, Verdict.BREACH);
   }
 
@@ -82,7 +80,9 @@ class PullThroughTest {
             "start",
             torque ->
                 SMALL.line(
-                    "torque: {0", StarterText.text("torque: {0 %%: 80 N·m, 60 %%: 80 N·m, 80 %%: %s N·m}", torque)));
+                    "torque: {0",
+                    StarterText.text(
+                        "torque: {0 %%: 80 N·m, 60 %%: 80 N·m, 80 %%: %s N·m}", torque)));
 
     assertThat(rising.verdict(0.9 * breakdown)).isEqualTo(Verdict.CLEAR);
     Finding hangs = rising.at(1.1 * breakdown);
@@ -146,8 +146,7 @@ class PullThroughTest {
         level("rotor-below", 70.0, "A")
             .with("{contactor: K12, after: 2 s}", "{contactor: K12, rotor-below: 70 A}");
     Finding second = both.finding(FALSE_CLOSE, "step 2");
-    Stage standing =
-        SMALL.review().start("locked-2").orElseThrow().history().stages().get(1);
+    Stage standing = SMALL.review().start("locked-2").orElseThrow().history().stages().get(1);
 
     assertThat(second.value().orElseThrow())
         .isCloseTo(standing.trace().ringAmps()[0], within(1e-9));

@@ -25,7 +25,8 @@ class SupervisionTest {
   private static StarterText timer(double seconds) {
     return STRONG.line(
         "F5:",
-        StarterText.text("F5: {kind: sequence-timer, time: %s s, until: last-step, trips: K1}", seconds));
+        StarterText.text(
+            "F5: {kind: sequence-timer, time: %s s, until: last-step, trips: K1}", seconds));
   }
 
   /** The stop event comes at 6.10 s; the timer's spread takes the rest. */
@@ -38,7 +39,8 @@ class SupervisionTest {
     Judged.over(
             RULE,
             "F5",
-            s -> timer(s).with("timer-spread: 0 %", StarterText.text("timer-spread: %s %%", spread)))
+            s ->
+                timer(s).with("timer-spread: 0 %", StarterText.text("timer-spread: %s %%", spread)))
         .turns(stop / shortest, Verdict.BREACH, Verdict.TIGHT)
         .turns(1.10 * stop / shortest, Verdict.TIGHT, Verdict.CLEAR);
   }

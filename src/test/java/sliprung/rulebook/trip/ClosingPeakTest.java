@@ -51,8 +51,7 @@ class ClosingPeakTest {
 
   @Test
   void the_limit_found_by_halving_is_the_same() {
-    double limit =
-        Judged.over(RULE, "F4", amps -> instantaneous("rms", amps)).limit(200.0, 600.0);
+    double limit = Judged.over(RULE, "F4", amps -> instantaneous("rms", amps)).limit(200.0, 600.0);
 
     assertThat(limit / (greatestSteadyAmps() * 1.20 / 0.96)).isBetween(0.999, 1.001);
   }

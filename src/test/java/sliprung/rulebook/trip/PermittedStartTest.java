@@ -24,7 +24,8 @@ class PermittedStartTest {
   private static StarterText timer(double seconds) {
     return SMALL.line(
         "F5:",
-        StarterText.text("F5: {kind: sequence-timer, time: %s s, until: last-step, trips: K1}", seconds));
+        StarterText.text(
+            "F5: {kind: sequence-timer, time: %s s, until: last-step, trips: K1}", seconds));
   }
 
   private static StarterText inverse(double multiplier) {
@@ -73,7 +74,11 @@ class PermittedStartTest {
         Judged.over(
             RULE,
             "F2",
-            amps -> SMALL.line("F2:", StarterText.text("F2: {kind: overload, class: 10, dial: %s A, trips: K1}", amps)));
+            amps ->
+                SMALL.line(
+                    "F2:",
+                    StarterText.text(
+                        "F2: {kind: overload, class: 10, dial: %s A, trips: K1}", amps)));
     double limit = relay.limit(40.0, 104.0);
 
     relay.turns(limit, Verdict.BREACH, Verdict.TIGHT);
@@ -87,7 +92,8 @@ class PermittedStartTest {
   @Test
   void the_margin_grows_with_dial_and_class() {
     double before = 0.0;
-    for (String relay : List.of("10, dial: 90 A", "10, dial: 104 A", "20, dial: 104 A", "30, dial: 104 A")) {
+    for (String relay :
+        List.of("10, dial: 90 A", "10, dial: 104 A", "20, dial: 104 A", "30, dial: 104 A")) {
       double margin =
           SMALL
               .line("F2:", "F2: {kind: overload, class: " + relay + ", trips: K1}")
@@ -116,7 +122,11 @@ class PermittedStartTest {
         Judged.over(
             RULE,
             "F2",
-            amps -> SMALL.line("F2:", StarterText.text("F2: {kind: overload, class: 10, dial: %s A, trips: K1}", amps)));
+            amps ->
+                SMALL.line(
+                    "F2:",
+                    StarterText.text(
+                        "F2: {kind: overload, class: 10, dial: %s A, trips: K1}", amps)));
     double dial = relay.limit(40.0, 104.0);
     Finding finding = relay.at(dial);
     while (finding.margin().orElseThrow() < 1.15) {
