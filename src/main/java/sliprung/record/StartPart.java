@@ -1,14 +1,10 @@
 package sliprung.record;
 
-import java.util.List;
 import java.util.Optional;
-import sliprung.quantity.Show;
 import sliprung.review.Review;
 import sliprung.rulebook.ComputedStart;
-import sliprung.runup.Stage;
-import sliprung.runup.Trace;
 
-/** The start itself: over time and stage by stage. */
+/** The start itself over time. */
 final class StartPart {
   private StartPart() {}
 
@@ -17,36 +13,8 @@ final class StartPart {
     if (cold.isEmpty()) {
       return;
     }
-    page.open("section").markup("\n");
-    page.element("h2", "The start");
-    pictures.start().ifPresent(p -> ReviewHtml.figure(page, p));
-    stages(page, cold.get());
+    page.section("start", "The start");
+    pictures.start().ifPresent(p -> ReviewLayout.figure(page, p));
     page.end();
-  }
-
-  private static void stages(Html page, ComputedStart start) {
-    Cells cells =
-        new Cells(page)
-            .open(
-                "Stages of the nominal cold start: each quantity just after the closing that begins"
-                    + " the stage, and at its end",
-                List.of(
-                    "step", "closed by", "#from", "#to", "#speed", "#stator", "#ring", "#torque"));
-    List<Stage> stages = start.history().stages();
-    for (Stage stage : stages) {
-      boolean last = stage == stages.get(stages.size() - 1);
-      Trace trace = stage.trace();
-      int end = trace.last();
-      cells.row(
-          Integer.toString(stage.step()),
-          stage.closedBy(),
-          Show.seconds(stage.fromSeconds()),
-          last && stage.settled() ? "settled" : Show.seconds(stage.toSeconds()),
-          Show.rpm(trace.speed()[0]) + " → " + Show.rpm(trace.speed()[end]),
-          Show.amps(trace.statorAmps()[0]) + " → " + Show.amps(trace.statorAmps()[end]),
-          Show.amps(trace.ringAmps()[0]) + " → " + Show.amps(trace.ringAmps()[end]),
-          Show.torque(trace.torque()[0]) + " → " + Show.torque(trace.torque()[end]));
-    }
-    cells.close();
   }
 }
