@@ -4,19 +4,17 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.DoubleStream;
-import sliprung.protection.Bands;
 import sliprung.review.PartText;
 import sliprung.review.Review;
+import sliprung.review.ReviewFacts;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Exposures;
 import sliprung.rulebook.Facts;
-import sliprung.rulebook.Practice;
 import sliprung.runup.Scenario;
 
 /**
@@ -42,16 +40,7 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
 
   /** Of a review: one row for each kind of fault and step that was computed. */
   public static FirstLimitChart of(Review review) {
-    Facts facts =
-        new Facts(
-            review.starter(),
-            Practice.named(review.starter().practice().name().toLowerCase(Locale.ROOT)),
-            review.machine(),
-            review.identification(),
-            review.starts(),
-            Map.of(),
-            Map.of(),
-            new Bands(review.starter()));
+    Facts facts = ReviewFacts.of(review);
     Map<String, List<ComputedStart>> faults = new LinkedHashMap<>();
     Set<String> without = new TreeSet<>();
     for (ComputedStart start : review.starts()) {

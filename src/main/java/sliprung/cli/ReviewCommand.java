@@ -16,6 +16,8 @@ import sliprung.chart.StatorBands;
 import sliprung.config.CurveLibraryReader;
 import sliprung.config.StarterReader;
 import sliprung.config.StarterReading;
+import sliprung.record.AsRead;
+import sliprung.record.Dossier;
 import sliprung.record.InputFile;
 import sliprung.record.RecordWriter;
 import sliprung.review.Review;
@@ -56,7 +58,21 @@ final class ReviewCommand implements Callable<Integer> {
     this.terminal = terminal;
   }
 
-  private record Done(Path file, Review review, List<InputFile> inputs, double seconds) {}
+  private record Done(
+      Path file, Review review, StarterReading.Described described, double seconds) {
+    Dossier dossier() {
+      return new Dossier(
+          review,
+          described.inputs().stream()
+              .map(f -> new InputFile(base(f.name()), f.sha256(), f.text()))
+              .toList(),
+          described.values().stream()
+              .map(v -> new AsRead(v.path(), v.text(), v.value(), v.unit()))
+              .toList(),
+          StatorBands.of(review.starter()),
+          ProgramVersion.text());
+    }
+  }
 
   @Override
   public Integer call() {
@@ -70,11 +86,7 @@ final class ReviewCommand implements Callable<Integer> {
       long from = System.nanoTime();
       Review review = Reviewer.review(read.get(i).starter(), on);
       double seconds = (System.nanoTime() - from) / 1e9;
-      List<InputFile> inputs =
-          read.get(i).inputs().stream()
-              .map(f -> new InputFile(base(f.name()), f.sha256(), f.text()))
-              .toList();
-      done.add(new Done(files.get(i), review, inputs, seconds));
+      done.add(new Done(files.get(i), review, read.get(i), seconds));
     }
     Summary summary = new Summary(out, terminal, everything);
     int status = ExitStatus.CLEAR;
@@ -83,13 +95,7 @@ final class ReviewCommand implements Callable<Integer> {
       if (directory != null) {
         Path place = directory.resolve(stem(one.file()));
         try {
-          RecordWriter.write(
-              place,
-              RecordWriter.files(
-                  one.review(),
-                  one.inputs(),
-                  StatorBands.of(one.review().starter()),
-                  ProgramVersion.text()));
+          RecordWriter.write(place, RecordWriter.files(one.dossier()));
         } catch (IOException e) {
           out.flush();
           err.println("sliprung: the record cannot be written to " + place + ": " + e.getMessage());

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import sliprung.quantity.Dimension;
 import sliprung.quantity.Quantity;
 
@@ -43,6 +44,7 @@ record Field(Reading reading, String path, String key, Place keyPlace, YamlNode 
           "expected " + dimension.words() + " " + range.words() + " but found " + value.found());
       return Double.NaN;
     }
+    reading.read(new ReadValue(path, text.get(), OptionalDouble.of(number), dimension.unit()));
     return number;
   }
 
@@ -122,6 +124,7 @@ record Field(Reading reading, String path, String key, Place keyPlace, YamlNode 
       return Optional.empty();
     }
     if (value instanceof YamlNode.Scalar s && !s.text().isBlank()) {
+      reading.read(new ReadValue(path, s.text(), OptionalDouble.empty(), ""));
       return Optional.of(s.text());
     }
     reading.mistake(

@@ -2,6 +2,7 @@ package sliprung.config;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -18,6 +19,7 @@ final class Reading {
   private final Set<Diagnostic> diagnostics = new LinkedHashSet<>();
   private final Map<String, Place> places = new TreeMap<>();
   private final Set<String> knownPaths = new TreeSet<>();
+  private final Map<String, ReadValue> values = new LinkedHashMap<>();
   private final List<Assumption> assumptions = new ArrayList<>();
   private final List<String> notYetJudged = new ArrayList<>();
   private OptionalDouble supplyHertz = OptionalDouble.empty();
@@ -46,6 +48,11 @@ final class Reading {
 
   void keep(String path, Place place) {
     places.put(path, place);
+  }
+
+  /** Puts a value on record; the last reading of a path stands. */
+  void read(ReadValue value) {
+    values.put(value.path(), value);
   }
 
   void know(String path) {
@@ -88,6 +95,14 @@ final class Reading {
 
   Map<String, Place> places() {
     return Map.copyOf(places);
+  }
+
+  /** What was read, in the order of the file. */
+  List<ReadValue> values() {
+    Place first = new Place(source.name(), 1, 1);
+    return values.values().stream()
+        .sorted(Comparator.comparing(v -> places.getOrDefault(v.path(), first)))
+        .toList();
   }
 
   Optional<Place> place(String path) {

@@ -108,7 +108,7 @@ final class StarterAssembly {
     return starter.isEmpty() || reading.hasMistakes()
         ? new StarterReading.Refused(reading.diagnostics())
         : new StarterReading.Described(
-            starter.get(), reading.places(), new ArrayList<>(inputs.values()));
+            starter.get(), reading.places(), reading.values(), new ArrayList<>(inputs.values()));
   }
 
   /** The starter; empty where a mistake would make a record that means nothing. */

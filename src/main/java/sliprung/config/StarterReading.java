@@ -29,14 +29,17 @@ public sealed interface StarterReading {
    *
    * @param starter as described
    * @param places where each value stands, by its path; list entries count from 1
+   * @param values every value as typed and as taken, in the order of the file
    * @param inputs the starter file, then every curve file it names
    */
-  record Described(Starter starter, Map<String, Place> places, List<InputFile> inputs)
+  record Described(
+      Starter starter, Map<String, Place> places, List<ReadValue> values, List<InputFile> inputs)
       implements StarterReading {
 
     /** Copies the collections. */
     public Described {
       places = Map.copyOf(places);
+      values = List.copyOf(values);
       inputs = List.copyOf(inputs);
     }
 

@@ -10,40 +10,47 @@ import java.util.List;
  */
 public enum Dimension {
   /** Volts. */
-  VOLTAGE("a voltage", "690 V", "6.6 kV"),
+  VOLTAGE("V", "a voltage", "690 V", "6.6 kV"),
   /** Amperes. */
-  CURRENT("a current", "208 A", "18 kA"),
+  CURRENT("A", "a current", "208 A", "18 kA"),
   /** Watts. */
-  POWER("a power", "200 kW", "75 hp"),
+  POWER("W", "a power", "200 kW", "75 hp"),
   /** Seconds. */
-  TIME("a time", "2.5 s", "60 ms"),
+  TIME("s", "a time", "2.5 s", "60 ms"),
   /** Hertz. */
-  FREQUENCY("a frequency", "50 Hz", "18 Hz"),
+  FREQUENCY("Hz", "a frequency", "50 Hz", "18 Hz"),
   /** Revolutions per minute. */
-  SPEED("a speed", "1478 rpm", "592 rpm"),
+  SPEED("rpm", "a speed", "1478 rpm", "592 rpm"),
   /** Ohms. */
-  RESISTANCE("a resistance", "0.28 ohm", "12 mohm"),
+  RESISTANCE("Ω", "a resistance", "0.28 ohm", "12 mohm"),
   /** Newton metres. */
-  TORQUE("a torque", "700 N·m", "500 lb·ft"),
+  TORQUE("N·m", "a torque", "700 N·m", "500 lb·ft"),
   /** Kilogram square metres. */
-  INERTIA("an inertia", "6 kg·m²", "60 lb·ft²"),
+  INERTIA("kg·m²", "an inertia", "6 kg·m²", "60 lb·ft²"),
   /** Degrees Celsius. */
-  TEMPERATURE("a temperature", "40 °C", "104 °F"),
+  TEMPERATURE("°C", "a temperature", "40 °C", "104 °F"),
   /** Kelvins of difference. */
-  TEMPERATURE_RISE("a temperature rise", "385 K", "385 °C"),
+  TEMPERATURE_RISE("K", "a temperature rise", "385 K", "385 °C"),
   /** Square millimetres. */
-  AREA("a conductor area", "120 mm2", "4/0 AWG"),
+  AREA("mm²", "a conductor area", "120 mm2", "4/0 AWG"),
   /** Per unit. */
-  SHARE("a share", "10 %", "-10 %"),
+  SHARE("", "a share", "10 %", "-10 %"),
   /** A number without a unit. */
-  NUMBER("a number without a unit", "2.8", "1");
+  NUMBER("", "a number without a unit", "2.8", "1");
 
+  private final String unit;
   private final String words;
   private final List<String> examples;
 
-  Dimension(String words, String... examples) {
+  Dimension(String unit, String words, String... examples) {
+    this.unit = unit;
     this.words = words;
     this.examples = List.of(examples);
+  }
+
+  /** Symbol of the unit in which a value is kept; empty for a share, per unit, and a number. */
+  public String unit() {
+    return unit;
   }
 
   /** With its article: {@code a voltage}. */

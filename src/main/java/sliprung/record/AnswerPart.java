@@ -82,8 +82,7 @@ final class AnswerPart {
   /** One question with its findings. */
   static void write(Html page, Answer answer) {
     Question question = answer.question();
-    page.open("section", "id", "question-" + question.number()).markup("\n");
-    page.element("h2", question.number() + "  " + question.words());
+    page.section("question-" + question.number(), question.number() + "  " + question.words());
     if (!answer.mustJudgeMissing().isEmpty()) {
       page.element(
           "p", "Must be judged and was not: " + String.join(", ", answer.mustJudgeMissing()) + ".");
@@ -96,23 +95,7 @@ final class AnswerPart {
               .collect(Collectors.joining(", "));
       page.element("p", "Not judged, and listed under question 4: " + subjects + ".");
     }
-    List<Finding> clear = new ArrayList<>();
-    List<Finding> defaults = new ArrayList<>();
-    for (Finding finding : answer.findings()) {
-      if (finding.rule().equals("data/assumed") && finding.verdict() != Verdict.BREACH) {
-        defaults.add(finding);
-      } else if (finding.verdict() == Verdict.CLEAR) {
-        clear.add(finding);
-      } else {
-        block(page, finding);
-      }
-    }
-    if (!clear.isEmpty()) {
-      clears(page, clear);
-    }
-    if (!defaults.isEmpty()) {
-      defaults(page, defaults);
-    }
+    FindingPart.write(page, answer.findings());
     if (answer.findings().isEmpty()) {
       page.element(
           "p",
@@ -123,84 +106,7 @@ final class AnswerPart {
     page.end();
   }
 
-  private static void block(Html page, Finding finding) {
-    page.open("article", "class", "finding is-" + style(finding.verdict()));
-    page.open("h3");
-    page.open("span", "class", style(finding.verdict())).text(finding.verdict().word()).close();
-    page.text(" ").open("b").text(finding.subject()).close();
-    String margin = FindingText.marginOfWanted(finding);
-    if (!margin.isEmpty()) {
-      page.text(" margin " + margin + (finding.wanted().isPresent() ? " wanted" : ""));
-    }
-    page.end();
-    page.element("p", finding.says());
-    if (!finding.missing().isEmpty()) {
-      page.element("p", "Missing: " + String.join(", ", finding.missing()) + ".");
-    }
-    if (!finding.mend().isEmpty()) {
-      page.open("p").open("b").text("Next: ").close().text(finding.mend()).end();
-    }
-    finding
-        .by()
-        .ifPresent(
-            by ->
-                page.element(
-                    "p",
-                    "Accepted by "
-                        + by
-                        + finding.until().map(d -> " until " + d).orElse("")
-                        + "."));
-    page.open("p", "class", "quiet");
-    page.text(evidence(finding)).text(" ");
-    page.open("code").text(finding.rule()).close();
-    page.end();
-    page.end();
-  }
-
-  private static void defaults(Html page, List<Finding> findings) {
-    Cells cells =
-        new Cells(page)
-            .open(
-                "Defaults, taken because the file is silent, that decided a verdict; tight: it"
-                    + " decided a breach or a tight margin",
-                List.of("input", "verdict", "what was taken, and what it decided", "next"));
-    findings.forEach(f -> cells.row(f.subject(), f.verdict().word(), f.says(), f.mend()));
-    cells.close();
-  }
-
-  private static String evidence(Finding finding) {
-    List<String> parts = new ArrayList<>();
-    parts.add(FindingText.valueAgainstLimit(finding));
-    parts.add(FindingText.decidedBy(finding));
-    parts.add(finding.reference());
-    parts.add(finding.weakestInput().isEmpty() ? "" : "rests on " + finding.weakestInput());
-    return parts.stream().filter(p -> !p.isEmpty()).collect(Collectors.joining(" · "));
-  }
-
-  private static void clears(Html page, List<Finding> findings) {
-    page.open("div", "class", "wide").open("table", "class", "clears").markup("\n");
-    page.element("caption", "Clear, the thinnest margin first");
-    page.open("thead").open("tr");
-    for (String head : List.of("subject", "margin", "what happens, and what decided it", "rule")) {
-      page.element("th", head, "scope", "col");
-    }
-    page.end().end();
-    page.open("tbody").markup("\n");
-    for (Finding finding : findings) {
-      page.open("tr");
-      page.element("th", finding.subject(), "scope", "row");
-      page.element("td", FindingText.marginOfWanted(finding));
-      page.open("td").text(finding.says());
-      page.empty("br");
-      page.open("span", "class", "quiet").text(evidence(finding)).end();
-      page.end();
-      page.open("td").open("code").text(finding.rule()).close().end();
-      page.end();
-    }
-    page.end().end().end();
-  }
-
-  private static String style(Verdict verdict) {
+  static String style(Verdict verdict) {
     return verdict.word().replace(' ', '-');
   }
 }

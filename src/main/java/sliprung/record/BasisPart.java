@@ -40,8 +40,7 @@ final class BasisPart {
 
   /** Circuit, residuals, defaults and evidence. */
   static void write(Html page, Review review) {
-    page.open("section").markup("\n");
-    page.element("h2", "What this rests on");
+    page.section("basis", "What this rests on");
     circuit(page, review);
     List<Assumption> assumptions = review.starter().assumptions();
     if (!assumptions.isEmpty()) {
@@ -51,11 +50,6 @@ final class BasisPart {
                   "Defaults that were filled in because the file does not say",
                   List.of("missing key", "taken as"));
       assumptions.forEach(a -> cells.row(a.path(), a.value()));
-      cells.close();
-    }
-    if (!review.starter().evidence().isEmpty()) {
-      Cells cells = new Cells(page).open("How well inputs are known", List.of("input", "evidence"));
-      review.starter().evidence().forEach((path, grade) -> cells.row(path, grade.word()));
       cells.close();
     }
     if (!review.starter().margins().isEmpty()) {
@@ -114,18 +108,5 @@ final class BasisPart {
                       "± " + Show.percent(r.tolerance())));
       cells.close();
     }
-  }
-
-  /** The files, whole, each with its fingerprint. */
-  static void inputs(Html page, List<InputFile> inputs) {
-    page.open("section").markup("\n");
-    page.element("h2", "Inputs");
-    for (InputFile input : inputs) {
-      page.element("h3", input.name());
-      page.open("p", "class", "quiet").text("SHA-256 ");
-      page.open("code").text(input.sha256()).close().end();
-      page.element("pre", input.text());
-    }
-    page.end();
   }
 }

@@ -29,8 +29,7 @@ final class Cautions {
   private Cautions() {}
 
   static void write(Html page) {
-    page.open("section").markup("\n");
-    page.element("h2", "Cautions");
+    page.section("cautions", "Cautions");
     page.open("ul").markup("\n");
     CAUTIONS.forEach(c -> page.element("li", c));
     page.end();

@@ -11,8 +11,8 @@ final class Cells {
   }
 
   /** Opens a table with a caption and its heads; a head that begins with {@code #} is numeric. */
-  Cells open(String caption, List<String> heads) {
-    page.open("div", "class", "wide").open("table").markup("\n");
+  Cells open(String caption, List<String> heads, String... attributes) {
+    page.open("div", "class", "wide").open("table", attributes).markup("\n");
     page.element("caption", caption);
     page.open("thead").open("tr");
     for (String head : heads) {

@@ -1,7 +1,9 @@
 package sliprung.record;
 
 import java.util.ArrayDeque;
+import java.util.ArrayList;
 import java.util.Deque;
+import java.util.List;
 import java.util.Map;
 
 /**
@@ -12,6 +14,40 @@ final class Html {
   private static final char REPLACEMENT = '\uFFFD';
   private final StringBuilder out = new StringBuilder();
   private final Deque<String> open = new ArrayDeque<>();
+  private final List<Heading> headings = new ArrayList<>();
+  private final Figures figures;
+
+  /** A page whose figures are made that way. */
+  Html(Figures figures) {
+    this.figures = figures;
+  }
+
+  /**
+   * A section of the page.
+   *
+   * @param id within the page
+   * @param title its heading
+   */
+  record Heading(String id, String title) {}
+
+  /** How charts and bars are put here. */
+  Figures figures() {
+    return figures;
+  }
+
+  /** The sections opened so far. */
+  List<Heading> headings() {
+    return List.copyOf(headings);
+  }
+
+  /** Opens a section with its heading; the caller ends it. */
+  Html section(String id, String title, String... attributes) {
+    headings.add(new Heading(id, title));
+    List<String> all = new ArrayList<>(List.of("id", id));
+    all.addAll(List.of(attributes));
+    open("section", all.toArray(String[]::new)).markup("\n");
+    return element("h2", title);
+  }
 
   /** Opens an element; attributes come as name, value, name, value. */
   Html open(String tag, String... attributes) {
@@ -56,6 +92,15 @@ final class Html {
     return this;
   }
 
+  /** Whether a character changes the direction of what follows, so that a line reads falsely. */
+  private static boolean turnsText(int c) {
+    return c == 0x061C
+        || c == 0x200E
+        || c == 0x200F
+        || (c >= 0x202A && c <= 0x202E)
+        || (c >= 0x2066 && c <= 0x2069);
+  }
+
   private StringBuilder begin(String tag, String... attributes) {
     out.append('<').append(tag);
     for (int i = 0; i + 1 < attributes.length; i += 2) {
@@ -74,8 +119,8 @@ final class Html {
           (int) '\'', "&#39;");
 
   /**
-   * A text without markup. Characters that XML 1.0 cannot hold (clause 2.2, production Char) and
-   * the controls of Latin 1 are replaced.
+   * A text without markup. Characters that XML 1.0 cannot hold (clause 2.2, production Char), the
+   * controls of Latin 1 and those that turn the direction of a line are replaced.
    */
   static String escaped(String text) {
     StringBuilder escaped = new StringBuilder(text.length() + 16);
@@ -91,7 +136,7 @@ final class Html {
               } else if (c == '\r') {
                 // XML would turn it into a line end by itself
                 escaped.append("&#13;");
-              } else if (control || surrogate || c == 0xFFFE || c == 0xFFFF) {
+              } else if (control || surrogate || turnsText(c) || c == 0xFFFE || c == 0xFFFF) {
                 escaped.append(REPLACEMENT);
               } else {
                 escaped.appendCodePoint(c);

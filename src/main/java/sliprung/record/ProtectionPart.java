@@ -17,9 +17,8 @@ final class ProtectionPart {
   private ProtectionPart() {}
 
   static void write(Html page, Review review, FirstLimitChart firstLimit, ReviewPictures pictures) {
-    page.open("section").markup("\n");
-    page.element("h2", "Devices and parts");
-    ReviewHtml.figure(page, pictures.timeCurrent());
+    page.section("devices", "Devices and parts");
+    ReviewLayout.figure(page, pictures.timeCurrent());
     for (String id : List.of("cold", "hot")) {
       review.start(id).ifPresent(s -> start(page, s));
     }

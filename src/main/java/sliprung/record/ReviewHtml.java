@@ -7,14 +7,6 @@ import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.Base64;
-import java.util.List;
-import sliprung.chart.Band;
-import sliprung.chart.FirstLimitChart;
-import sliprung.chart.Picture;
-import sliprung.chart.Svg;
-import sliprung.review.Answer;
-import sliprung.review.Answers;
-import sliprung.review.Question;
 import sliprung.review.Review;
 
 /**
@@ -26,74 +18,17 @@ public final class ReviewHtml {
 
   private ReviewHtml() {}
 
-  /**
-   * The whole page.
-   *
-   * @param review what was found
-   * @param inputs it was made from
-   * @param bands the devices that measure stator current, for the time-current sheet
-   * @param program version of the program
-   */
-  public static String text(
-      Review review, List<InputFile> inputs, List<Band> bands, String program) {
-    Answers answers = Answers.of(review);
-    FirstLimitChart firstLimit = FirstLimitChart.of(review);
-    ReviewPictures pictures = ReviewPictures.of(review, firstLimit, bands);
-    Html page = new Html();
+  /** The whole page. */
+  public static String text(Dossier dossier) {
+    Html page = new Html(new ScreenFigures());
     page.markup("<!DOCTYPE html>\n");
     page.open("html", "lang", "en", "xmlns", "http://www.w3.org/1999/xhtml").markup("\n");
-    head(page, review);
+    head(page, dossier.review());
     page.open("body").markup("\n");
-    page.open("header");
-    page.element("h1", review.starter().name());
-    page.element(
-        "p",
-        Answers.banner(review).substring(review.starter().name().length() + " · ".length())
-            + " · reviewed for "
-            + review.date()
-            + " · Sliprung "
-            + program,
-        "class",
-        "quiet");
-    page.end();
-    page.open("main").markup("\n");
-    page.element("p", answers.headline(), "class", "headline");
-    AnswerPart.glance(page, answers);
-    figure(page, pictures.firstLimit());
-    if (!firstLimit.withoutData().isEmpty()) {
-      page.element(
-          "p",
-          "Parts without data stand in no row: "
-              + String.join(", ", firstLimit.withoutData())
-              + ".",
-          "class",
-          "quiet");
-    }
-    for (Answer answer : answers.answers()) {
-      AnswerPart.write(page, answer);
-      if (answer.question() == Question.UNKNOWN) {
-        BasisPart.notJudged(page, review);
-      }
-    }
-    StartPart.write(page, review, pictures);
-    ProtectionPart.write(page, review, firstLimit, pictures);
-    BasisPart.write(page, review);
-    Cautions.write(page);
-    BasisPart.inputs(page, inputs);
-    page.end();
+    ReviewLayout.write(page, dossier);
     page.end();
     page.end();
     return page.toString();
-  }
-
-  /** A chart with its sentence above it. */
-  static void figure(Html page, Picture picture) {
-    page.open("figure");
-    page.element("figcaption", picture.says());
-    page.open(
-        "div", "class", "wide", "tabindex", "0", "role", "group", "aria-label", picture.title());
-    page.markup(Svg.inline(picture)).end();
-    page.end();
   }
 
   private static void head(Html page, Review review) {

@@ -8,7 +8,7 @@ import sliprung.rulebook.ComputedStart;
 import sliprung.runup.Stage;
 import sliprung.runup.Trace;
 
-/** The start itself: over time and stage by stage. */
+/** The start itself over time. */
 final class StartPart {
   private StartPart() {}
 
@@ -17,9 +17,8 @@ final class StartPart {
     if (cold.isEmpty()) {
       return;
     }
-    page.open("section").markup("\n");
-    page.element("h2", "The start");
-    pictures.start().ifPresent(p -> ReviewHtml.figure(page, p));
+    page.section("start", "The start");
+    pictures.start().ifPresent(p -> ReviewLayout.figure(page, p));
     stages(page, cold.get());
     page.end();
   }

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
@@ -19,8 +20,9 @@ class RecordWriterTest {
 
   @Test
   void should_make_every_file_of_a_record() {
-    Map<String, String> files =
-        RecordWriter.files(CrusherReview.plain(), List.of(), List.of(), "0.1.0");
+    Map<String, byte[]> files =
+        RecordWriter.files(
+            new Dossier(CrusherReview.plain(), List.of(), List.of(), List.of(), "0.1.0"));
     assertThat(files.keySet())
         .containsExactlyInAnyOrder(
             "review.html",
@@ -29,7 +31,7 @@ class RecordWriterTest {
             "first-limit.svg",
             "start-over-time.svg",
             "time-current.svg");
-    assertThat(files.values()).allSatisfy(text -> assertThat(text).isNotBlank());
+    assertThat(files.values()).allSatisfy(bytes -> assertThat(bytes).isNotEmpty());
   }
 
   @Test
@@ -62,17 +64,17 @@ class RecordWriterTest {
   @Test
   void should_leave_no_directory_behind_when_nothing_could_be_written() throws IOException {
     Path directory = parent.resolve("a").resolve("b");
-    Map<String, String> impossible = new LinkedHashMap<>();
-    impossible.put("missing/first.txt", "one");
+    Map<String, byte[]> impossible = new LinkedHashMap<>();
+    impossible.put("missing/first.txt", new byte[] {1});
     assertThatThrownBy(() -> RecordWriter.write(directory, impossible))
         .isInstanceOf(IOException.class);
     assertThat(parent.resolve("a")).doesNotExist();
   }
 
-  private static Map<String, String> files(String first, String second) {
-    Map<String, String> files = new LinkedHashMap<>();
-    files.put("first.txt", first);
-    files.put("second.txt", second);
+  private static Map<String, byte[]> files(String first, String second) {
+    Map<String, byte[]> files = new LinkedHashMap<>();
+    files.put("first.txt", first.getBytes(StandardCharsets.UTF_8));
+    files.put("second.txt", second.getBytes(StandardCharsets.UTF_8));
     return files;
   }
 

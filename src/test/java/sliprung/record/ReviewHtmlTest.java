@@ -3,6 +3,7 @@ package sliprung.record;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
@@ -24,10 +25,12 @@ class ReviewHtmlTest {
   void should_be_well_formed_with_hostile_text_everywhere() {
     String page =
         ReviewHtml.text(
-            CrusherReview.of(HOSTILE, HOSTILE, true),
-            List.of(new InputFile(HOSTILE, HOSTILE, HOSTILE)),
-            List.of(),
-            HOSTILE);
+            new Dossier(
+                CrusherReview.of(HOSTILE, HOSTILE, true),
+                List.of(new InputFile(HOSTILE, HOSTILE, HOSTILE)),
+                List.of(new AsRead(HOSTILE, HOSTILE, OptionalDouble.empty(), HOSTILE)),
+                List.of(),
+                HOSTILE));
     Document document = Parsed.xml(page);
     assertThat(Parsed.elements(document))
         .extracting(Element::getTagName)
@@ -134,6 +137,6 @@ class ReviewHtmlTest {
   }
 
   private static String page(Review review) {
-    return ReviewHtml.text(review, INPUTS, List.of(), "0.1.0");
+    return ReviewHtml.text(new Dossier(review, INPUTS, List.of(), List.of(), "0.1.0"));
   }
 }

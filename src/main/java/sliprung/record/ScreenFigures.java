@@ -1,0 +1,56 @@
+package sliprung.record;
+
+import java.util.Locale;
+import sliprung.chart.Picture;
+import sliprung.chart.Svg;
+
+/** Figures of a page for browsers: SVG within the page. */
+final class ScreenFigures implements Figures {
+  @Override
+  public void chart(Html page, Picture picture) {
+    page.open(
+        "div", "class", "wide", "tabindex", "0", "role", "group", "aria-label", picture.title());
+    page.markup(Svg.inline(picture)).end();
+  }
+
+  @Override
+  public void bar(Html page, double share) {
+    MarginBar bar = new MarginBar(share);
+    page.open(
+        "svg",
+        "xmlns",
+        "http://www.w3.org/2000/svg",
+        "class",
+        bar.isShort() ? "bar short" : "bar",
+        "width",
+        Integer.toString(MarginBar.WIDTH),
+        "height",
+        Integer.toString(MarginBar.HEIGHT),
+        "aria-hidden",
+        "true");
+    rectangle(page, "frame", 0.5, MarginBar.TOP + 0.5, MarginBar.WIDTH - 1.0);
+    rectangle(page, "fill", 0.5, MarginBar.TOP + 0.5, bar.filled());
+    page.empty(
+        "path", "d", "M" + MarginBar.WIDTH / 2 + " 0V" + MarginBar.HEIGHT, "class", "wanted");
+    page.close();
+  }
+
+  private static void rectangle(Html page, String kind, double x, double y, double width) {
+    page.empty(
+        "rect",
+        "class",
+        kind,
+        "x",
+        number(x),
+        "y",
+        number(y),
+        "width",
+        number(width),
+        "height",
+        number(MarginBar.HEIGHT - 2.0 * MarginBar.TOP - 1.0));
+  }
+
+  private static String number(double value) {
+    return String.format(Locale.ROOT, "%.1f", value);
+  }
+}
