@@ -15,6 +15,7 @@ import sliprung.starter.Starter;
 /** One computation of a start: the only mutable state, gone when it ends. */
 final class StartRun {
   private static final double RUN_UP_SHARE = 0.005;
+  private static final double BACKWARDS_SHARE = 0.001;
 
   private final StartSimulator simulator;
   private final Starter starter;
@@ -266,12 +267,17 @@ final class StartRun {
   }
 
   private Outcome outcome(boolean running) {
+    // The electrical transient swings a rotor back by a hair; only an active load drives it back.
+    double backwardsSpeed =
+        starter.load().active()
+            ? -BACKWARDS_SHARE * machine.synchronousSpeed()
+            : Double.NEGATIVE_INFINITY;
     boolean moved = false;
     boolean backwards = false;
     for (Stage stage : stages) {
       for (double w : stage.trace().speed()) {
         moved |= w != 0.0;
-        backwards |= w < 0.0;
+        backwards |= w < backwardsSpeed;
       }
     }
     if (!moved) {
