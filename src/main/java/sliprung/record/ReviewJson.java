@@ -127,6 +127,9 @@ public final class ReviewJson {
     fields.number("run_up", method.error().runUp());
     fields.number("stator_i2t", method.error().statorSquare());
     fields.number("rotor_i2t", method.error().ringSquare());
+    json.writeFieldName("worst_corner");
+    StartJson.corner(fields, method.worstCorner());
+    fields.number("worst", method.worst().greatest());
     json.writeStringField("says", method.says());
     json.writeEndObject();
   }

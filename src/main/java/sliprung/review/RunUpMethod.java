@@ -1,29 +1,62 @@
 package sliprung.review;
 
+import java.util.Map;
 import sliprung.quantity.Show;
 import sliprung.runup.ModelError;
 import sliprung.runup.RunUpFigures;
 import sliprung.starter.Starter;
+import sliprung.tolerance.Corner;
 
 /**
  * How the starts of a review were computed, and how far the steady circuit lies from the electrical
- * transient on the nominal cold start.
+ * transient.
  *
  * @param asked as the file says
  * @param used steady or transient
  * @param error of the steady circuit on the nominal cold start
+ * @param worstCorner where it errs most on a permitted start; where it cannot be compared, that one
+ * @param worst its error there
  */
-public record RunUpMethod(Starter.Method asked, Starter.Method used, ModelError error) {
+public record RunUpMethod(
+    Starter.Method asked,
+    Starter.Method used,
+    ModelError error,
+    Corner worstCorner,
+    ModelError worst) {
   /** Left to the review, the steady circuit serves up to this difference, per unit (ours). */
   public static final double CRITERION = 0.02;
 
-  /** Chooses. Where nothing can be compared, the transient is taken. */
-  public static RunUpMethod choose(Starter.Method asked, ModelError error) {
+  /**
+   * Chooses. The steady circuit serves where run-up time and both I²t lie within the criterion at
+   * every corner; a corner at which one way runs up and the other does not lies outside it.
+   *
+   * @param errors by corner, the nominal one among them
+   */
+  public static RunUpMethod choose(Starter.Method asked, Map<Corner, ModelError> errors) {
+    Map.Entry<Corner, ModelError> worst = null;
+    for (Map.Entry<Corner, ModelError> entry : errors.entrySet()) {
+      if (worst == null || weight(entry.getValue()) > weight(worst.getValue())) {
+        worst = entry;
+      }
+    }
     Starter.Method used = asked;
     if (asked == Starter.Method.AUTO) {
-      used = error.greatest() <= CRITERION ? Starter.Method.STEADY : Starter.Method.TRANSIENT;
+      used =
+          weight(worst.getValue()) <= CRITERION ? Starter.Method.STEADY : Starter.Method.TRANSIENT;
     }
-    return new RunUpMethod(asked, used, error);
+    return new RunUpMethod(
+        asked, used, errors.get(Corner.NOMINAL), worst.getKey(), worst.getValue());
+  }
+
+  /** Where neither way runs up there is no start to get wrong; where one does, everything is. */
+  private static double weight(ModelError error) {
+    if (error.isMeasured()) {
+      return error.greatest();
+    }
+    boolean neither =
+        Double.isNaN(error.steady().runUpSeconds())
+            && Double.isNaN(error.withTransient().runUpSeconds());
+    return neither ? 0.0 : Double.POSITIVE_INFINITY;
   }
 
   /** Whether the transient feeds devices and parts. */
@@ -60,15 +93,29 @@ public record RunUpMethod(Starter.Method asked, Starter.Method used, ModelError 
   }
 
   private String choice() {
-    String verb = isTransient() ? "The transient feeds" : "The steady circuit feeds";
-    String why =
-        asked != Starter.Method.AUTO
-            ? "as the file asks"
-            : !error.isMeasured()
-                ? "since nothing can be compared"
-                : isTransient()
-                    ? "since more than " + Show.percent(CRITERION) + " apart"
-                    : "since all three lie within " + Show.percent(CRITERION);
-    return verb + " devices and parts, " + why + ". Peaks always come from the transient.";
+    String feeds = isTransient() ? "The transient feeds" : "The steady circuit feeds";
+    return feeds + " devices and parts, " + why() + ". Peaks always come from the transient.";
+  }
+
+  private String why() {
+    if (asked != Starter.Method.AUTO) {
+      return "as the file asks";
+    }
+    if (!isTransient()) {
+      return "since over all corners nothing is further apart than "
+          + Show.percent(weight(worst))
+          + " (limit "
+          + Show.percent(CRITERION)
+          + ")";
+    }
+    return worst.isMeasured()
+        ? "since up to "
+            + Show.percent(worst.greatest())
+            + " lie between them (limit "
+            + Show.percent(CRITERION)
+            + "; at "
+            + worstCorner.words()
+            + ")"
+        : "since only one of them runs up at " + worstCorner.words();
   }
 }

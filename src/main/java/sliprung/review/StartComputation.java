@@ -57,20 +57,30 @@ final class StartComputation {
   private record AtCorner(
       Corner corner, Optional<RunningPoint> running, List<ComputedStart> starts) {}
 
+  /** The permitted start of one corner, both ways. */
+  private record Both(
+      Corner corner, Conditions conditions, StartHistory steady, StartHistory withTransient) {
+    ModelError error() {
+      return ModelError.between(steady, withTransient);
+    }
+  }
+
   /** Corners share nothing, so both cores work on them; the order stays that of the corners. */
   Computed compute() {
-    Map<Corner, Conditions> conditions = Corners.of(starter);
-    Conditions nominal = conditions.get(Corner.NOMINAL);
-    RunUpMethod method =
-        RunUpMethod.choose(
-            starter.method(),
-            ModelError.between(
-                simulator.run(Scenario.PERMITTED, nominal),
-                simulator.runTransient(Scenario.PERMITTED, nominal)));
-    List<AtCorner> corners =
-        conditions.entrySet().stream().toList().parallelStream()
-            .map(e -> at(e.getKey(), e.getValue(), method))
+    List<Both> permitted =
+        Corners.of(starter).entrySet().stream().toList().parallelStream()
+            .map(
+                e ->
+                    new Both(
+                        e.getKey(),
+                        e.getValue(),
+                        simulator.run(Scenario.PERMITTED, e.getValue()),
+                        simulator.runTransient(Scenario.PERMITTED, e.getValue())))
             .toList();
+    Map<Corner, ModelError> errors = new LinkedHashMap<>();
+    permitted.forEach(p -> errors.put(p.corner(), p.error()));
+    RunUpMethod method = RunUpMethod.choose(starter.method(), errors);
+    List<AtCorner> corners = permitted.parallelStream().map(p -> at(p, method)).toList();
     List<ComputedStart> starts = new ArrayList<>();
     Map<Corner, Optional<RunningPoint>> running = new LinkedHashMap<>();
     for (AtCorner at : corners) {
@@ -80,28 +90,24 @@ final class StartComputation {
     return new Computed(starts, running, method);
   }
 
-  /**
-   * The history of a start. Peaks are computed for every permitted start and for the faults of the
-   * nominal corner; where the two methods disagree on how a permitted start ends, the transient
-   * stands.
-   */
-  private StartHistory history(
-      Scenario scenario, Corner corner, Conditions conditions, RunUpMethod method) {
+  /** The history of a fault; at the nominal corner also a steady one has the peaks. */
+  private StartHistory fault(Scenario fault, Both at, RunUpMethod method) {
     if (method.isTransient()) {
-      return simulator.runTransient(scenario, conditions);
+      return simulator.runTransient(fault, at.conditions());
     }
-    StartHistory steady = simulator.run(scenario, conditions);
-    if (scenario.isFault() && !corner.isNominal()) {
-      return steady;
-    }
-    StartHistory withTransient = simulator.runTransient(scenario, conditions);
-    boolean disagree = !scenario.isFault() && steady.outcome() != withTransient.outcome();
-    return disagree && starter.method() == Starter.Method.AUTO
-        ? withTransient
-        : steady.withPeaksOf(withTransient);
+    StartHistory steady = simulator.run(fault, at.conditions());
+    return at.corner().isNominal()
+        ? steady.withPeaksOf(simulator.runTransient(fault, at.conditions()))
+        : steady;
   }
 
-  private AtCorner at(Corner corner, Conditions conditions, RunUpMethod method) {
+  private AtCorner at(Both both, RunUpMethod method) {
+    Corner corner = both.corner();
+    Conditions conditions = both.conditions();
+    StartHistory chosen =
+        method.isTransient()
+            ? both.withTransient()
+            : both.steady().withPeaksOf(both.withTransient());
     Optional<RunningPoint> running = simulator.runningPoint(conditions);
     // A motor that cannot carry its load at this corner is found by trip/running; what it was warm
     // from before is then its rated current.
@@ -111,8 +117,7 @@ final class StartComputation {
     Duty duty = starter.duty();
 
     List<ComputedStart> starts = new ArrayList<>();
-    StartProtection permitted =
-        evaluator.over(history(Scenario.PERMITTED, corner, conditions, method));
+    StartProtection permitted = evaluator.over(chosen);
     for (int n = 1; n <= duty.coldStarts(); n++) {
       starts.add(
           permitted(
@@ -129,7 +134,7 @@ final class StartComputation {
     DevicePreload forgotten = DevicePreload.remembered(stator, ring);
     PartPreload hot = new PartPreload(stator, ring, 0.0, sections);
     for (Scenario fault : faults()) {
-      StartProtection history = evaluator.over(history(fault, corner, conditions, method));
+      StartProtection history = evaluator.over(fault(fault, both, method));
       starts.add(
           fault(corner, history, ComputedStart.From.COLD, DevicePreload.COLD, PartPreload.COLD));
       starts.add(fault(corner, history, ComputedStart.From.HOT, forgotten, hot));

@@ -10,9 +10,9 @@ import sliprung.numeric.SystemFlow;
  */
 final class TransientSamples implements SystemFlow.Steps {
   /** Greatest share by which halving a piece may change the integral of a squared current. */
-  private static final double CHANGE = 1e-6;
+  private static final double CHANGE = 1e-5;
 
-  private static final int MOST_HALVINGS = 6;
+  private static final int MOST_PIECES = 64;
   private static final double RMS = Math.sqrt(2.0);
 
   private final Circumstance circumstance;
@@ -37,6 +37,10 @@ final class TransientSamples implements SystemFlow.Steps {
   private record Sample(double time, double[] state, double[] currents, double[] squares) {}
 
   private Sample sample(double time, double[] state) {
+    if (state[FluxModel.SPEED] < 0.0 && !circumstance.active()) {
+      // what the error of a step leaves of a rotor that a passive load holds at rest
+      state[FluxModel.SPEED] = 0.0;
+    }
     double[] currents = {
       model.statorReal(state),
       model.statorImaginary(state),
@@ -67,37 +71,49 @@ final class TransientSamples implements SystemFlow.Steps {
       return;
     }
     Sample first = last;
-    Sample end = sample(to, solution.at(to));
-    Sample middle = sample(0.5 * (from + to), solution.at(0.5 * (from + to)));
-    halve(first, middle, end, solution, 0);
-  }
-
-  private void halve(
-      Sample first, Sample middle, Sample end, SystemFlow.Dense solution, int halvings) {
-    double left = 0.5 * (first.time + middle.time);
-    double right = 0.5 * (middle.time + end.time);
-    if (left <= first.time || right >= end.time) {
-      piece(first, middle, end);
+    double half = 0.5 * (to - from);
+    Sample[] four = {
+      sample(from + 0.5 * half, solution.at(from + 0.5 * half)),
+      sample(from + half, solution.at(from + half)),
+      sample(from + 1.5 * half, solution.at(from + 1.5 * half)),
+      sample(to, solution.at(to))
+    };
+    int pieces = pieces(first, four);
+    if (pieces == 1) {
+      piece(first, four[1], four[3]);
       return;
     }
-    Sample leftMiddle = sample(left, solution.at(left));
-    Sample rightMiddle = sample(right, solution.at(right));
-    if (halvings >= MOST_HALVINGS
-        || (smooth(first, leftMiddle, middle, rightMiddle, end, 0)
-            && smooth(first, leftMiddle, middle, rightMiddle, end, 1))) {
-      piece(first, middle, end);
-      return;
+    Sample before = first;
+    Sample middle = null;
+    for (int i = 1; i <= 2 * pieces; i++) {
+      double at = i == 2 * pieces ? to : from + half * i / pieces;
+      Sample here = 2 * i % pieces == 0 ? four[2 * i / pieces - 1] : sample(at, solution.at(at));
+      if (i % 2 == 1) {
+        middle = here;
+      } else {
+        piece(before, middle, here);
+        before = here;
+      }
     }
-    halve(first, leftMiddle, middle, solution, halvings + 1);
-    halve(middle, rightMiddle, end, solution, halvings + 1);
   }
 
-  private static boolean smooth(Sample a, Sample b, Sample c, Sample d, Sample e, int k) {
-    double coarse = (a.squares[k] + 4.0 * c.squares[k] + e.squares[k]) / 6.0;
-    double fine =
-        (a.squares[k] + 4.0 * b.squares[k] + 2.0 * c.squares[k] + 4.0 * d.squares[k] + e.squares[k])
-            / 12.0;
-    return Math.abs(coarse - fine) <= CHANGE * fine;
+  /** As many as Simpson's rule needs, whose error goes with the fourth power of the length. */
+  private static int pieces(Sample first, Sample[] four) {
+    double change = 0.0;
+    for (int k = 0; k < 2; k++) {
+      double a = first.squares[k];
+      double c = four[1].squares[k];
+      double e = four[3].squares[k];
+      double coarse = (a + 4.0 * c + e) / 6.0;
+      double fine = (a + 4.0 * four[0].squares[k] + 2.0 * c + 4.0 * four[2].squares[k] + e) / 12.0;
+      change = Math.max(change, Math.abs(coarse - fine) / Math.max(fine, Double.MIN_NORMAL));
+    }
+    int pieces = 1;
+    while (change > CHANGE && pieces < MOST_PIECES) {
+      pieces *= 2;
+      change /= 16.0;
+    }
+    return pieces;
   }
 
   private void piece(Sample first, Sample middle, Sample end) {

@@ -342,11 +342,7 @@ class AlternativesTest {
         .contains(new Contactor.Coordination(2, "F1"));
     assertThat(starter.notYetJudged())
         .containsExactlyInAnyOrder(
-            "contactors.K12.coordination",
-            "duty.plugging",
-            "limits.closing-current",
-            "limits.torque-peak",
-            "fuse-wear");
+            "contactors.K12.coordination", "duty.plugging", "limits.closing-current", "fuse-wear");
   }
 
   @Test

@@ -27,6 +27,7 @@ import sliprung.rulebook.overload.OverloadRules;
 import sliprung.rulebook.resistor.EverySectionStandsThePermittedStarts;
 import sliprung.rulebook.sequence.EveryStepPullsThrough;
 import sliprung.rulebook.sequence.NoLevelIsMetAtRest;
+import sliprung.rulebook.sequence.NoTorquePeakExceedsTheLimit;
 import sliprung.rulebook.sequence.TheSequenceIsSupervised;
 import sliprung.rulebook.trip.NoClosingPeakPicksUp;
 import sliprung.rulebook.trip.NoDeviceOperatesInAPermittedStart;
@@ -54,7 +55,6 @@ public final class Catalogue {
               Map.entry("sequence/late", "Does any step close long after the motor has settled?"),
               Map.entry("sequence/spread", "Do the closings keep their order over the spreads?"),
               Map.entry("sequence/grading", "Are the closing currents of the steps even?"),
-              Map.entry("sequence/torque", "Does any torque peak exceed the plant's limit?"),
               Map.entry(
                   "contactor/carrying",
                   "Does every contactor stand what it carries, and how long?"),
@@ -99,6 +99,7 @@ public final class Catalogue {
                 new EveryStepPullsThrough(),
                 new NoLevelIsMetAtRest(),
                 new TheSequenceIsSupervised(),
+                new NoTorquePeakExceedsTheLimit(),
                 new EverySectionStandsThePermittedStarts()));
     rules.addAll(ContactorRules.ALL);
     rules.addAll(OverloadRules.ALL);
