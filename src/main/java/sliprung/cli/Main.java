@@ -35,17 +35,23 @@ public final class Main {
           err.println("Try 'sliprung " + tried(mistake) + "--help'.");
           return ExitStatus.WRONG_INPUT;
         });
-    line.setExecutionExceptionHandler(
-        (defect, command, parsed) -> {
-          StackTraceElement[] at = defect.getStackTrace();
-          err.println(
-              "sliprung: a defect of the program, not of your file: "
-                  + defect
-                  + (at.length > 0 ? " at " + at[0] : ""));
-          err.println("Nothing it printed or wrote may be relied on. Please report it.");
-          return ExitStatus.DEFECT;
-        });
-    return line.execute(arguments);
+    line.setExecutionExceptionHandler((defect, command, parsed) -> defect(err, defect));
+    try {
+      return line.execute(arguments);
+    } catch (Error defect) {
+      // Out of memory, or a class that does not load: never a stack trace, never half an answer.
+      return defect(err, defect);
+    }
+  }
+
+  private static int defect(PrintWriter err, Throwable defect) {
+    StackTraceElement[] at = defect.getStackTrace();
+    err.println(
+        "sliprung: a defect of the program, not of your file: "
+            + defect
+            + (at.length > 0 ? " at " + at[0] : ""));
+    err.println("Nothing it printed or wrote may be relied on. Please report it.");
+    return ExitStatus.DEFECT;
   }
 
   private static String tried(CommandLine.ParameterException mistake) {

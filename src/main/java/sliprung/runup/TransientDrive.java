@@ -27,6 +27,9 @@ final class TransientDrive implements Drive {
   /** Longest time in s that a stage is followed with the transient before it goes on steady. */
   private static final double LONGEST = 30.0;
 
+  /** Time in s after which the currents of a standing rotor are steady, whatever the rates. */
+  private static final double STANDING = 5.0;
+
   /** A speed beyond which a drive that runs away goes on steady, over synchronous speed. */
   private static final double RUNS_AWAY = 2.0;
 
@@ -196,7 +199,11 @@ final class TransientDrive implements Drive {
 
   @Override
   public void stand(double to) {
-    if (to > time && run(to, true, true, List.of()) == Circumstance.End.SETTLED) {
+    if (to <= time) {
+      return;
+    }
+    run(Math.min(to, time + STANDING), true, true, List.of());
+    if (time < to) {
       state = model.settledAt(0.0);
       keep(to);
     }
