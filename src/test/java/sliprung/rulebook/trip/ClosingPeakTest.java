@@ -1,69 +1,126 @@
 package sliprung.rulebook.trip;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
-import java.util.Arrays;
+import java.util.List;
+import java.util.Locale;
+import java.util.function.ToDoubleFunction;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
-import sliprung.fixture.Judged;
-import sliprung.fixture.StarterText;
+import sliprung.fixture.CrusherFacts;
+import sliprung.fixture.WithoutPeaks;
+import sliprung.rulebook.Facts;
 import sliprung.rulebook.Finding;
+import sliprung.rulebook.Rule;
 import sliprung.rulebook.Verdict;
+import sliprung.runup.ClosingPeak;
+import sliprung.runup.Stage;
 
-/** {@code trip/closing-peak}: the steady current alone, as long as no transient is computed. */
 class ClosingPeakTest {
-  private static final String RULE = "trip/closing-peak";
-  private static final StarterText SMALL = StarterText.small();
+  private static final Rule RULE = new NoClosingPeakPicksUp();
+  private static final String F5 = "  F5: {kind: sequence-timer";
 
-  private static StarterText instantaneous(String measures, double amps) {
-    return SMALL.under(
-        "F2:",
-        StarterText.text(
-            "  F4: {kind: instantaneous, pick-up: %s A, measures: "
-                + measures
-                + ", overreach: 20 %%, accuracy: {pick-up: 4 %%, time: 5 %%}, trips: Q1}",
-            amps));
+  /** With an element without tolerance, so that its pick-up is its setting. */
+  private static Facts facts(double pickUp, String more) {
+    String element =
+        String.format(
+            Locale.ROOT,
+            "  F4: {kind: instantaneous, pick-up: %.9f A, accuracy: {pick-up: 0 %%}, %s,"
+                + " trips: Q1}\n",
+            pickUp,
+            more);
+    return CrusherFacts.of(F5, element + F5);
   }
 
-  private static double greatestSteadyAmps() {
-    return SMALL.review().start("cold").orElseThrow().history().everything().stream()
-        .flatMapToDouble(s -> Arrays.stream(s.trace().statorAmps()))
+  private static Finding judge(double pickUp, String more) {
+    return CrusherFacts.finding(RULE, facts(pickUp, more), "F4");
+  }
+
+  private static double greatest(ToDoubleFunction<Stage> quantity) {
+    return CrusherFacts.of()
+        .permitted()
+        .flatMap(s -> s.history().stages().stream())
+        .mapToDouble(quantity)
         .max()
         .orElseThrow();
   }
 
-  /**
-   * Earliest element: accuracy below its pick-up, and reaching over by its overreach. A pick-up is
-   * the RMS of a sine wave also where peaks are measured.
-   */
-  @ParameterizedTest
-  @ValueSource(strings = {"rms", "peak"})
-  void a_pick_up_within_reach_of_the_steady_current_is_a_breach(String measures) {
-    double limit = greatestSteadyAmps() * 1.20 / 0.96;
-
-    Finding below = instantaneous(measures, 0.99 * limit).finding(RULE, "F4");
-    assertThat(below.verdict()).isEqualTo(Verdict.BREACH);
-    assertThat(below.margin().orElseThrow()).isBetween(0.98, 1.0);
-    assertThat(instantaneous(measures, 1.01 * limit).finding(RULE, "F4").verdict())
-        .isNotIn(Verdict.BREACH, Verdict.CLEAR);
+  private static double ofPeak(ToDoubleFunction<ClosingPeak> quantity) {
+    return greatest(s -> quantity.applyAsDouble(s.peak().orElseThrow()));
   }
 
   @Test
-  void the_limit_found_by_halving_is_the_same() {
-    double limit = Judged.over(RULE, "F4", amps -> instantaneous("rms", amps)).limit(200.0, 600.0);
+  void an_element_that_measures_peaks_operates_above_root_two_of_its_setting() {
+    double limit = ofPeak(ClosingPeak::statorAmps) / Math.sqrt(2.0);
+    String peak = "measures: peak, overreach: 0 %";
 
-    assertThat(limit / (greatestSteadyAmps() * 1.20 / 0.96)).isBetween(0.999, 1.001);
+    assertThat(judge(0.999 * limit, peak).verdict()).isEqualTo(Verdict.BREACH);
+    Finding tight = judge(1.001 * limit, peak);
+    assertThat(tight.verdict()).isEqualTo(Verdict.TIGHT);
+    assertThat(tight.margin().getAsDouble()).isCloseTo(1.001, within(1e-6));
+    assertThat(judge(1.099 * limit, peak).verdict()).isEqualTo(Verdict.TIGHT);
+    assertThat(judge(1.101 * limit, peak).verdict()).isEqualTo(Verdict.CLEAR);
   }
 
   @Test
-  void without_an_instantaneous_element_it_has_no_subject() {
-    assertThat(SMALL.review().notApplicable()).anyMatch(n -> n.rule().equals(RULE));
+  void an_element_that_measures_rms_sees_the_fundamental_without_its_offset() {
+    double limit =
+        greatest(s -> Math.max(s.peak().orElseThrow().statorRms(), s.entry().statorAmps()));
+    String rms = "measures: rms, overreach: 0 %";
+
+    assertThat(limit).isLessThan(ofPeak(ClosingPeak::statorAmps) / Math.sqrt(2.0));
+    assertThat(judge(0.999 * limit, rms).verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(judge(1.001 * limit, rms).verdict()).isEqualTo(Verdict.TIGHT);
+    assertThat(judge(1.101 * limit, rms).verdict()).isEqualTo(Verdict.CLEAR);
   }
 
   @Test
-  void an_instantaneous_element_is_not_asked_by_the_rule_on_starts() {
-    assertThat(instantaneous("peak", 3000.0).review().findings())
-        .noneMatch(f -> f.rule().equals("trip/start") && f.subject().equals("F4"));
+  void overreach_and_accuracy_make_it_pick_up_earlier() {
+    double exact = judge(2000, "measures: rms, overreach: 0 %").margin().getAsDouble();
+    assertThat(judge(2000, "measures: rms, overreach: 10 %").margin().getAsDouble())
+        .isCloseTo(exact / 1.1, within(1e-9));
+    Finding usual =
+        CrusherFacts.finding(
+            RULE,
+            CrusherFacts.of(
+                F5,
+                "  F4: {kind: instantaneous, pick-up: 2000 A, measures: rms, overreach: 0 %,"
+                    + " trips: Q1}\n"
+                    + F5),
+            "F4");
+    assertThat(usual.margin().getAsDouble()).isCloseTo(exact * 0.95, within(1e-9));
+  }
+
+  @Test
+  void in_the_rings_the_ring_current_counts() {
+    double limit = ofPeak(ClosingPeak::ringAmps) / Math.sqrt(2.0);
+    String rotor = "measures: peak, overreach: 0 %, place: rotor, measures-by: direct";
+
+    assertThat(judge(0.999 * limit, rotor).verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(judge(1.001 * limit, rotor).verdict()).isEqualTo(Verdict.TIGHT);
+  }
+
+  @Test
+  void it_says_amperes_and_what_closed() {
+    Finding breach = judge(200, "measures: peak, overreach: 10 %");
+    assertThat(CrusherFacts.says(breach))
+        .contains("A peak at F4 after K")
+        .contains("it may pick up from 257 A peak")
+        .contains("set to 200 A RMS, overreach 10 %");
+    assertThat(CrusherFacts.mend(breach)).contains("Raise its pick-up");
+  }
+
+  @Test
+  void without_peaks_nothing_is_clear() {
+    Facts facts = WithoutPeaks.of(facts(1e5, "measures: peak"));
+    Finding finding = CrusherFacts.finding(RULE, facts, "F4");
+    assertThat(finding.verdict()).isEqualTo(Verdict.NOT_JUDGED);
+    assertThat(CrusherFacts.says(finding)).contains("transient of step 1 was not computed");
+  }
+
+  @Test
+  void without_an_element_it_has_no_subject() {
+    assertThat(RULE.judge(CrusherFacts.of())).isInstanceOf(Rule.Answer.NotApplicable.class);
+    assertThat(CrusherFacts.findings(RULE, CrusherFacts.of())).isEqualTo(List.of());
   }
 }
