@@ -14,6 +14,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import sliprung.chart.StatorBands;
 import sliprung.fixture.StarterText;
+import sliprung.record.Dossier;
 import sliprung.record.RecordWriter;
 import sliprung.record.ReviewJson;
 import sliprung.rulebook.Finding;
@@ -64,9 +65,11 @@ class AnyStarterTest {
     review.starts().forEach(s -> sound(s.history()));
     finite(new ObjectMapper().readTree(ReviewJson.text(review, List.of(), "test")));
     if (seed % 4 == 0) {
-      Map<String, String> files =
-          RecordWriter.files(review, List.of(), StatorBands.of(review.starter()), "test");
-      assertThat(files.values()).allMatch(content -> !content.isBlank());
+      Map<String, byte[]> files =
+          RecordWriter.files(
+              new Dossier(
+                  review, List.of(), List.of(), StatorBands.of(review.starter()), "test"));
+      assertThat(files.values()).allMatch(content -> content.length > 0);
     }
   }
 
