@@ -63,7 +63,7 @@ final class CurvesCommand implements Callable<Integer> {
         .forEach(
             g ->
                 row(
-                    Show.amps(g.ratingAmps()),
+                    Show.amps(g.ratingAmps()).replace('\u00a0', ' '),
                     Show.three(g.notIn10sAmps())
                         + " · "
                         + Show.three(g.within5sAmps())
@@ -77,6 +77,7 @@ final class CurvesCommand implements Callable<Integer> {
   }
 
   private void row(String name, String figures, String reference, String mark) {
-    out.println(String.format("  %-26s%-32s%s (%s)", name, figures, reference, mark));
+    String plain = figures.replace('\u00a0', ' ');
+    out.println(String.format("  %-26s%-32s%s (%s)", name, plain, reference, mark));
   }
 }

@@ -135,9 +135,11 @@ final class ReviewCommand implements Callable<Integer> {
     return String.valueOf(Path.of(name).getFileName());
   }
 
+  /** The name without its ending; a name of dots alone would lead out of the directory. */
   private static String stem(Path file) {
     String name = String.valueOf(file.getFileName());
     int dot = name.lastIndexOf('.');
-    return dot > 0 ? name.substring(0, dot) : name;
+    String stem = dot > 0 ? name.substring(0, dot) : name;
+    return stem.matches("\\.+") ? name : stem;
   }
 }
