@@ -1,6 +1,7 @@
 package sliprung.rulebook.overload;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.TreeSet;
 import sliprung.protection.DeviceResponse;
@@ -76,13 +77,13 @@ public final class NoOverloadIsCreditedWithTheBank implements Rule {
             .filter(d -> d instanceof Device.Overload && d.fitting().place() != Device.Place.BANK)
             .map(Device::tag)
             .toList();
-    Exposure worst = null;
-    for (ComputedStart start : held) {
-      Exposure exposure = Exposure.of(facts, start, relays);
-      if (worst == null || exposure.clearingRatio() < worst.clearingRatio()) {
-        worst = exposure;
-      }
-    }
+    Exposure worst =
+        held.stream()
+            .map(s -> Exposure.of(facts, s, relays))
+            .min(
+                Comparator.comparingDouble(Exposure::clearingRatio)
+                    .thenComparingDouble(Exposure::limitAtSeconds))
+            .orElseThrow();
     String sees = sees(overload, held) + code(facts);
     if (!worst.missing().isEmpty()) {
       return builder.notJudged(worst.missing(), sees + " What a held step heats is not known.");
