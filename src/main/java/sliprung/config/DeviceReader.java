@@ -30,7 +30,7 @@ final class DeviceReader {
     DeviceSettings settings = new DeviceSettings(library, pointCurves);
     Device.Measurement direct = Device.Measurement.DIRECT;
     Device.Measurement ct = Device.Measurement.CT;
-    kind("fuse", direct, settings::fuse, List.of("kind", "place"), "class", "rating");
+    kind("fuse", direct, settings::fuse, List.of("kind", "place"), "class", "rating", "breaking");
     kind(
         "overload",
         direct,

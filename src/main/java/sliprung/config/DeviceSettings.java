@@ -40,7 +40,8 @@ final class DeviceSettings {
         fuseClass.orElse(Device.FuseClass.GG),
         rating,
         general ? library.ggGates(rating) : Optional.empty(),
-        general ? Optional.empty() : Optional.of(library.am()));
+        general ? Optional.empty() : Optional.of(library.am()),
+        section.optionalNumber("breaking", Dimension.CURRENT, Range.POSITIVE));
   }
 
   Device overload(Section section, Device.Fitting fitting) {

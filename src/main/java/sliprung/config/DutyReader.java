@@ -15,9 +15,6 @@ final class DutyReader {
   static Duty read(Section root, int steps) {
     Section duty = root.sectionOrDefaults("duty", "starts", "restart-after", "inching", "plugging");
     Section starts = duty.sectionOrDefaults("starts", "cold", "hot", "per-hour");
-    if (duty.optional("plugging").filter(f -> !f.rawText().equals("none")).isPresent()) {
-      duty.reading().notYetJudged("duty.plugging");
-    }
     return new Duty(
         count(starts, "cold", 1, 2),
         count(starts, "hot", 0, 1),

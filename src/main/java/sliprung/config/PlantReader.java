@@ -22,7 +22,6 @@ final class PlantReader {
     if (field.isEmpty()) {
       return Optional.empty();
     }
-    conductors.reading().notYetJudged("conductors." + side);
     Section cable = field.get().section("area", "metal", "insulation", "ampacity");
     double area = cable.number("area", Dimension.AREA, Range.POSITIVE);
     Conductor.Metal metal =

@@ -66,7 +66,8 @@ final class SwitchgearReader {
             "short-time",
             "closing",
             "opening",
-            "coordination");
+            "coordination",
+            "intermittent-class");
     Optional<Contactor.Place> place =
         contactor.choice(
             "place", Words.inOrder("line", Contactor.Place.LINE, "rotor", Contactor.Place.ROTOR));
@@ -97,7 +98,8 @@ final class SwitchgearReader {
         MotorReader.shortTime(contactor, "short-time"),
         contactor.numberOr("closing", Dimension.TIME, Range.NOT_NEGATIVE, 0.060, "60 ms"),
         contactor.numberOr("opening", Dimension.TIME, Range.NOT_NEGATIVE, 0.060, "60 ms"),
-        coordination(contactor));
+        coordination(contactor),
+        contactor.optionalNumber("intermittent-class", Dimension.NUMBER, Range.POSITIVE));
   }
 
   private static Map<String, Double> ratings(Section contactor) {
@@ -121,13 +123,13 @@ final class SwitchgearReader {
     if (field.isEmpty()) {
       return Optional.empty();
     }
-    contactor.reading().notYetJudged(field.get().path());
-    Section section = field.get().section("type", "with");
+    Section section = field.get().section("type", "with", "up-to");
     Optional<Integer> type =
         section.required("type", "a type of coordination", "2").flatMap(f -> f.whole(1, 2));
     Optional<String> with = section.text("with", "the tag of a fuse or breaker", "F1");
+    OptionalDouble upTo = section.optionalNumber("up-to", Dimension.CURRENT, Range.POSITIVE);
     return type.isPresent() && with.isPresent()
-        ? Optional.of(new Contactor.Coordination(type.get(), with.get()))
+        ? Optional.of(new Contactor.Coordination(type.get(), with.get(), upTo))
         : Optional.empty();
   }
 

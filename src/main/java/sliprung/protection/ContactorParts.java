@@ -5,9 +5,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import sliprung.runup.Stage;
 import sliprung.starter.Contactor;
-import sliprung.starter.ResistorBank;
 import sliprung.starter.ShortTime;
 import sliprung.starter.Starter;
 
@@ -36,10 +34,16 @@ final class ContactorParts {
       if (contactor.place() == Contactor.Place.LINE) {
         parts.add(part(contactor, Channel.stator()));
       } else {
-        List<Integer> cutsOut = sectionsCutOutBy(contactor.tag());
-        if (!cutsOut.isEmpty()) {
+        if (starter.steps().stream().anyMatch(s -> s.contactor().equals(contactor.tag()))) {
           double share = poleShare(contactor);
-          parts.add(part(contactor, Channel.ring(stage -> carries(stage, cutsOut) ? share : 0.0)));
+          parts.add(
+              part(
+                  contactor,
+                  Channel.ring(
+                      stage ->
+                          starter.carriesRingCurrent(contactor.tag(), stage.sectionsIn())
+                              ? share
+                              : 0.0)));
         }
       }
     }
@@ -95,32 +99,5 @@ final class ContactorParts {
     return contactor.poles().orElse(Contactor.Poles.STAR) == Contactor.Poles.DELTA
         ? 1.0 / DELTA
         : 1.0;
-  }
-
-  private List<Integer> sectionsCutOutBy(String tag) {
-    List<Integer> numbers = new ArrayList<>();
-    for (int k = 1; k <= starter.steps().size(); k++) {
-      if (starter.steps().get(k - 1).contactor().equals(tag)) {
-        numbers.add(k);
-      }
-    }
-    return numbers;
-  }
-
-  /**
-   * Whether a contactor carries in a stage. A bridging one carries as long as its section is out;
-   * one that makes the star point only until a later one has taken over.
-   */
-  private boolean carries(Stage stage, List<Integer> cutsOut) {
-    if (starter.resistors().cutOut() == ResistorBank.CutOut.BRIDGING) {
-      return cutsOut.stream().anyMatch(k -> !stage.sectionsIn().contains(k));
-    }
-    int starPoint =
-        stage.sectionsIn().stream()
-                .mapToInt(Integer::intValue)
-                .min()
-                .orElse(starter.sectionCount() + 1)
-            - 1;
-    return cutsOut.contains(starPoint);
   }
 }

@@ -19,6 +19,8 @@ import java.util.TreeMap;
  * @param closingSeconds order to touch of the main contacts
  * @param openingSeconds order to parting of the main contacts
  * @param coordination declared, tested combination with a short-circuit device
+ * @param intermittentClass operating cycles an hour it is declared for (IEC 60947-1, intermittent
+ *     duty: class 12 is 12 an hour)
  */
 public record Contactor(
     String tag,
@@ -31,7 +33,8 @@ public record Contactor(
     Optional<ShortTime> shortTime,
     double closingSeconds,
     double openingSeconds,
-    Optional<Coordination> coordination) {
+    Optional<Coordination> coordination,
+    OptionalDouble intermittentClass) {
 
   /** Where a contactor sits. */
   public enum Place {
@@ -51,8 +54,43 @@ public record Contactor(
    *
    * @param type 1 or 2
    * @param with tag of the short-circuit device
+   * @param upToAmps declared rated conditional short-circuit current I_q, RMS
    */
-  public record Coordination(int type, String with) {}
+  public record Coordination(int type, String with, OptionalDouble upToAmps) {
+
+    /** A coordination without a declared current. */
+    public Coordination(int type, String with) {
+      this(type, with, OptionalDouble.empty());
+    }
+  }
+
+  /** A contactor without a declared class of intermittent duty. */
+  public Contactor(
+      String tag,
+      Place place,
+      Map<String, Double> ratings,
+      OptionalDouble ratedVoltage,
+      Optional<Poles> poles,
+      OptionalDouble thermalAmps,
+      OptionalDouble rotorRatingAmps,
+      Optional<ShortTime> shortTime,
+      double closingSeconds,
+      double openingSeconds,
+      Optional<Coordination> coordination) {
+    this(
+        tag,
+        place,
+        ratings,
+        ratedVoltage,
+        poles,
+        thermalAmps,
+        rotorRatingAmps,
+        shortTime,
+        closingSeconds,
+        openingSeconds,
+        coordination,
+        OptionalDouble.empty());
+  }
 
   /** Copies the map. */
   public Contactor {

@@ -101,14 +101,27 @@ public sealed interface Device {
    * @param ratingAmps rated current
    * @param gates gG gates of that rating; empty for aM, or where the standard has no such rating
    * @param amGates aM gates; empty for gG
+   * @param breakingAmps declared breaking capacity, RMS
    */
   record Fuse(
       Fitting fitting,
       FuseClass fuseClass,
       double ratingAmps,
       Optional<FuseGates> gates,
-      Optional<AmGates> amGates)
+      Optional<AmGates> amGates,
+      OptionalDouble breakingAmps)
       implements Device {
+
+    /** A fuse without a declared breaking capacity. */
+    public Fuse(
+        Fitting fitting,
+        FuseClass fuseClass,
+        double ratingAmps,
+        Optional<FuseGates> gates,
+        Optional<AmGates> amGates) {
+      this(fitting, fuseClass, ratingAmps, gates, amGates, OptionalDouble.empty());
+    }
+
     @Override
     public <R> R fold(Cases<R> cases) {
       return cases.fuse(this);

@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
+import java.util.stream.IntStream;
 
 /**
  * One rotor-resistance starter as described by its user.
@@ -200,6 +201,58 @@ public record Starter(
     return breaker.isPresent()
         ? OptionalDouble.of(breaker.get().openingSeconds())
         : OptionalDouble.empty();
+  }
+
+  /**
+   * Whether a step contactor carries ring current while those sections are in circuit. A bridging
+   * one carries as long as its section is out; one that makes the star point only until a later one
+   * has taken over.
+   *
+   * @param contactor tag
+   * @param sectionsIn numbers from 1
+   */
+  public boolean carriesRingCurrent(String contactor, List<Integer> sectionsIn) {
+    List<Integer> cutsOut =
+        IntStream.rangeClosed(1, steps.size())
+            .filter(k -> steps.get(k - 1).contactor().equals(contactor))
+            .boxed()
+            .toList();
+    if (resistors.cutOut() == ResistorBank.CutOut.BRIDGING) {
+      return cutsOut.stream().anyMatch(k -> !sectionsIn.contains(k));
+    }
+    int starPoint =
+        sectionsIn.stream().mapToInt(Integer::intValue).min().orElse(sectionCount() + 1) - 1;
+    return cutsOut.contains(starPoint);
+  }
+
+  /** The same starter with other protective devices. */
+  public Starter withProtection(List<Device> devices) {
+    return new Starter(
+        name,
+        practice,
+        supply,
+        motor,
+        load,
+        resistors,
+        steps,
+        sequence,
+        timerSpread,
+        levelSpread,
+        contactors,
+        breakers,
+        devices,
+        statorConductor,
+        rotorConductor,
+        duty,
+        limits,
+        margins,
+        fuseWear,
+        interlocks,
+        ambient,
+        evidence,
+        accepted,
+        assumptions,
+        notYetJudged);
   }
 
   /** Number of sections of the bank. */

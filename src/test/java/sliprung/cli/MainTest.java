@@ -371,9 +371,7 @@ class MainTest {
             StarterText.sound()
                 .with("starter: two-steps", "starter: \"two\\e[2J\\a\\u202Esteps\""));
     Path worse =
-        file(
-            "worse.yaml",
-            StarterText.sound().with("power: 55 kW", "power: \"55\\e[2J\\a kW\""));
+        file("worse.yaml", StarterText.sound().with("power: 55 kW", "power: \"55\\e[2J\\a kW\""));
     for (Path path : List.of(hostile, worse)) {
       Ran ran = run("review", path, "--all");
       assertThat(ran.out() + ran.err())

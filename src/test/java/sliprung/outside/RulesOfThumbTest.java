@@ -32,8 +32,7 @@ import sliprung.starter.TorqueCurve;
 @Tag("outside")
 class RulesOfThumbTest {
   private static final double VOLTS = 400.0;
-  private static final CircuitData CIRCUIT =
-      new CircuitData(0.055, 0.22, 6.2, 0.0574, 0.22, 1.165);
+  private static final CircuitData CIRCUIT = new CircuitData(0.055, 0.22, 6.2, 0.0574, 0.22, 1.165);
   private static final Machine MACHINE = new Machine(CIRCUIT, 50.0, 2);
   private static final double RATED_TORQUE = 360.0;
 
@@ -67,8 +66,7 @@ class RulesOfThumbTest {
     double untilHertz = 49.98;
     double ohms =
         Root.find(
-            r ->
-                MACHINE.torque(new Source(VOLTS, 0.0), r, untilHertz / 50.0) - mean * RATED_TORQUE,
+            r -> MACHINE.torque(new Source(VOLTS, 0.0), r, untilHertz / 50.0) - mean * RATED_TORQUE,
             0.6,
             20.0,
             1e-12);

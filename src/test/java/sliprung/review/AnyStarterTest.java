@@ -46,9 +46,7 @@ class AnyStarterTest {
           review.findings().stream()
               .anyMatch(f -> f.rule().equals(rule) && f.verdict() == Verdict.NOT_JUDGED);
       assertThat(answered || reasoned).as(rule).isTrue();
-      assertThat(review.mustJudgeMissing().contains(rule))
-          .as(rule)
-          .isEqualTo(open || !answered);
+      assertThat(review.mustJudgeMissing().contains(rule)).as(rule).isEqualTo(open || !answered);
     }
     for (Finding f : review.findings()) {
       if (f.margin().isPresent()) {
@@ -67,8 +65,7 @@ class AnyStarterTest {
     if (seed % 4 == 0) {
       Map<String, byte[]> files =
           RecordWriter.files(
-              new Dossier(
-                  review, List.of(), List.of(), StatorBands.of(review.starter()), "test"));
+              new Dossier(review, List.of(), List.of(), StatorBands.of(review.starter()), "test"));
       assertThat(files.values()).allMatch(content -> content.length > 0);
     }
   }
@@ -235,7 +232,9 @@ class AnyStarterTest {
       y.append("level-spread: 0 %\n");
       y.append("contactors:\n  K1: {place: line");
       if (chance(0.8)) {
-        y.append(", ratings: {AC-2: ").append(n(between(60, 300))).append(" A}, rated-voltage: 400 V");
+        y.append(", ratings: {AC-2: ")
+            .append(n(between(60, 300)))
+            .append(" A}, rated-voltage: 400 V");
       }
       y.append(", closing: 0 ms, opening: 50 ms}\n");
       for (int i = 1; i <= sections; i++) {

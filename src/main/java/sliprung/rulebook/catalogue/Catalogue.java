@@ -14,6 +14,7 @@ import java.util.TreeMap;
 import java.util.TreeSet;
 import sliprung.rulebook.DecidingDefaults;
 import sliprung.rulebook.Rule;
+import sliprung.rulebook.conductor.ConductorRules;
 import sliprung.rulebook.contactor.ContactorRules;
 import sliprung.rulebook.data.DataRules;
 import sliprung.rulebook.held.EveryHeldStepIsCleared;
@@ -29,6 +30,7 @@ import sliprung.rulebook.sequence.EveryStepPullsThrough;
 import sliprung.rulebook.sequence.NoLevelIsMetAtRest;
 import sliprung.rulebook.sequence.NoTorquePeakExceedsTheLimit;
 import sliprung.rulebook.sequence.TheSequenceIsSupervised;
+import sliprung.rulebook.shortcircuit.ShortCircuitRules;
 import sliprung.rulebook.trip.NoClosingPeakPicksUp;
 import sliprung.rulebook.trip.NoDeviceOperatesInAPermittedStart;
 import sliprung.rulebook.trip.NothingCreepsToATripInService;
@@ -55,27 +57,6 @@ public final class Catalogue {
               Map.entry("sequence/late", "Does any step close long after the motor has settled?"),
               Map.entry("sequence/spread", "Do the closings keep their order over the spreads?"),
               Map.entry("sequence/grading", "Are the closing currents of the steps even?"),
-              Map.entry(
-                  "contactor/carrying",
-                  "Does every contactor stand what it carries, and how long?"),
-              Map.entry("contactor/rotor-making", "Do step contactors make what they close onto?"),
-              Map.entry(
-                  "contactor/rotor-voltage", "Does the rotor voltage fit the step contactors?"),
-              Map.entry(
-                  "contactor/operations", "Are the contactors rated for that many operations?"),
-              Map.entry("contactor/short-circuit", "Is the coordination declared and tested?"),
-              Map.entry(
-                  "contactor/welded",
-                  "Is every step proven open before the line contactor closes?"),
-              Map.entry("contactor/order", "Does the line contactor always open first?"),
-              Map.entry("overload/class", "Does the trip class fit start and stall?"),
-              Map.entry("overload/rotor", "Is no overload credited with protecting the bank?"),
-              Map.entry("short-circuit/rating", "Is the short-circuit device rated as allowed?"),
-              Map.entry("short-circuit/capacity", "Does it break the greatest fault current?"),
-              Map.entry("short-circuit/minimum", "Does the least fault current operate it?"),
-              Map.entry("short-circuit/upstream", "Does it discriminate against the one upstream?"),
-              Map.entry("conductor/ampacity", "Do the cables carry what they must for good?"),
-              Map.entry("conductor/withstand", "Do the cables stand the clearing I²t?"),
               Map.entry("resistor/duty", "Does the bank stand the starts of an hour?"),
               Map.entry("resistor/class", "Which duty class does the bank amount to?"),
               Map.entry("resistor/restart", "When may it be started again, and what limits it?")));
@@ -102,7 +83,9 @@ public final class Catalogue {
                 new NoTorquePeakExceedsTheLimit(),
                 new EverySectionStandsThePermittedStarts()));
     rules.addAll(ContactorRules.ALL);
+    rules.addAll(ConductorRules.ALL);
     rules.addAll(OverloadRules.ALL);
+    rules.addAll(ShortCircuitRules.ALL);
     rules.addAll(DataRules.ALL);
     rules.sort(Comparator.comparing(r -> r.info().name()));
     return List.copyOf(rules);

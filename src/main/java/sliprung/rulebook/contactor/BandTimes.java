@@ -9,10 +9,11 @@ import sliprung.rulebook.Facts;
 import sliprung.starter.Device;
 
 /** Operating times out of the devices' bands. */
-final class BandTimes implements OperatingTimes {
+public final class BandTimes implements OperatingTimes {
   private final Bands bands;
 
-  BandTimes(Facts facts) {
+  /** Of the devices of these facts. */
+  public BandTimes(Facts facts) {
     this.bands = facts.bands();
   }
 

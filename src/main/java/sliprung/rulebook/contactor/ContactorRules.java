@@ -10,9 +10,16 @@ public final class ContactorRules {
   public static final List<Rule> ALL =
       List.of(
           new EveryContactorBreaksWhatItOpens(),
+          new EveryContactorCarriesItsCurrent(),
           new TheLineContactorFitsItsDuty(),
           new TheLineContactorMakesWhatItClosesOnto(),
-          new TheRelayTakesOverFromTheFuse());
+          new EveryContactorIsRatedForItsOperations(),
+          new TheLineContactorOpensFirst(),
+          new EveryStepContactorMakesWhatItClosesOnto(),
+          new TheRotorVoltageFitsTheStepContactors(),
+          new TheCoordinationIsDeclared(),
+          new TheRelayTakesOverFromTheFuse(),
+          new NothingClosesOntoShortedRings());
 
   private ContactorRules() {}
 }

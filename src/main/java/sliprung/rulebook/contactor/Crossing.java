@@ -4,7 +4,7 @@ import java.util.OptionalDouble;
 import java.util.function.DoubleUnaryOperator;
 
 /** Where two time-current laws cross. */
-final class Crossing {
+public final class Crossing {
   private static final int STEPS_A_DECADE = 400;
   private static final double PRECISION = 1e-9;
 
@@ -19,7 +19,7 @@ final class Crossing {
    * @param toAmps above {@code fromAmps}
    * @return amperes, the upper end where it still holds there; empty where it never holds
    */
-  static OptionalDouble greatestFirst(
+  public static OptionalDouble greatestFirst(
       DoubleUnaryOperator one, DoubleUnaryOperator other, double fromAmps, double toAmps) {
     double above = toAmps;
     double[] grid = grid(fromAmps, toAmps);
@@ -36,7 +36,7 @@ final class Crossing {
    * The least current at which one law is no later than another; the arguments are those of {@link
    * #greatestFirst}.
    */
-  static OptionalDouble leastFirst(
+  public static OptionalDouble leastFirst(
       DoubleUnaryOperator one, DoubleUnaryOperator other, double fromAmps, double toAmps) {
     double below = fromAmps;
     for (double amps : grid(fromAmps, toAmps)) {

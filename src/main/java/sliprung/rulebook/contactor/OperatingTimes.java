@@ -6,7 +6,7 @@ import sliprung.protection.Edge;
 import sliprung.starter.Device;
 
 /** How long devices take at a constant current. */
-interface OperatingTimes {
+public interface OperatingTimes {
 
   /**
    * Operating time from cold.

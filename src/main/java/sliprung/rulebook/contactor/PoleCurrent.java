@@ -26,6 +26,15 @@ final class PoleCurrent {
     return isDelta(contactor) ? ringAmps / practice.figure("rotor.delta-share").value() : ringAmps;
   }
 
+  /** {@code a pole, in delta: ring current over 1.4}. */
+  static String words(Contactor contactor) {
+    return switch (contactor.poles().orElse(Contactor.Poles.STAR)) {
+      case DELTA -> "a pole in delta, ring current over 1.4 (in theory over 1.73)";
+      case TWO -> "a pole of two, the whole ring current";
+      case STAR -> "a pole in star, the whole ring current";
+    };
+  }
+
   private static boolean isDelta(Contactor contactor) {
     return contactor.poles().equals(java.util.Optional.of(Contactor.Poles.DELTA));
   }

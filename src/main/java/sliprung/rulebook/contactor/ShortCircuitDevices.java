@@ -16,7 +16,7 @@ import sliprung.starter.Starter;
  * breaker. Relays with a delay that open a breaker are counted only where there is none of those: a
  * contactor's breaking capacity shall not hang on the setting of a delayed relay next to a fuse.
  */
-final class ShortCircuitDevices {
+public final class ShortCircuitDevices {
   private final List<Member> members;
 
   private record Member(Device device, double openingSeconds) {}
@@ -26,7 +26,7 @@ final class ShortCircuitDevices {
   }
 
   /** Those of a starter. */
-  static ShortCircuitDevices of(Starter starter) {
+  public static ShortCircuitDevices of(Starter starter) {
     List<Member> made = new ArrayList<>();
     List<Member> delayed = new ArrayList<>();
     for (Device device : starter.protection()) {
@@ -54,12 +54,31 @@ final class ShortCircuitDevices {
   }
 
   /** Whether there is none. */
-  boolean isEmpty() {
+  public boolean isEmpty() {
     return members.isEmpty();
   }
 
+  /** The devices, in the file's order. */
+  public List<Device> devices() {
+    return members.stream().map(Member::device).toList();
+  }
+
+  /** Whether a device is one of them. */
+  public boolean has(String tag) {
+    return members.stream().anyMatch(m -> m.device().tag().equals(tag));
+  }
+
+  /** Opening time in s of what a device of them opens; 0 where it opens the circuit itself. */
+  public double openingSeconds(Device device) {
+    return members.stream()
+        .filter(m -> m.device().equals(device))
+        .mapToDouble(Member::openingSeconds)
+        .findFirst()
+        .orElse(0.0);
+  }
+
   /** Their tags: {@code F1}, {@code F1 or F4}. */
-  String tags() {
+  public String tags() {
     return String.join(" or ", members.stream().map(m -> m.device().tag()).toList());
   }
 
@@ -70,7 +89,7 @@ final class ShortCircuitDevices {
    * @param unknown time that a device counts with where its time cannot be told, s
    * @return seconds, infinite: never
    */
-  double clearedBySeconds(OperatingTimes times, double amps, double unknown) {
+  public double clearedBySeconds(OperatingTimes times, double amps, double unknown) {
     double first = Double.POSITIVE_INFINITY;
     for (Member member : members) {
       OptionalDouble seconds = times.seconds(member.device(), Edge.SLOW, amps);

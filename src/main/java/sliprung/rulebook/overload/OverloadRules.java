@@ -7,7 +7,11 @@ import sliprung.rulebook.Rule;
 public final class OverloadRules {
 
   /** Every one. */
-  public static final List<Rule> ALL = List.of(new TheDialFitsTheMotor());
+  public static final List<Rule> ALL =
+      List.of(
+          new TheClassFitsStartAndStall(),
+          new TheDialFitsTheMotor(),
+          new NoOverloadIsCreditedWithTheBank());
 
   private OverloadRules() {}
 }
