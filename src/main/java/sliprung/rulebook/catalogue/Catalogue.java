@@ -19,9 +19,11 @@ import sliprung.rulebook.data.DataRules;
 import sliprung.rulebook.held.EveryHeldStepIsCleared;
 import sliprung.rulebook.held.SomethingSeesEveryHeldStep;
 import sliprung.rulebook.held.WhatOpensIsAbleToBreak;
+import sliprung.rulebook.locked.JammedWhileRunningIsCleared;
 import sliprung.rulebook.locked.LockedOnAStepIsCleared;
 import sliprung.rulebook.locked.LockedWithRingsShortedIsCleared;
 import sliprung.rulebook.locked.LockedWithSequenceRunningIsCleared;
+import sliprung.rulebook.locked.TheRingsStandARotorAtRest;
 import sliprung.rulebook.locked.TheRotorBreaksAway;
 import sliprung.rulebook.overload.OverloadRules;
 import sliprung.rulebook.resistor.EverySectionStandsThePermittedStarts;
@@ -49,8 +51,6 @@ public final class Catalogue {
                   "trip/voltage-dip", "Do step and line contactors stand the dip at each closing?"),
               Map.entry(
                   "held/skipped", "What peak and making current when two sections go at once?"),
-              Map.entry("locked/running", "Is a rotor that jams while running cleared in time?"),
-              Map.entry("locked/rings", "Do slip rings and brushes stand a rotor at rest?"),
               Map.entry("sequence/early", "Does any step close too early?"),
               Map.entry("sequence/late", "Does any step close long after the motor has settled?"),
               Map.entry("sequence/spread", "Do the closings keep their order over the spreads?"),
@@ -96,6 +96,8 @@ public final class Catalogue {
                 new LockedOnAStepIsCleared(),
                 new LockedWithRingsShortedIsCleared(),
                 new TheRotorBreaksAway(),
+                new JammedWhileRunningIsCleared(),
+                new TheRingsStandARotorAtRest(),
                 new EveryStepPullsThrough(),
                 new NoLevelIsMetAtRest(),
                 new TheSequenceIsSupervised(),
