@@ -31,9 +31,11 @@ import sliprung.rulebook.sequence.EveryStepPullsThrough;
 import sliprung.rulebook.sequence.NoLevelIsMetAtRest;
 import sliprung.rulebook.sequence.NoTorquePeakExceedsTheLimit;
 import sliprung.rulebook.sequence.TheSequenceIsSupervised;
+import sliprung.rulebook.trip.EveryContactorStandsTheDip;
 import sliprung.rulebook.trip.NoClosingPeakPicksUp;
 import sliprung.rulebook.trip.NoDeviceOperatesInAPermittedStart;
 import sliprung.rulebook.trip.NothingCreepsToATripInService;
+import sliprung.rulebook.trip.TheStartSparesTheFuse;
 
 /** The rules, an explicit list. */
 public final class Catalogue {
@@ -44,11 +46,6 @@ public final class Catalogue {
   private static final Map<String, String> NOT_BUILT =
       new TreeMap<>(
           Map.ofEntries(
-              Map.entry(
-                  "trip/fuse-wear",
-                  "Does the start stay far enough below the fuse's pre-arcing current not to age it?"),
-              Map.entry(
-                  "trip/voltage-dip", "Do step and line contactors stand the dip at each closing?"),
               Map.entry(
                   "held/skipped", "What peak and making current when two sections go at once?"),
               Map.entry("sequence/early", "Does any step close too early?"),
@@ -89,6 +86,8 @@ public final class Catalogue {
                 new NoDeviceOperatesInAPermittedStart(),
                 new NothingCreepsToATripInService(),
                 new NoClosingPeakPicksUp(),
+                new TheStartSparesTheFuse(),
+                new EveryContactorStandsTheDip(),
                 new EveryHeldStepIsCleared(),
                 new SomethingSeesEveryHeldStep(),
                 new WhatOpensIsAbleToBreak(),
