@@ -44,9 +44,6 @@ final class PlantReader {
   Limits limits() {
     Section limits = root.sectionOrDefaults("limits", "closing-current", "torque-peak");
     Section closing = limits.sectionOrDefaults("closing-current", "stator", "rotor");
-    if (limits.has("closing-current")) {
-      root.reading().notYetJudged("limits.closing-current");
-    }
     return new Limits(
         closing.optionalNumber("stator", Dimension.CURRENT, Range.POSITIVE),
         closing.optionalNumber("rotor", Dimension.CURRENT, Range.POSITIVE),

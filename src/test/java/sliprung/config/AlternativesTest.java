@@ -342,7 +342,7 @@ class AlternativesTest {
         .contains(new Contactor.Coordination(2, "F1"));
     assertThat(starter.notYetJudged())
         .containsExactlyInAnyOrder(
-            "contactors.K12.coordination", "duty.plugging", "limits.closing-current", "fuse-wear");
+            "contactors.K12.coordination", "duty.plugging");
   }
 
   @Test

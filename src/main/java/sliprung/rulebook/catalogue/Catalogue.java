@@ -18,6 +18,7 @@ import sliprung.rulebook.contactor.ContactorRules;
 import sliprung.rulebook.data.DataRules;
 import sliprung.rulebook.held.EveryHeldStepIsCleared;
 import sliprung.rulebook.held.SomethingSeesEveryHeldStep;
+import sliprung.rulebook.held.TwoSectionsAtOnceAreStood;
 import sliprung.rulebook.held.WhatOpensIsAbleToBreak;
 import sliprung.rulebook.locked.JammedWhileRunningIsCleared;
 import sliprung.rulebook.locked.LockedOnAStepIsCleared;
@@ -29,8 +30,12 @@ import sliprung.rulebook.overload.OverloadRules;
 import sliprung.rulebook.resistor.EverySectionStandsThePermittedStarts;
 import sliprung.rulebook.sequence.EveryStepPullsThrough;
 import sliprung.rulebook.sequence.NoLevelIsMetAtRest;
+import sliprung.rulebook.sequence.NoStepClosesTooEarly;
+import sliprung.rulebook.sequence.NoStepLingers;
+import sliprung.rulebook.sequence.TheClosingsAreEven;
 import sliprung.rulebook.sequence.NoTorquePeakExceedsTheLimit;
 import sliprung.rulebook.sequence.TheSequenceIsSupervised;
+import sliprung.rulebook.sequence.TheStepsKeepTheirOrder;
 import sliprung.rulebook.trip.EveryContactorStandsTheDip;
 import sliprung.rulebook.trip.NoClosingPeakPicksUp;
 import sliprung.rulebook.trip.NoDeviceOperatesInAPermittedStart;
@@ -46,12 +51,6 @@ public final class Catalogue {
   private static final Map<String, String> NOT_BUILT =
       new TreeMap<>(
           Map.ofEntries(
-              Map.entry(
-                  "held/skipped", "What peak and making current when two sections go at once?"),
-              Map.entry("sequence/early", "Does any step close too early?"),
-              Map.entry("sequence/late", "Does any step close long after the motor has settled?"),
-              Map.entry("sequence/spread", "Do the closings keep their order over the spreads?"),
-              Map.entry("sequence/grading", "Are the closing currents of the steps even?"),
               Map.entry(
                   "contactor/carrying",
                   "Does every contactor stand what it carries, and how long?"),
@@ -91,6 +90,7 @@ public final class Catalogue {
                 new EveryHeldStepIsCleared(),
                 new SomethingSeesEveryHeldStep(),
                 new WhatOpensIsAbleToBreak(),
+                new TwoSectionsAtOnceAreStood(),
                 new LockedWithSequenceRunningIsCleared(),
                 new LockedOnAStepIsCleared(),
                 new LockedWithRingsShortedIsCleared(),
@@ -99,6 +99,10 @@ public final class Catalogue {
                 new TheRingsStandARotorAtRest(),
                 new EveryStepPullsThrough(),
                 new NoLevelIsMetAtRest(),
+                new NoStepClosesTooEarly(),
+                new NoStepLingers(),
+                new TheStepsKeepTheirOrder(),
+                new TheClosingsAreEven(),
                 new TheSequenceIsSupervised(),
                 new NoTorquePeakExceedsTheLimit(),
                 new EverySectionStandsThePermittedStarts()));

@@ -72,8 +72,8 @@ public final class EveryContactorStandsTheDip implements Rule {
     }
     for (ComputedStart start : facts.permitted().filter(s -> s.place() == 1).toList()) {
       for (Stage stage : start.history().stages()) {
-        double volts = stage.trace().terminalVolts()[0];
-        double amps = stage.trace().statorAmps()[0];
+        double volts = stage.entry().terminalVolts();
+        double amps = stage.entry().statorAmps();
         put(worst, stage.closedBy(), new Dip(start, volts, amps, closes));
         for (Contactor line : facts.starter().lineContactors()) {
           put(worst, line.tag(), new Dip(start, volts, amps, holds));
