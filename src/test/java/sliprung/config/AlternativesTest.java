@@ -341,8 +341,7 @@ class AlternativesTest {
     assertThat(starter.contactor("K12").orElseThrow().coordination())
         .contains(new Contactor.Coordination(2, "F1"));
     assertThat(starter.notYetJudged())
-        .containsExactlyInAnyOrder(
-            "contactors.K12.coordination", "duty.plugging");
+        .containsExactlyInAnyOrder("contactors.K12.coordination", "duty.plugging");
   }
 
   @Test

@@ -28,12 +28,15 @@ import sliprung.rulebook.locked.TheRingsStandARotorAtRest;
 import sliprung.rulebook.locked.TheRotorBreaksAway;
 import sliprung.rulebook.overload.OverloadRules;
 import sliprung.rulebook.resistor.EverySectionStandsThePermittedStarts;
+import sliprung.rulebook.resistor.EverySectionStandsTheStartsOfAnHour;
+import sliprung.rulebook.resistor.TheBankHasADutyClass;
+import sliprung.rulebook.resistor.TheRestartIsKnown;
 import sliprung.rulebook.sequence.EveryStepPullsThrough;
 import sliprung.rulebook.sequence.NoLevelIsMetAtRest;
 import sliprung.rulebook.sequence.NoStepClosesTooEarly;
 import sliprung.rulebook.sequence.NoStepLingers;
-import sliprung.rulebook.sequence.TheClosingsAreEven;
 import sliprung.rulebook.sequence.NoTorquePeakExceedsTheLimit;
+import sliprung.rulebook.sequence.TheClosingsAreEven;
 import sliprung.rulebook.sequence.TheSequenceIsSupervised;
 import sliprung.rulebook.sequence.TheStepsKeepTheirOrder;
 import sliprung.rulebook.trip.EveryContactorStandsTheDip;
@@ -71,10 +74,7 @@ public final class Catalogue {
               Map.entry("short-circuit/minimum", "Does the least fault current operate it?"),
               Map.entry("short-circuit/upstream", "Does it discriminate against the one upstream?"),
               Map.entry("conductor/ampacity", "Do the cables carry what they must for good?"),
-              Map.entry("conductor/withstand", "Do the cables stand the clearing I²t?"),
-              Map.entry("resistor/duty", "Does the bank stand the starts of an hour?"),
-              Map.entry("resistor/class", "Which duty class does the bank amount to?"),
-              Map.entry("resistor/restart", "When may it be started again, and what limits it?")));
+              Map.entry("conductor/withstand", "Do the cables stand the clearing I²t?")));
 
   private Catalogue() {}
 
@@ -105,7 +105,10 @@ public final class Catalogue {
                 new TheClosingsAreEven(),
                 new TheSequenceIsSupervised(),
                 new NoTorquePeakExceedsTheLimit(),
-                new EverySectionStandsThePermittedStarts()));
+                new EverySectionStandsThePermittedStarts(),
+                new EverySectionStandsTheStartsOfAnHour(),
+                new TheBankHasADutyClass(),
+                new TheRestartIsKnown()));
     rules.addAll(ContactorRules.ALL);
     rules.addAll(OverloadRules.ALL);
     rules.addAll(DataRules.ALL);

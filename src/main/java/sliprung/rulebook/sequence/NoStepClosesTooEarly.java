@@ -121,12 +121,7 @@ public final class NoStepClosesTooEarly implements Rule {
         begins,
         " in the stator");
     limit(
-        cases,
-        start,
-        after.entry().ringAmps(),
-        limits.closingRotorAmps(),
-        begins,
-        " in the rings");
+        cases, start, after.entry().ringAmps(), limits.closingRotorAmps(), begins, " in the rings");
     return cases;
   }
 
