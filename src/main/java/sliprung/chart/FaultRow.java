@@ -98,6 +98,7 @@ public record FaultRow(
       case LOCKED -> "locked/sequence";
       case LOCKED_STEP -> "locked/step";
       case RINGS_SHORTED -> "locked/shorted";
+      case RUNNING_LOCKED -> "locked/running";
       default -> "held/exposure";
     };
   }

@@ -68,14 +68,7 @@ final class BankReader {
         bank.numberOr("leads", Dimension.RESISTANCE, Range.NOT_NEGATIVE, 0.0, "0 ohm"),
         bank.numberOr("tolerance", Dimension.SHARE, Range.SPREAD, 0.10, "10 %"),
         bank.numberOr("hot-rise", Dimension.SHARE, Range.NOT_NEGATIVE, 0.20, "20 %"),
-        enclosure());
-  }
-
-  private double enclosure() {
-    if (bank.has("enclosure")) {
-      bank.reading().notYetJudged("resistors.enclosure");
-    }
-    return bank.numberOr("enclosure", Dimension.TIME, Range.POSITIVE, 1200.0, "20 min");
+        bank.numberOr("enclosure", Dimension.TIME, Range.POSITIVE, 1200.0, "20 min"));
   }
 
   private List<ResistorBank.Section> sections(boolean sameLimit) {

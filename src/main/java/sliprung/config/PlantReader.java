@@ -43,9 +43,6 @@ final class PlantReader {
   Limits limits() {
     Section limits = root.sectionOrDefaults("limits", "closing-current", "torque-peak");
     Section closing = limits.sectionOrDefaults("closing-current", "stator", "rotor");
-    if (limits.has("closing-current")) {
-      root.reading().notYetJudged("limits.closing-current");
-    }
     return new Limits(
         closing.optionalNumber("stator", Dimension.CURRENT, Range.POSITIVE),
         closing.optionalNumber("rotor", Dimension.CURRENT, Range.POSITIVE),
@@ -68,9 +65,6 @@ final class PlantReader {
   }
 
   double fuseWear() {
-    if (root.has("fuse-wear")) {
-      root.reading().notYetJudged("fuse-wear");
-    }
     return root.numberOr("fuse-wear", Dimension.NUMBER, Range.FRACTION, 0.65, "0.65");
   }
 }

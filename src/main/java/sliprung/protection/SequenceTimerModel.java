@@ -2,6 +2,7 @@ package sliprung.protection;
 
 import java.util.Optional;
 import java.util.OptionalDouble;
+import sliprung.runup.Scenario;
 import sliprung.runup.Stage;
 import sliprung.runup.StartHistory;
 import sliprung.runup.Trace;
@@ -59,6 +60,9 @@ final class SequenceTimerModel implements EdgeModel {
   }
 
   private double stopSeconds(StartHistory history, double synchronousSpeed) {
+    if (history.scenario().kind() == Scenario.Kind.RUNNING_LOCKED) {
+      return 0.0; // its stop event came long ago, whichever it is
+    }
     return untilSpeedShare.isEmpty()
         ? history.lastClosingSeconds().orElse(Double.POSITIVE_INFINITY)
         : reachedSeconds(history, untilSpeedShare.getAsDouble() * synchronousSpeed);

@@ -19,6 +19,7 @@ import sliprung.runup.StartSimulator;
 import sliprung.runup.StartSimulator.RunningPoint;
 import sliprung.starter.Duty;
 import sliprung.starter.Motor;
+import sliprung.starter.ResistorBank;
 import sliprung.starter.Starter;
 import sliprung.tolerance.Corner;
 import sliprung.tolerance.Corners;
@@ -92,6 +93,9 @@ final class StartComputation {
 
   /** The history of a fault; at the nominal corner also a steady one has the peaks. */
   private StartHistory fault(Scenario fault, Both at, RunUpMethod method) {
+    if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
+      return simulator.run(fault, at.conditions()); // nothing closes: there is no closing peak
+    }
     if (method.isTransient()) {
       return simulator.runTransient(fault, at.conditions());
     }
@@ -135,11 +139,38 @@ final class StartComputation {
     PartPreload hot = new PartPreload(stator, ring, 0.0, sections);
     for (Scenario fault : faults()) {
       StartProtection history = evaluator.over(fault(fault, both, method));
-      starts.add(
-          fault(corner, history, ComputedStart.From.COLD, DevicePreload.COLD, PartPreload.COLD));
+      if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
+        starts.add(
+            fault(corner, history, ComputedStart.From.HOT, warmFromLightLoad(conditions), hot));
+        continue;
+      }
+      // a reclosed motor was running just before: it has no cold start
+      if (fault.kind() != Scenario.Kind.RECLOSED) {
+        starts.add(
+            fault(corner, history, ComputedStart.From.COLD, DevicePreload.COLD, PartPreload.COLD));
+      }
       starts.add(fault(corner, history, ComputedStart.From.HOT, forgotten, hot));
     }
     return new AtCorner(corner, running, starts);
+  }
+
+  /**
+   * What a relay still holds of the running when the motor jams: real heat, but only that of the
+   * least load of the spread. A relay follows the load in minutes, the motor in hours.
+   */
+  private DevicePreload warmFromLightLoad(Conditions conditions) {
+    double light = Math.min(conditions.loadFactor(), 1.0 + starter.load().spreadLow());
+    Conditions lightly =
+        new Conditions(
+            conditions.source(),
+            light,
+            conditions.bankFactor(),
+            conditions.timerFactor(),
+            conditions.levelFactor());
+    return simulator
+        .runningPoint(lightly)
+        .map(r -> DevicePreload.running(r.point().statorAmps(), r.point().ringAmps()))
+        .orElse(DevicePreload.COLD);
   }
 
   private ComputedStart permitted(
@@ -196,6 +227,25 @@ final class StartComputation {
       faults.add(new Scenario(Scenario.Kind.LOCKED_STEP, step, Scenario.LoadMode.START));
     }
     faults.add(new Scenario(Scenario.Kind.RINGS_SHORTED, 0, Scenario.LoadMode.START));
+    faults.add(new Scenario(Scenario.Kind.RUNNING_LOCKED, 0, Scenario.LoadMode.START));
+    if (!starter.interlocks().stepsOpenBeforeLine()) {
+      faults.addAll(stepsClosedAtLineClosing());
+    }
+    return faults;
+  }
+
+  /** What only an interlock that proves every step contactor open excludes. */
+  private List<Scenario> stepsClosedAtLineClosing() {
+    List<Scenario> faults = new ArrayList<>();
+    int sections = starter.sectionCount();
+    boolean starPoint = starter.resistors().cutOut() == ResistorBank.CutOut.STAR_POINT;
+    for (int step = 1; step <= sections; step++) {
+      faults.add(
+          starPoint && step == sections
+              ? new Scenario(Scenario.Kind.RINGS_SHORTED_START, 0, Scenario.LoadMode.START)
+              : new Scenario(Scenario.Kind.WELDED, step, Scenario.LoadMode.START));
+    }
+    faults.add(new Scenario(Scenario.Kind.RECLOSED, 0, Scenario.LoadMode.START));
     return faults;
   }
 }

@@ -25,6 +25,12 @@ public final class Exposures {
   /** The finding about one subject over every start that concerns it. */
   public static Finding finding(
       Facts facts, Rule.Info info, String subject, List<ComputedStart> starts) {
+    return finding(facts, info, subject, starts, facts.wanted(info.name()));
+  }
+
+  /** Likewise, with a wanted clearing ratio that is not the rule's own wanted margin. */
+  public static Finding finding(
+      Facts facts, Rule.Info info, String subject, List<ComputedStart> starts, double wanted) {
     FindingBuilder builder = FindingBuilder.of(facts, info, subject);
     Exposure worst = worst(facts, starts.stream()).orElseThrow();
     builder.at(worst.start()).edge(sliprung.protection.Edge.SLOW);
@@ -36,7 +42,7 @@ public final class Exposures {
     builder.figures(worst.clearedAtSeconds(), worst.limitAtSeconds(), "s");
     double ratio = worst.clearingRatio();
     String sentence = where(worst.start()) + ": " + worst.clause() + ".";
-    if (ratio < facts.wanted(info.name()) && worst.unproven().isPresent()) {
+    if (ratio < wanted && worst.unproven().isPresent()) {
       String tag =
           facts
               .starter()
@@ -57,7 +63,7 @@ public final class Exposures {
                   + tag
                   + " breaks this current.");
     }
-    builder.margin(ratio).mend(mend(facts, worst));
+    builder.margin(ratio).wanted(wanted).mend(mend(facts, worst));
     if (Double.isInfinite(ratio)) {
       return builder.says(sentence).byMargin();
     }
@@ -86,7 +92,7 @@ public final class Exposures {
             + " in the rings)";
     return switch (start.scenario().kind()) {
       case LOCKED -> scenario + ", the motor ends on step " + last.step() + " and " + draws;
-      case LOCKED_STEP, RINGS_SHORTED -> scenario + " the motor " + draws;
+      case LOCKED_STEP, RINGS_SHORTED, RUNNING_LOCKED -> scenario + " the motor " + draws;
       default ->
           speed == 0.0
               ? scenario + " the rotor stands and " + draws

@@ -22,7 +22,18 @@ public record Scenario(Kind kind, int step, LoadMode load) {
     /** The rotor does not turn and the sequence is frozen on {@code step}. */
     LOCKED_STEP,
     /** At rest on the last step's circuit. */
-    RINGS_SHORTED
+    RINGS_SHORTED,
+    /** Jams while running: at rest on the last step's circuit, every step contactor closed. */
+    RUNNING_LOCKED,
+    /** The last contactor of a star-point bank is welded: started on the last step's circuit. */
+    RINGS_SHORTED_START,
+    /** Contactor {@code step} is welded: started with what it cuts out already out. */
+    WELDED,
+    /**
+     * The line contactor drops and returns with every step contactor still closed. How long it was
+     * off is not known; the rotor is taken to have coasted to rest, which draws most.
+     */
+    RECLOSED
   }
 
   /** Which load the motor meets. */
@@ -51,6 +62,10 @@ public record Scenario(Kind kind, int step, LoadMode load) {
           case LOCKED -> "locked";
           case LOCKED_STEP -> "locked-" + step;
           case RINGS_SHORTED -> "rings-shorted";
+          case RUNNING_LOCKED -> "running-locked";
+          case RINGS_SHORTED_START -> "rings-shorted-start";
+          case WELDED -> "welded-" + step;
+          case RECLOSED -> "reclosed";
         };
     return load == LoadMode.RUNNING ? base + "-running" : base;
   }
@@ -65,6 +80,10 @@ public record Scenario(Kind kind, int step, LoadMode load) {
           case LOCKED -> "locked, sequence running";
           case LOCKED_STEP -> "locked on step " + step;
           case RINGS_SHORTED -> "at rest with rings shorted";
+          case RUNNING_LOCKED -> "jammed while running";
+          case RINGS_SHORTED_START -> "started with rings shorted";
+          case WELDED -> "started with step contactor " + step + " welded";
+          case RECLOSED -> "reclosed with every step contactor closed";
         };
     return load == LoadMode.RUNNING ? base + " at running load" : base;
   }

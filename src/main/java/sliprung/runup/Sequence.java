@@ -3,6 +3,7 @@ package sliprung.runup;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import sliprung.machine.Machine;
 import sliprung.starter.ResistorBank;
@@ -30,7 +31,7 @@ final class Sequence {
   private boolean armed = true;
   private double reference;
   private double lastClosing;
-  private boolean lastStepClosed;
+  private OptionalDouble lastStepSeconds = OptionalDouble.empty();
   private int step = 1;
 
   private record Pending(double atSeconds, int index) {}
@@ -43,6 +44,32 @@ final class Sequence {
     for (int i = 1; i <= starter.sectionCount(); i++) {
       sectionsIn.add(i);
     }
+    switch (scenario.kind()) {
+      case WELDED -> weld(scenario.step() - 1);
+      case RINGS_SHORTED_START -> weld(starter.sectionCount() - 1);
+      case RECLOSED -> closeEverything();
+      default -> {
+        // every step contactor is open when the line contactor closes
+      }
+    }
+  }
+
+  /** A welded contactor is closed from the beginning; nothing in the wiring notices. */
+  private void weld(int index) {
+    cutOutBy(index);
+    if (starter.resistors().cutOut() == ResistorBank.CutOut.STAR_POINT) {
+      step = index + 2;
+    }
+    if (index == starter.steps().size() - 1) {
+      lastStepSeconds = OptionalDouble.of(0.0);
+    }
+  }
+
+  private void closeEverything() {
+    sectionsIn.clear();
+    next = starter.steps().size();
+    step = starter.sectionCount() + 1;
+    lastStepSeconds = OptionalDouble.of(0.0);
   }
 
   List<Integer> sectionsIn() {
@@ -53,13 +80,9 @@ final class Sequence {
     return step;
   }
 
-  double lastClosingSeconds() {
-    return lastClosing;
-  }
-
-  /** Whether the contactor of the last step has closed. */
-  boolean lastStepClosed() {
-    return lastStepClosed;
+  /** When the contactor of the last step was first closed, s from line closing; empty: never. */
+  OptionalDouble lastStepSeconds() {
+    return lastStepSeconds;
   }
 
   /** Whether a rule is being waited for. */
@@ -163,18 +186,24 @@ final class Sequence {
   }
 
   private void close(int index, double now) {
-    if (starter.resistors().cutOut() == ResistorBank.CutOut.STAR_POINT) {
-      sectionsIn.removeIf(section -> section <= index + 1);
-    } else {
-      sectionsIn.remove(Integer.valueOf(index + 1));
-    }
+    cutOutBy(index);
     step = Math.max(step, index + 2);
     lastClosing = now;
-    lastStepClosed |= index == starter.steps().size() - 1;
+    if (index == starter.steps().size() - 1 && lastStepSeconds.isEmpty()) {
+      lastStepSeconds = OptionalDouble.of(now);
+    }
     if (starter.sequence() == Starter.Sequence.CHAINED) {
       armed = true;
       next = index + 1;
       reference = now;
+    }
+  }
+
+  private void cutOutBy(int index) {
+    if (starter.resistors().cutOut() == ResistorBank.CutOut.STAR_POINT) {
+      sectionsIn.removeIf(section -> section <= index + 1);
+    } else {
+      sectionsIn.remove(Integer.valueOf(index + 1));
     }
   }
 }

@@ -58,7 +58,8 @@ final class StartRun {
   }
 
   StartHistory compute() {
-    if (scenario.kind() == Scenario.Kind.RINGS_SHORTED) {
+    if (scenario.kind() == Scenario.Kind.RINGS_SHORTED
+        || scenario.kind() == Scenario.Kind.RUNNING_LOCKED) {
       return ringsShorted();
     }
     beginStage(startingTorque);
@@ -233,9 +234,7 @@ final class StartRun {
         outcome(running),
         stages,
         after,
-        sequence.lastStepClosed()
-            ? OptionalDouble.of(sequence.lastClosingSeconds())
-            : OptionalDouble.empty(),
+        sequence.lastStepSeconds(),
         running && !Double.isNaN(runUp) ? OptionalDouble.of(runUp) : OptionalDouble.empty(),
         neverReached);
   }

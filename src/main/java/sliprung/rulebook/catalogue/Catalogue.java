@@ -19,21 +19,33 @@ import sliprung.rulebook.contactor.ContactorRules;
 import sliprung.rulebook.data.DataRules;
 import sliprung.rulebook.held.EveryHeldStepIsCleared;
 import sliprung.rulebook.held.SomethingSeesEveryHeldStep;
+import sliprung.rulebook.held.TwoSectionsAtOnceAreStood;
 import sliprung.rulebook.held.WhatOpensIsAbleToBreak;
+import sliprung.rulebook.locked.JammedWhileRunningIsCleared;
 import sliprung.rulebook.locked.LockedOnAStepIsCleared;
 import sliprung.rulebook.locked.LockedWithRingsShortedIsCleared;
 import sliprung.rulebook.locked.LockedWithSequenceRunningIsCleared;
+import sliprung.rulebook.locked.TheRingsStandARotorAtRest;
 import sliprung.rulebook.locked.TheRotorBreaksAway;
 import sliprung.rulebook.overload.OverloadRules;
 import sliprung.rulebook.resistor.EverySectionStandsThePermittedStarts;
+import sliprung.rulebook.resistor.EverySectionStandsTheStartsOfAnHour;
+import sliprung.rulebook.resistor.TheBankHasADutyClass;
+import sliprung.rulebook.resistor.TheRestartIsKnown;
 import sliprung.rulebook.sequence.EveryStepPullsThrough;
 import sliprung.rulebook.sequence.NoLevelIsMetAtRest;
+import sliprung.rulebook.sequence.NoStepClosesTooEarly;
+import sliprung.rulebook.sequence.NoStepLingers;
 import sliprung.rulebook.sequence.NoTorquePeakExceedsTheLimit;
+import sliprung.rulebook.sequence.TheClosingsAreEven;
 import sliprung.rulebook.sequence.TheSequenceIsSupervised;
+import sliprung.rulebook.sequence.TheStepsKeepTheirOrder;
 import sliprung.rulebook.shortcircuit.ShortCircuitRules;
+import sliprung.rulebook.trip.EveryContactorStandsTheDip;
 import sliprung.rulebook.trip.NoClosingPeakPicksUp;
 import sliprung.rulebook.trip.NoDeviceOperatesInAPermittedStart;
 import sliprung.rulebook.trip.NothingCreepsToATripInService;
+import sliprung.rulebook.trip.TheStartSparesTheFuse;
 
 /** The rules, an explicit list. */
 public final class Catalogue {
@@ -41,25 +53,7 @@ public final class Catalogue {
   private static final List<Rule> RULES = sorted();
 
   /** Rules of the book that this version does not hold, each with its question. */
-  private static final Map<String, String> NOT_BUILT =
-      new TreeMap<>(
-          Map.ofEntries(
-              Map.entry(
-                  "trip/fuse-wear",
-                  "Does the start stay far enough below the fuse's pre-arcing current not to age it?"),
-              Map.entry(
-                  "trip/voltage-dip", "Do step and line contactors stand the dip at each closing?"),
-              Map.entry(
-                  "held/skipped", "What peak and making current when two sections go at once?"),
-              Map.entry("locked/running", "Is a rotor that jams while running cleared in time?"),
-              Map.entry("locked/rings", "Do slip rings and brushes stand a rotor at rest?"),
-              Map.entry("sequence/early", "Does any step close too early?"),
-              Map.entry("sequence/late", "Does any step close long after the motor has settled?"),
-              Map.entry("sequence/spread", "Do the closings keep their order over the spreads?"),
-              Map.entry("sequence/grading", "Are the closing currents of the steps even?"),
-              Map.entry("resistor/duty", "Does the bank stand the starts of an hour?"),
-              Map.entry("resistor/class", "Which duty class does the bank amount to?"),
-              Map.entry("resistor/restart", "When may it be started again, and what limits it?")));
+  private static final Map<String, String> NOT_BUILT = Map.of();
 
   private Catalogue() {}
 
@@ -70,18 +64,30 @@ public final class Catalogue {
                 new NoDeviceOperatesInAPermittedStart(),
                 new NothingCreepsToATripInService(),
                 new NoClosingPeakPicksUp(),
+                new TheStartSparesTheFuse(),
+                new EveryContactorStandsTheDip(),
                 new EveryHeldStepIsCleared(),
                 new SomethingSeesEveryHeldStep(),
                 new WhatOpensIsAbleToBreak(),
+                new TwoSectionsAtOnceAreStood(),
                 new LockedWithSequenceRunningIsCleared(),
                 new LockedOnAStepIsCleared(),
                 new LockedWithRingsShortedIsCleared(),
                 new TheRotorBreaksAway(),
+                new JammedWhileRunningIsCleared(),
+                new TheRingsStandARotorAtRest(),
                 new EveryStepPullsThrough(),
                 new NoLevelIsMetAtRest(),
+                new NoStepClosesTooEarly(),
+                new NoStepLingers(),
+                new TheStepsKeepTheirOrder(),
+                new TheClosingsAreEven(),
                 new TheSequenceIsSupervised(),
                 new NoTorquePeakExceedsTheLimit(),
-                new EverySectionStandsThePermittedStarts()));
+                new EverySectionStandsThePermittedStarts(),
+                new EverySectionStandsTheStartsOfAnHour(),
+                new TheBankHasADutyClass(),
+                new TheRestartIsKnown()));
     rules.addAll(ContactorRules.ALL);
     rules.addAll(ConductorRules.ALL);
     rules.addAll(OverloadRules.ALL);
