@@ -23,7 +23,11 @@ class SvgTest {
     return List.of(
         FirstLimitDrawing.picture(FirstLimitChart.of(REVIEW)),
         StartDrawing.picture(StartOverTime.of(REVIEW).orElseThrow()),
-        TimeCurrentDrawing.picture(TimeCurrentSheet.of(REVIEW, List.of(BAND))));
+        TimeCurrentDrawing.picture(TimeCurrentSheet.of(REVIEW, List.of(BAND))),
+        MarginDrawing.picture(MarginOverview.of(REVIEW)),
+        TorqueSpeedDrawing.picture(TorqueSpeed.of(REVIEW).orElseThrow()),
+        UseDrawing.picture(UseOverTime.of(REVIEW).orElseThrow()),
+        SectionDrawing.picture(SectionLevels.of(REVIEW).orElseThrow()));
   }
 
   @Test
