@@ -55,36 +55,46 @@ final class FreeSpace {
    *
    * @param width of the box, px
    * @param height likewise
-   * @param wanted upper left corners, the most wanted first; places around the first are tried too
+   * @param wanted upper left corners, the most wanted first; if none of them is free, places around
+   *     the first
    * @return the upper left corner; empty where every place would cover another label
    */
   Optional<Point2D> place(double width, double height, List<Point2D> wanted) {
-    Rectangle2D best = null;
-    double least = Double.POSITIVE_INFINITY;
-    List<Point2D> tried = new ArrayList<>(wanted);
-    for (int ring = 1; ring <= RINGS && !wanted.isEmpty(); ring++) {
+    Optional<Rectangle2D> best = best(width, height, wanted);
+    if (best.isEmpty() && !wanted.isEmpty()) {
+      best = best(width, height, around(wanted.get(0)));
+    }
+    best.ifPresent(taken::add);
+    return best.map(box -> new Point2D.Double(box.getX(), box.getY()));
+  }
+
+  private static List<Point2D> around(Point2D middle) {
+    List<Point2D> places = new ArrayList<>();
+    for (int ring = 1; ring <= RINGS; ring++) {
       for (int k = 0; k < 8; k++) {
         double angle = k * Math.PI / 4.0;
-        tried.add(
+        places.add(
             new Point2D.Double(
-                wanted.get(0).getX() + ring * RING_STEP * Math.cos(angle),
-                wanted.get(0).getY() + ring * RING_STEP * Math.sin(angle)));
+                middle.getX() + ring * RING_STEP * Math.cos(angle),
+                middle.getY() + ring * RING_STEP * Math.sin(angle)));
       }
     }
-    for (int i = 0; i < tried.size(); i++) {
+    return places;
+  }
+
+  private Optional<Rectangle2D> best(double width, double height, List<Point2D> places) {
+    Rectangle2D best = null;
+    double least = Double.POSITIVE_INFINITY;
+    for (int i = 0; i < places.size(); i++) {
       Rectangle2D box =
-          new Rectangle2D.Double(tried.get(i).getX(), tried.get(i).getY(), width, height);
+          new Rectangle2D.Double(places.get(i).getX(), places.get(i).getY(), width, height);
       double cost = cost(box) + FAR_COST * i;
       if (cost < least) {
         least = cost;
         best = box;
       }
     }
-    if (best == null) {
-      return Optional.empty();
-    }
-    taken.add(best);
-    return Optional.of(new Point2D.Double(best.getX(), best.getY()));
+    return Optional.ofNullable(best);
   }
 
   private double cost(Rectangle2D box) {

@@ -29,10 +29,12 @@ final class Marks {
   /**
    * Lines from here on belong to these axes.
    *
-   * @param across name of what goes across, with its unit behind a space
-   * @param up likewise
+   * @param across what goes across, in a word
+   * @param acrossUnit its unit
+   * @param upUnit unit of what goes up; empty for a share
    */
-  static void frame(Graphics2D surface, Frame frame, String across, String up) {
+  static void frame(
+      Graphics2D surface, Frame frame, String across, String acrossUnit, String upUnit) {
     if (surface instanceof Marked marked) {
       Rectangle2D area = frame.area();
       marked.frame(
@@ -40,10 +42,12 @@ final class Marks {
               + axis(frame.across(), area.getX(), area.getMaxX())
               + ",\"y\":"
               + axis(frame.up(), area.getMaxY(), area.getY())
-              + ",\"xu\":\""
+              + ",\"xn\":\""
               + across
+              + "\",\"xu\":\""
+              + acrossUnit
               + "\",\"yu\":\""
-              + up
+              + upUnit
               + "\"}");
     }
   }

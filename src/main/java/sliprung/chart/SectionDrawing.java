@@ -71,7 +71,7 @@ public final class SectionDrawing {
     closings(g, frame, row);
     Shape clip = g.getClip();
     g.clip(area);
-    Marks.frame(g, frame, "t s", "level %");
+    Marks.frame(g, frame, "at", "s", "%");
     for (SectionLevels.Section section : row.sections()) {
       double[] shares = section.level().levels();
       for (int k = 0; k < shares.length; k++) {
@@ -97,7 +97,7 @@ public final class SectionDrawing {
       g.setStroke(Ink.EDGE);
       g.draw(new Line2D.Double(x, frame.area().getY(), x, frame.area().getMaxY()));
       if (n > 0) {
-        words.plate("start " + (n + 1), Ink.SMALL, Ink.QUIET, x + 4, frame.area().getMaxY() - 5);
+        words.plate("start " + (n + 1), Ink.SMALL, Ink.QUIET, x + 4, frame.y(100.0) + 18);
       }
     }
   }

@@ -56,7 +56,7 @@ public final class TorqueSpeedDrawing {
             frame, chart.loadLow().across(), chart.loadLow().up(), chart.loadHigh().up()));
     g.setClip(clip);
     frame.draw(g, true, true);
-    Marks.frame(g, frame, "speed rpm", "torque N·m");
+    Marks.frame(g, frame, "at", "rpm", "N·m");
     g.clip(area);
     FreeSpace space = new FreeSpace(area);
     lines(g, frame, space, chart);

@@ -115,7 +115,7 @@ public final class UseDrawing {
     }
     java.awt.Shape clip = g.getClip();
     g.clip(area);
-    Marks.frame(g, frame, "t s", "use ");
+    Marks.frame(g, frame, "at", "s", "");
     line(g, frame, row.cold(), row.device() + " cold", Ink.DEVICE, Ink.EDGE);
     line(g, frame, row.hot(), row.device() + " hot", Ink.DEVICE, Ink.COMPUTED);
     Marks.none(g);
