@@ -6,17 +6,27 @@ package sliprung.chart;
  * @param label tag and what it is, such as {@code F3 very inverse}
  * @param amps rising stator amperes, RMS, primary
  * @param fastSeconds earliest operation at these; infinite: never
+ * @param middleSeconds between the two, printed only; infinite: never, or not known
  * @param slowSeconds latest operation at these; infinite: never; not below the fast edge
  */
-public record Band(String label, double[] amps, double[] fastSeconds, double[] slowSeconds) {
+public record Band(
+    String label,
+    double[] amps,
+    double[] fastSeconds,
+    double[] middleSeconds,
+    double[] slowSeconds) {
 
   /** Copies and checks. */
   public Band {
     amps = amps.clone();
     fastSeconds = fastSeconds.clone();
+    middleSeconds = middleSeconds.clone();
     slowSeconds = slowSeconds.clone();
-    if (amps.length < 2 || amps.length != fastSeconds.length || amps.length != slowSeconds.length) {
-      throw new IllegalArgumentException("two points or more, both edges at each: " + label);
+    if (amps.length < 2
+        || amps.length != fastSeconds.length
+        || amps.length != middleSeconds.length
+        || amps.length != slowSeconds.length) {
+      throw new IllegalArgumentException("two points or more, every edge at each: " + label);
     }
     for (int i = 1; i < amps.length; i++) {
       if (!(amps[i] > amps[i - 1])) {
@@ -43,6 +53,11 @@ public record Band(String label, double[] amps, double[] fastSeconds, double[] s
   @Override
   public double[] fastSeconds() {
     return fastSeconds.clone();
+  }
+
+  @Override
+  public double[] middleSeconds() {
+    return middleSeconds.clone();
   }
 
   @Override

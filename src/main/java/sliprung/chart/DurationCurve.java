@@ -1,6 +1,7 @@
 package sliprung.chart;
 
 import java.util.List;
+import sliprung.rulebook.ComputedStart;
 import sliprung.runup.Stage;
 
 /**
@@ -46,6 +47,12 @@ public record DurationCurve(String label, double[] amps, double[] seconds) {
       seconds[k] = secondsAtOrAbove(stages, levels[k], untilSeconds);
     }
     return new DurationCurve(label, levels, seconds);
+  }
+
+  /** How far the curve of a start counts: to the end of its run-up, a fault to its end, s. */
+  static double until(ComputedStart start) {
+    double end = start.history().endSeconds();
+    return start.scenario().isFault() ? end : start.history().runUpSeconds().orElse(end);
   }
 
   /** Time in s for which the stator current is at or above a level in A. */

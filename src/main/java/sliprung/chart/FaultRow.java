@@ -5,6 +5,8 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import sliprung.protection.DeviceResponse;
+import sliprung.protection.ProtectionEvaluator;
+import sliprung.protection.StartProtection;
 import sliprung.quantity.Show;
 import sliprung.review.PartText;
 import sliprung.rulebook.ComputedStart;
@@ -33,9 +35,11 @@ public record FaultRow(
    * A device that clears.
    *
    * @param device tag
+   * @param pickedUpSeconds when what it measures last rose to its slow pick-up; 0, line closing,
+   *     for a device that has none
    * @param seconds from line closing to the open circuit
    */
-  public record Clearing(String device, double seconds) {}
+  public record Clearing(String device, double pickedUpSeconds, double seconds) {}
 
   /**
    * A part at its limit.
@@ -72,14 +76,17 @@ public record FaultRow(
   }
 
   /** The row of an exposure, with every later device that is proven to clear it as well. */
-  public static FaultRow of(Facts facts, Exposure worst) {
+  public static FaultRow of(Facts facts, ProtectionEvaluator evaluator, Exposure worst) {
+    StartProtection fault = evaluator.over(worst.start().history());
     double wanted = facts.wanted(rule(worst.start().scenario().kind()));
     List<Clearing> clearings = new ArrayList<>();
     List<String> seen = new ArrayList<>();
     Optional<DeviceResponse> next = worst.clearing();
     while (next.isPresent()) {
       DeviceResponse response = next.get();
-      clearings.add(new Clearing(response.device(), response.clearsAtSeconds()));
+      clearings.add(
+          new Clearing(
+              response.device(), pickedUp(facts, fault, response), response.clearsAtSeconds()));
       seen.add(response.device());
       next = Exposure.of(facts, worst.start(), seen).clearing();
     }
@@ -91,6 +98,14 @@ public record FaultRow(
       open = Optional.of(worst.unproven().get().device() + ": breaking not proven");
     }
     return new FaultRow(worst.start(), clearings, limit, open, wanted);
+  }
+
+  private static double pickedUp(Facts facts, StartProtection fault, DeviceResponse response) {
+    return facts.starter().device(response.device()).isEmpty()
+        ? 0.0
+        : fault
+            .pickedUpSeconds(response.device(), response.edge(), response.operatesAtSeconds())
+            .orElse(0.0);
   }
 
   private static String rule(Scenario.Kind kind) {

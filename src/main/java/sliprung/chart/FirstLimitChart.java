@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.DoubleStream;
+import sliprung.protection.ProtectionEvaluator;
 import sliprung.review.PartText;
 import sliprung.review.Review;
 import sliprung.review.ReviewFacts;
@@ -41,6 +42,7 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
   /** Of a review: one row for each kind of fault and step that was computed. */
   public static FirstLimitChart of(Review review) {
     Facts facts = ReviewFacts.of(review);
+    ProtectionEvaluator evaluator = new ProtectionEvaluator(review.starter(), review.machine());
     Map<String, List<ComputedStart>> faults = new LinkedHashMap<>();
     Set<String> without = new TreeSet<>();
     for (ComputedStart start : review.starts()) {
@@ -57,7 +59,7 @@ public record FirstLimitChart(List<FaultRow> rows, String says, Set<String> with
     List<FaultRow> rows =
         faults.values().stream()
             .map(starts -> Exposures.worst(facts, starts.stream()).orElseThrow())
-            .map(worst -> FaultRow.of(facts, worst))
+            .map(worst -> FaultRow.of(facts, evaluator, worst))
             .sorted(CLOSEST_FIRST)
             .toList();
     return new FirstLimitChart(rows, says(rows), without);

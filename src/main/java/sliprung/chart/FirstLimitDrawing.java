@@ -79,6 +79,7 @@ public final class FirstLimitDrawing {
 
     void draw() {
       Rectangle2D area = frame.area();
+      Marks.series(g, row.sentence());
       g.setColor(Ink.DECADE);
       g.setStroke(Ink.EDGE);
       g.draw(new Line2D.Double(4, top + ROW, WIDTH - 4, top + ROW));
@@ -91,6 +92,7 @@ public final class FirstLimitDrawing {
       double end = area.getMaxX() + 12;
       words.left(row.finding(), loud ? Ink.STRONG : Ink.LABEL, Ink.TEXT, end, top + 15);
       words.left(row.times(), Ink.FINE, Ink.QUIET, end, top + 30);
+      Marks.none(g);
     }
 
     private void wall(FaultRow.Limit limit) {
@@ -149,12 +151,23 @@ public final class FirstLimitDrawing {
       double x = x(clearing);
       g.setColor(first ? Ink.DEVICE : Ink.QUIET);
       g.setStroke(first ? Ink.COMPUTED : Ink.EDGE);
-      g.draw(new Line2D.Double(frame.area().getX(), line, x - CIRCLE, line));
+      double from = from(clearing);
+      g.draw(new Line2D.Double(from, line, x - CIRCLE, line));
+      if (from > frame.area().getX()) {
+        g.draw(new Line2D.Double(from, line - 4, from, line + 4));
+      }
       Ellipse2D circle = new Ellipse2D.Double(x - CIRCLE, line - CIRCLE, 2 * CIRCLE, 2 * CIRCLE);
       g.setColor(Ink.PAPER);
       g.fill(circle);
       g.setColor(first ? Ink.DEVICE : Ink.QUIET);
       g.draw(circle);
+    }
+
+    /** Where a line starts: at the left edge for line closing, which a log axis never reaches. */
+    private double from(FaultRow.Clearing clearing) {
+      double picked = clearing.pickedUpSeconds();
+      double x = picked > 0.0 ? frame.x(picked) : frame.area().getX();
+      return Math.min(x(clearing) - CIRCLE, Math.max(frame.area().getX(), x));
     }
 
     private double x(FaultRow.Clearing clearing) {

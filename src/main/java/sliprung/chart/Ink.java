@@ -16,6 +16,7 @@ final class Ink {
   static final Color LOAD = new Color(0x56B4E9);
   static final Color TEXT = new Color(0x1A1A1A);
   static final Color DEVICE = new Color(0x333333);
+  static final Color MIDDLE = new Color(0x8A8A8A);
   static final Color QUIET = new Color(0x595959);
   static final Color GRID = new Color(0xE4E4E4);
   static final Color DECADE = new Color(0xBDBDBD);

@@ -18,7 +18,10 @@ public final class StartDrawing {
   private static final int GAP = 22;
   private static final int CURRENT_HEIGHT = 240;
   private static final int BOTTOM = 56;
-  private static final int HEIGHT = TOP + SPEED_HEIGHT + GAP + CURRENT_HEIGHT + BOTTOM;
+  private static final int VOLTS_HEIGHT = 76;
+  private static final int CURRENT_TOP = TOP + SPEED_HEIGHT + GAP;
+  private static final int VOLTS_TOP = CURRENT_TOP + CURRENT_HEIGHT + GAP;
+  private static final int HEIGHT = VOLTS_TOP + VOLTS_HEIGHT + BOTTOM;
   private static final double HEADROOM = 1.08;
   private static final double LABEL_GAP = 17.0;
   private static final double TAG_GAP = 6.0;
@@ -29,8 +32,8 @@ public final class StartDrawing {
   public static Picture picture(StartOverTime chart) {
     return new Picture(
         "start-over-time",
-        "Start over time: speed, stator and ring current of the nominal cold start, with the band"
-            + " of all corners",
+        "Start over time: speed, stator and ring current and terminal voltage of the nominal cold"
+            + " start, with the band of all corners",
         chart.says(),
         WIDTH,
         HEIGHT,
@@ -49,21 +52,29 @@ public final class StartDrawing {
     Frame current =
         frame(
             chart,
-            new Rectangle2D.Double(LEFT, TOP + SPEED_HEIGHT + GAP, width, CURRENT_HEIGHT),
+            new Rectangle2D.Double(LEFT, CURRENT_TOP, width, CURRENT_HEIGHT),
             "current, A RMS",
             amps);
-    columns(g, chart, speed, current);
+    Frame volts = volts(chart, new Rectangle2D.Double(LEFT, VOLTS_TOP, width, VOLTS_HEIGHT));
+    columns(g, chart, speed, volts);
     speed.draw(g, false, true);
-    current.draw(g, true, true);
+    current.draw(g, false, true);
+    volts.draw(g, true, true);
     band(g, speed, chart.speedRpm(), Ink.SPEED_BAND);
     band(g, current, chart.ringAmps(), Ink.RING_BAND);
     band(g, current, chart.statorAmps(), Ink.STATOR_BAND);
-    line(g, speed, chart.speedRpm(), Ink.DEVICE);
-    line(g, current, chart.ringAmps(), Ink.RING);
-    line(g, current, chart.statorAmps(), Ink.STATOR);
-    ends(g, chart, speed, current);
+    band(g, volts, chart.terminalVolts(), Ink.SPEED_BAND);
+    Marks.frame(g, speed, "at", "s", "rpm");
+    line(g, speed, chart.speedRpm(), "speed", Ink.DEVICE);
+    Marks.frame(g, current, "at", "s", "A");
+    line(g, current, chart.ringAmps(), "ring current", Ink.RING);
+    line(g, current, chart.statorAmps(), "stator current", Ink.STATOR);
+    Marks.frame(g, volts, "at", "s", "V");
+    line(g, volts, chart.terminalVolts(), "terminal voltage", Ink.DEVICE);
+    rated(g, volts, chart.ratedVolts());
+    ends(g, chart, speed, current, volts);
     timers(g, chart, current);
-    chart.runningFrom().ifPresent(t -> running(g, speed, current, t));
+    chart.runningFrom().ifPresent(t -> running(g, speed, volts, current, t));
   }
 
   private static Frame frame(StartOverTime chart, Rectangle2D area, String label, double greatest) {
@@ -74,16 +85,40 @@ public final class StartDrawing {
     return new Frame(area, across, up);
   }
 
+  /** Not from zero: what matters is the dip, and the axis is numbered. */
+  private static Frame volts(StartOverTime chart, Rectangle2D area) {
+    double least = chart.ratedVolts();
+    for (double volts : chart.terminalVolts().low().values()) {
+      least = Math.min(least, volts);
+    }
+    NumberAxis across = plain("seconds from line closing");
+    across.setRange(0.0, chart.endSeconds());
+    NumberAxis up = plain("volts");
+    double greatest = Math.max(chart.ratedVolts(), chart.terminalVolts().greatest());
+    double room = 0.08 * (greatest - least) + 1e-3 * greatest;
+    up.setRange(least - room, greatest + room);
+    return new Frame(area, across, up);
+  }
+
+  private static void rated(Graphics2D g, Frame volts, double rated) {
+    double y = volts.y(rated);
+    double x = volts.area().getX();
+    g.setColor(Ink.QUIET);
+    g.setStroke(Ink.EDGE);
+    g.draw(new Line2D.Double(x, y, x + 14, y));
+    new Words(g).plate("rated " + Show.volts(rated), Ink.FINE, Ink.QUIET, x + 17, y + 4);
+  }
+
   private static NumberAxis plain(String label) {
     NumberAxis axis = new NumberAxis(label);
     axis.setNumberFormatOverride(DecadeAxis.plainNumbers());
     return axis;
   }
 
-  private static void columns(Graphics2D g, StartOverTime chart, Frame speed, Frame current) {
+  private static void columns(Graphics2D g, StartOverTime chart, Frame speed, Frame lowest) {
     Words words = new Words(g);
     double top = speed.area().getY();
-    double bottom = current.area().getMaxY();
+    double bottom = lowest.area().getMaxY();
     double taken = Double.NEGATIVE_INFINITY;
     for (StartOverTime.Column column : chart.stages()) {
       double from = speed.x(column.fromSeconds());
@@ -111,14 +146,25 @@ public final class StartDrawing {
     g.fill(area);
   }
 
-  private static void line(Graphics2D g, Frame frame, StartOverTime.Banded quantity, Color colour) {
+  private static void line(
+      Graphics2D g, Frame frame, StartOverTime.Banded quantity, String name, Color colour) {
+    Marks.series(g, name);
     g.setColor(colour);
     g.setStroke(Ink.COMPUTED);
     g.draw(Shapes.line(frame, quantity.nominal().seconds(), quantity.nominal().values()));
+    Marks.none(g);
   }
 
-  private static void ends(Graphics2D g, StartOverTime chart, Frame speed, Frame current) {
+  private static void ends(
+      Graphics2D g, StartOverTime chart, Frame speed, Frame current, Frame volts) {
     Words words = new Words(g);
+    double terminal = chart.terminalVolts().nominal().last();
+    words.left(
+        "terminals " + Show.volts(terminal),
+        Ink.STRONG,
+        Ink.DEVICE,
+        volts.area().getMaxX() + 8,
+        volts.y(terminal) + 5);
     double x = speed.area().getMaxX() + 8;
     double rpm = chart.speedRpm().nominal().last();
     words.left(Show.rpm(rpm * Math.PI / 30.0), Ink.STRONG, Ink.DEVICE, x, speed.y(rpm) + 5);
@@ -139,11 +185,12 @@ public final class StartDrawing {
   }
 
   /** Where the running load comes on. */
-  private static void running(Graphics2D g, Frame speed, Frame current, double seconds) {
+  private static void running(
+      Graphics2D g, Frame speed, Frame lowest, Frame current, double seconds) {
     double x = current.x(seconds);
     g.setColor(Ink.QUIET);
     g.setStroke(Ink.EDGE);
-    g.draw(new Line2D.Double(x, speed.area().getY(), x, current.area().getMaxY()));
+    g.draw(new Line2D.Double(x, speed.area().getY(), x, lowest.area().getMaxY()));
     new Words(g).plate("running load", Ink.SMALL, Ink.QUIET, x + 5, current.area().getY() + 14);
   }
 

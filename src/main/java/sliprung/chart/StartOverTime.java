@@ -18,8 +18,10 @@ import sliprung.starter.Device;
  * @param speedRpm rotor speed
  * @param statorAmps RMS
  * @param ringAmps RMS
+ * @param terminalVolts line to line
+ * @param ratedVolts of the motor
  * @param stages columns
- * @param timers sequence timers, as ticks on the axis
+ * @param timers sequence timers and rotation sensors, as ticks on the axis
  * @param runningFrom when the running load comes on after the start, s; empty: not shown
  * @param corners how many permitted cold starts the bands cover
  * @param endSeconds of the picture
@@ -29,6 +31,8 @@ public record StartOverTime(
     Banded speedRpm,
     Banded statorAmps,
     Banded ringAmps,
+    Banded terminalVolts,
+    double ratedVolts,
     List<Column> stages,
     List<TimerTick> timers,
     OptionalDouble runningFrom,
@@ -64,7 +68,7 @@ public record StartOverTime(
   public record Column(int step, String closedBy, double fromSeconds, double toSeconds) {}
 
   /**
-   * A sequence timer.
+   * A timer that supervises the start; a rotation sensor's counts only while the rotor stands.
    *
    * @param device tag
    * @param seconds set
@@ -114,6 +118,8 @@ public record StartOverTime(
         banded(history, corners, Trace::speed, RPM, end),
         banded(history, corners, Trace::statorAmps, 1.0, end),
         banded(history, corners, Trace::ringAmps, 1.0, end),
+        banded(history, corners, Trace::terminalVolts, 1.0, end),
+        review.starter().motor().voltage(),
         columns,
         timers.stream().filter(t -> t.seconds() <= end).toList(),
         history.running().stream().mapToDouble(Stage::fromSeconds).filter(t -> t < end).findFirst(),
@@ -155,17 +161,19 @@ public record StartOverTime(
 
   private static List<TimerTick> timers(Review review) {
     double spread = review.starter().timerSpread();
-    return review.starter().protection().stream()
-        .filter(Device.SequenceTimer.class::isInstance)
-        .map(Device.SequenceTimer.class::cast)
-        .map(
-            t ->
-                new TimerTick(
-                    t.tag(),
-                    t.seconds(),
-                    t.seconds() * (1.0 - spread),
-                    t.seconds() * (1.0 + spread)))
-        .toList();
+    List<TimerTick> ticks = new ArrayList<>();
+    for (Device device : review.starter().protection()) {
+      if (device instanceof Device.SequenceTimer timer) {
+        ticks.add(tick(timer.tag(), timer.seconds(), spread));
+      } else if (device instanceof Device.Standstill sensor) {
+        ticks.add(tick(sensor.tag() + " at rest", sensor.seconds(), spread));
+      }
+    }
+    return ticks;
+  }
+
+  private static TimerTick tick(String device, double seconds, double spread) {
+    return new TimerTick(device, seconds, seconds * (1.0 - spread), seconds * (1.0 + spread));
   }
 
   private static String says(StartHistory history, List<StartHistory> corners) {

@@ -27,21 +27,24 @@ public final class StatorBands {
     int count = (int) Math.ceil(STEPS_PER_DECADE * Math.log10(to / from)) + 1;
     List<Band> out = new ArrayList<>();
     for (Device device : starter.protection()) {
-      if (device.fitting().place() != Device.Place.STATOR) {
+      // a rotation sensor counts time at rest, whatever the current
+      if (device.fitting().place() != Device.Place.STATOR || device instanceof Device.Standstill) {
         continue;
       }
       double[] amps = new double[count];
       double[] fast = new double[count];
+      double[] middle = new double[count];
       double[] slow = new double[count];
       boolean any = false;
       for (int i = 0; i < count; i++) {
         amps[i] = from * Math.pow(to / from, i / (count - 1.0));
         fast[i] = seconds(bands, device, Edge.FAST, amps[i]);
+        middle[i] = seconds(bands, device, Edge.MIDDLE, amps[i]);
         slow[i] = seconds(bands, device, Edge.SLOW, amps[i]);
         any |= Double.isFinite(slow[i]) || Double.isFinite(fast[i]);
       }
       if (any) {
-        out.add(new Band(DeviceText.words(device), amps, fast, slow));
+        out.add(new Band(DeviceText.words(device), amps, fast, middle, slow));
       }
     }
     return out;

@@ -6,7 +6,6 @@ import java.io.StringWriter;
 import java.io.UncheckedIOException;
 import org.apache.batik.dom.GenericDOMImplementation;
 import org.apache.batik.svggen.SVGGeneratorContext;
-import org.apache.batik.svggen.SVGGraphics2D;
 import org.apache.batik.svggen.SVGGraphics2DIOException;
 import org.apache.batik.svggen.SVGIDGenerator;
 import org.apache.batik.svggen.SVGSyntax;
@@ -68,12 +67,13 @@ public final class Svg {
             return super.generateID(picture.name() + "-" + prefix);
           }
         });
-    SVGGraphics2D surface = new SVGGraphics2D(context, false);
+    MarkedSurface surface = new MarkedSurface(context);
     // the axes put this hint back as they found it, and Batik refuses to be given none
     surface.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
     painter.paint(surface);
     Element root = surface.getRoot();
     describe(root, picture, height);
+    root.setAttribute("data-frames", surface.frames());
     StringWriter out = new StringWriter();
     try {
       surface.stream(root, out, false, false);

@@ -22,6 +22,10 @@ import sliprung.runup.Trace;
  * @param held settled currents of held steps
  * @param ratedAmps of the motor
  * @param stall what the rotor winding stands with the rings shorted
+ * @param scales beside the stator's
+ * @param withstand of the parts
+ * @param takeOvers of fuses from overload relays
+ * @param corners the start at every corner
  * @param says what to see
  */
 public record TimeCurrentSheet(
@@ -30,7 +34,17 @@ public record TimeCurrentSheet(
     List<HeldCurrent> held,
     double ratedAmps,
     List<Stall> stall,
+    SheetScales scales,
+    List<Withstand> withstand,
+    List<TakeOverMark> takeOvers,
+    Optional<CornerBand> corners,
     String says) {
+  private static final double WIDEST = 60.0;
+  private static final double LEAST_SHARE = 0.2;
+
+  /** A take-over must lie well inside the sheet, which ends at four times the greatest. */
+  private static final double TAKE_OVER_ROOM = 3.0;
+
   /** Two settled currents closer than this are drawn as one line. */
   private static final double SAME = 0.03;
 
@@ -59,6 +73,8 @@ public record TimeCurrentSheet(
     starts = List.copyOf(starts);
     held = List.copyOf(held);
     stall = List.copyOf(stall);
+    withstand = List.copyOf(withstand);
+    takeOvers = List.copyOf(takeOvers);
   }
 
   /** Of a review and the bands of its devices. */
@@ -72,21 +88,26 @@ public record TimeCurrentSheet(
         .ifPresent(s -> starts.add(curve("hot start", s)));
     review.start("locked").ifPresent(s -> starts.add(curve("locked, sequence running", s)));
     List<HeldCurrent> held = held(review);
+    SheetScales scales = SheetScales.of(review);
     return new TimeCurrentSheet(
         bands,
         starts,
         held,
         review.starter().motor().current(),
         stall(review),
-        says(review, bands, held));
+        scales,
+        Withstand.of(
+            review,
+            scales.ringPerStator(),
+            review.starter().motor().current() * LEAST_SHARE,
+            review.starter().motor().current() * WIDEST),
+        TakeOverMark.of(review.starter()),
+        CornerBand.of(review),
+        says(review, bands, held, scales));
   }
 
   private static DurationCurve curve(String label, ComputedStart start) {
-    double until = start.history().endSeconds();
-    if (!start.scenario().isFault()) {
-      until = start.history().runUpSeconds().orElse(until);
-    }
-    return DurationCurve.stator(label, start.history().stages(), until);
+    return DurationCurve.stator(label, start.history().stages(), DurationCurve.until(start));
   }
 
   private static boolean differs(ComputedStart a, ComputedStart b) {
@@ -145,14 +166,19 @@ public record TimeCurrentSheet(
 
   /** {@code step 2}, {@code steps 1–5} or {@code steps 1, 3}. */
   static String steps(List<Integer> rising) {
+    return named("step", rising);
+  }
+
+  /** The same of anything numbered. */
+  static String named(String what, List<Integer> rising) {
     int first = rising.get(0);
     int last = rising.get(rising.size() - 1);
     if (rising.size() == 1) {
-      return "step " + first;
+      return what + " " + first;
     }
     return last - first == rising.size() - 1 && rising.size() > 2
-        ? "steps " + first + "–" + last
-        : "steps " + rising.stream().map(String::valueOf).collect(Collectors.joining(", "));
+        ? what + "s " + first + "–" + last
+        : what + "s " + rising.stream().map(String::valueOf).collect(Collectors.joining(", "));
   }
 
   private static double settledAmps(ComputedStart start) {
@@ -175,11 +201,16 @@ public record TimeCurrentSheet(
     return stall;
   }
 
-  private static String says(Review review, List<Band> bands, List<HeldCurrent> held) {
+  private static String says(
+      Review review, List<Band> bands, List<HeldCurrent> held, SheetScales scales) {
+    return seen(review, bands, held) + " " + scales.sentence();
+  }
+
+  private static String seen(Review review, List<Band> bands, List<HeldCurrent> held) {
     String meaning =
         "A start has no single point here: its curve says how long the current stays at or above"
-            + " each value. Grey: each device between its fast and its slow edge, at a constant"
-            + " current from cold.";
+            + " each value (light blue: at every corner). Grey: each device between its fast and"
+            + " its slow edge, at a constant current from cold.";
     double rated = review.starter().motor().current();
     if (held.isEmpty() || held.get(0).amps() >= rated) {
       return meaning;
@@ -197,8 +228,11 @@ public record TimeCurrentSheet(
   /** Greatest ampere of what is computed. */
   public double greatestAmps() {
     DoubleStream curves = starts.stream().flatMapToDouble(c -> DoubleStream.of(c.amps()));
-    DoubleStream stalls = stall.stream().mapToDouble(Stall::amps);
-    return DoubleStream.concat(curves, stalls).max().orElse(ratedAmps * 6.0);
+    DoubleStream limits =
+        DoubleStream.concat(
+            stall.stream().mapToDouble(Stall::amps),
+            takeOvers.stream().mapToDouble(m -> m.amps() / TAKE_OVER_ROOM));
+    return DoubleStream.concat(curves, limits).max().orElse(ratedAmps * 6.0);
   }
 
   /** Least ampere of what is computed. */

@@ -70,7 +70,11 @@ public final class Bands {
    * up to a hundred thousand amperes or it cannot be told.
    */
   public OptionalDouble pickUpAmps(Device device, Edge edge) {
-    EdgeModel model = model(device, edge, starter);
+    return pickUpAmps(model(device, edge, starter));
+  }
+
+  /** The same of a model. */
+  static OptionalDouble pickUpAmps(EdgeModel model) {
     double low = 0.0;
     for (double amps : grid(0.01, 1e5)) {
       if (operates(model, amps)) {

@@ -25,6 +25,17 @@ interface EdgeModel {
     return Optional.empty();
   }
 
+  /** Its use over the last of some starts in a row; empty where it cannot be computed. */
+  Optional<LevelOverTime> useOverTime(Starts starts);
+
+  /**
+   * When its current last rose to its pick-up before a time and stayed there until it, s; empty
+   * where it has none or was not above it.
+   */
+  default OptionalDouble pickedUpSeconds(Currents currents, double beforeSeconds) {
+    return OptionalDouble.empty();
+  }
+
   /**
    * What one edge does.
    *

@@ -64,6 +64,22 @@ final class MeasuringModel implements EdgeModel {
   }
 
   @Override
+  public Optional<LevelOverTime> useOverTime(Starts starts) {
+    Meter used = meter.apply(starts.preload());
+    LevelOverTime use =
+        LevelOverTime.ofLast(used, current.apply(starts.currents()), starts.count());
+    return used.doubt().isPresent() ? Optional.empty() : Optional.of(use);
+  }
+
+  @Override
+  public OptionalDouble pickedUpSeconds(Currents currents, double beforeSeconds) {
+    OptionalDouble pickUp = Bands.pickUpAmps(this);
+    return pickUp.isPresent()
+        ? current.apply(currents).lastRiseSeconds(pickUp.getAsDouble(), beforeSeconds)
+        : OptionalDouble.empty();
+  }
+
+  @Override
   public OptionalDouble seconds(double amps) {
     return seconds(amps, DevicePreload.COLD);
   }

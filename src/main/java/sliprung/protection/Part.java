@@ -22,6 +22,8 @@ record Part(
     Function<PartPreload, Meter> meter,
     Optional<ToDoubleFunction<StartHistory>> threePhaseOhms) {
 
+  private static final double LONGEST = 1e6;
+
   /** A part that cannot be judged. */
   static Part missing(String name, String path) {
     return new Part(
@@ -39,9 +41,24 @@ record Part(
     return new Part(name, Optional.empty(), channel, meter, Optional.empty());
   }
 
+  /** How long it stands a constant current from cold at rest, s; empty where data are missing. */
+  OptionalDouble withstandSeconds(double amps) {
+    return missing.isPresent()
+        ? OptionalDouble.empty()
+        : OptionalDouble.of(
+            meter.apply(PartPreload.COLD).advance(new Piece(LONGEST, amps, amps, amps, true)));
+  }
+
   /** The part with its resistance. */
   Part withOhms(ToDoubleFunction<StartHistory> threePhase) {
     return new Part(name, missing, channel, meter, Optional.of(threePhase));
+  }
+
+  /** Its level over some starts in a row; empty where its data are missing. */
+  Optional<LevelOverTime> levelOverTime(Currents currents, PartPreload preload, int starts) {
+    return missing.isPresent()
+        ? Optional.empty()
+        : Optional.of(LevelOverTime.ofAll(meter.apply(preload), currents.of(channel), starts));
   }
 
   /** What it goes through in the last of some starts in a row. */

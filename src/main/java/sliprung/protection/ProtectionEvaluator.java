@@ -83,6 +83,35 @@ public final class ProtectionEvaluator {
     return over(history).sectionLevelsAfter(preload, starts);
   }
 
+  /**
+   * How long a part stands a constant current in its own conductor, from cold with the rotor at
+   * rest.
+   *
+   * @param part as in {@link PartResponse}
+   * @param amps RMS
+   * @return seconds, infinite: for good; empty where its data are missing
+   */
+  public OptionalDouble withstandSeconds(String part, double amps) {
+    return part(part).withstandSeconds(amps);
+  }
+
+  /** The model of one edge of the device of a tag. */
+  EdgeModel model(String tag, Edge edge) {
+    return devices.entrySet().stream()
+        .filter(e -> e.getKey().tag().equals(tag))
+        .map(e -> e.getValue().get(edge))
+        .findFirst()
+        .orElseThrow(() -> new IllegalArgumentException("no device " + tag));
+  }
+
+  /** The part of a name. */
+  Part part(String name) {
+    return parts.stream()
+        .filter(p -> p.name().equals(name))
+        .findFirst()
+        .orElseThrow(() -> new IllegalArgumentException("no part " + name));
+  }
+
   List<DeviceResponse> devices(Starts row) {
     List<DeviceResponse> responses = new ArrayList<>();
     for (Map.Entry<Device, Map<Edge, EdgeModel>> entry : devices.entrySet()) {

@@ -84,6 +84,22 @@ final class SequenceTimerModel implements EdgeModel {
     return Double.POSITIVE_INFINITY;
   }
 
+  /** Straight up from line closing to the stop event, then back to nothing. */
+  @Override
+  public Optional<LevelOverTime> useOverTime(Starts starts) {
+    StartHistory history = starts.currents().history();
+    double stop = stopSeconds(history, starts.currents().synchronousSpeed());
+    double end = history.endSeconds();
+    double reached = Math.min(stop, end);
+    return Optional.of(
+        stop < end
+            ? new LevelOverTime(
+                new double[] {0.0, reached, reached, end},
+                new double[] {0.0, reached / setSeconds, 0.0, 0.0})
+            : new LevelOverTime(
+                new double[] {0.0, reached}, new double[] {0.0, reached / setSeconds}));
+  }
+
   @Override
   public OptionalDouble seconds(double amps) {
     return OptionalDouble.empty();

@@ -1,6 +1,8 @@
 package sliprung.protection;
 
 import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
 import sliprung.runup.StartHistory;
 
 /**
@@ -31,6 +33,46 @@ public final class StartProtection {
    */
   public List<DeviceResponse> devices(DevicePreload preload, int starts) {
     return evaluator.devices(new Starts(currents, starts, preload));
+  }
+
+  /**
+   * Use of one device over the last of some starts in a row and the running after it.
+   *
+   * @param device tag
+   * @param edge which relay of its set
+   * @param preload before the first
+   * @param starts 1 or more
+   * @return empty where that edge cannot be computed
+   */
+  public Optional<LevelOverTime> useOverTime(
+      String device, Edge edge, DevicePreload preload, int starts) {
+    return evaluator.model(device, edge).useOverTime(new Starts(currents, starts, preload));
+  }
+
+  /**
+   * When the quantity that a device measures last rose to its pick-up and stayed there until a
+   * time, s from line closing.
+   *
+   * @param device tag
+   * @param edge which relay of its set
+   * @param beforeSeconds such as when it operates
+   * @return empty for a device without a pick-up, or one that was below it
+   */
+  public OptionalDouble pickedUpSeconds(String device, Edge edge, double beforeSeconds) {
+    return evaluator.model(device, edge).pickedUpSeconds(currents, beforeSeconds);
+  }
+
+  /**
+   * Level of one part, 1 at its limit, over all of some starts in a row and the running after the
+   * last; seconds count from the first line closing.
+   *
+   * @param part as in {@link PartResponse}
+   * @param preload before the first
+   * @param starts 1 or more
+   * @return empty where its data are missing
+   */
+  public Optional<LevelOverTime> levelOverTime(String part, PartPreload preload, int starts) {
+    return evaluator.part(part).levelOverTime(currents, preload, starts);
   }
 
   /**

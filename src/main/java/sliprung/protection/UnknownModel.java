@@ -17,6 +17,11 @@ final class UnknownModel implements EdgeModel {
   }
 
   @Override
+  public Optional<LevelOverTime> useOverTime(Starts starts) {
+    return Optional.empty();
+  }
+
+  @Override
   public OptionalDouble seconds(double amps) {
     return OptionalDouble.empty();
   }

@@ -2,6 +2,7 @@ package sliprung.protection;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import sliprung.runup.Stage;
 import sliprung.runup.StartHistory;
 import sliprung.runup.Trace;
@@ -95,6 +96,29 @@ final class Waveform {
       changed[i] = share == 1.0 ? pieces[i] : pieces[i].scaled(share, 1.0);
     }
     return new Waveform(changed, stageOf, startsAt, startCount, runUpCount);
+  }
+
+  /**
+   * When the current last rose to a level before a time and stayed at or above it until then, s;
+   * empty where it was below it just before that time.
+   */
+  OptionalDouble lastRiseSeconds(double level, double beforeSeconds) {
+    double rose = Double.NaN;
+    double at = startsAt;
+    for (Piece piece : pieces) {
+      for (Piece part : piece.cutAt(level)) {
+        if (at >= beforeSeconds) {
+          break;
+        }
+        if (part.middle() < level) {
+          rose = Double.NaN;
+        } else if (Double.isNaN(rose)) {
+          rose = at;
+        }
+        at += part.seconds();
+      }
+    }
+    return Double.isNaN(rose) ? OptionalDouble.empty() : OptionalDouble.of(rose);
   }
 
   /** Integral of the square of the current over the start, A²s. */

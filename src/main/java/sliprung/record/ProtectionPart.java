@@ -19,6 +19,8 @@ final class ProtectionPart {
   static void write(Html page, Review review, FirstLimitChart firstLimit, ReviewPictures pictures) {
     page.section("devices", "Devices and parts");
     ReviewLayout.figure(page, pictures.timeCurrent());
+    pictures.use().ifPresent(p -> ReviewLayout.figure(page, p));
+    pictures.sections().ifPresent(p -> ReviewLayout.figure(page, p));
     for (String id : List.of("cold", "hot")) {
       review.start(id).ifPresent(s -> start(page, s));
     }

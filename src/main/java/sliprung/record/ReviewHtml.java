@@ -10,8 +10,8 @@ import java.util.Base64;
 import sliprung.review.Review;
 
 /**
- * Writes {@code review.html}: one page that needs no network and runs no script, in the order of
- * the four questions.
+ * Writes {@code review.html}: one page that needs no network, in the order of the four questions.
+ * It runs no script but its own, without which it says the same.
  */
 public final class ReviewHtml {
   private static final String STYLE = style();
@@ -39,19 +39,24 @@ public final class ReviewHtml {
             "http-equiv",
             "Content-Security-Policy",
             "content",
-            "default-src 'none'; style-src '" + digest() + "'; base-uri 'none'; form-action 'none'")
+            "default-src 'none'; style-src '"
+                + digest(STYLE)
+                + "'; script-src '"
+                + digest(PageScript.text())
+                + "'; base-uri 'none'; form-action 'none'")
         .markup("\n");
     page.empty("meta", "name", "viewport", "content", "width=device-width, initial-scale=1")
         .markup("\n");
     page.element("title", review.starter().name() + " · review of " + review.date());
     page.open("style").markup(STYLE).end();
+    page.open("script").markup(PageScript.text()).end();
     page.end();
   }
 
-  private static String digest() {
+  private static String digest(String text) {
     try {
       byte[] hash =
-          MessageDigest.getInstance("SHA-256").digest(STYLE.getBytes(StandardCharsets.UTF_8));
+          MessageDigest.getInstance("SHA-256").digest(text.getBytes(StandardCharsets.UTF_8));
       return "sha256-" + Base64.getEncoder().encodeToString(hash);
     } catch (NoSuchAlgorithmException impossible) {
       // every Java has it

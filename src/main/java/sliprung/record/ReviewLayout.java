@@ -28,6 +28,9 @@ final class ReviewLayout {
         BasisPart.notJudged(page, review);
       }
     }
+    page.section("margins", "Margins");
+    figure(page, pictures.margins());
+    page.end();
     AcceptedPart.write(page, review);
     TripMatrixPart.write(page, TripMatrix.of(review));
     BlindSpotPart.write(page, BlindSpots.of(review));

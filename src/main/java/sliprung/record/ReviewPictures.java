@@ -6,35 +6,62 @@ import java.util.Optional;
 import sliprung.chart.Band;
 import sliprung.chart.FirstLimitChart;
 import sliprung.chart.FirstLimitDrawing;
+import sliprung.chart.MarginDrawing;
+import sliprung.chart.MarginOverview;
 import sliprung.chart.Picture;
+import sliprung.chart.SectionDrawing;
+import sliprung.chart.SectionLevels;
 import sliprung.chart.StartDrawing;
 import sliprung.chart.StartOverTime;
 import sliprung.chart.TimeCurrentDrawing;
 import sliprung.chart.TimeCurrentSheet;
+import sliprung.chart.TorqueSpeed;
+import sliprung.chart.TorqueSpeedDrawing;
+import sliprung.chart.UseDrawing;
+import sliprung.chart.UseOverTime;
 import sliprung.review.Review;
 
 /**
  * The charts of a review.
  *
  * @param firstLimit for each fault, who is first
+ * @param margins every margin against the wanted one
  * @param start the nominal cold start over time, where it was computed
+ * @param torque torque against speed, likewise
+ * @param use use of every device over time, likewise
  * @param timeCurrent devices and starts on one sheet
+ * @param sections temperatures of the bank's sections, where one has data
  */
-record ReviewPictures(Picture firstLimit, Optional<Picture> start, Picture timeCurrent) {
+record ReviewPictures(
+    Picture firstLimit,
+    Picture margins,
+    Optional<Picture> start,
+    Optional<Picture> torque,
+    Optional<Picture> use,
+    Picture timeCurrent,
+    Optional<Picture> sections) {
 
   static ReviewPictures of(Review review, FirstLimitChart firstLimit, List<Band> bands) {
     return new ReviewPictures(
         FirstLimitDrawing.picture(firstLimit),
+        MarginDrawing.picture(MarginOverview.of(review)),
         StartOverTime.of(review).map(StartDrawing::picture),
-        TimeCurrentDrawing.picture(TimeCurrentSheet.of(review, bands)));
+        TorqueSpeed.of(review).map(TorqueSpeedDrawing::picture),
+        UseOverTime.of(review).map(UseDrawing::picture),
+        TimeCurrentDrawing.picture(TimeCurrentSheet.of(review, bands)),
+        SectionLevels.of(review).map(SectionDrawing::picture));
   }
 
-  /** Every picture there is. */
+  /** Every picture there is, in the order of the page. */
   List<Picture> all() {
     List<Picture> all = new ArrayList<>();
     all.add(firstLimit);
+    all.add(margins);
     start.ifPresent(all::add);
+    torque.ifPresent(all::add);
     all.add(timeCurrent);
+    use.ifPresent(all::add);
+    sections.ifPresent(all::add);
     return all;
   }
 }

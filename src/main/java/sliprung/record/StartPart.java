@@ -19,6 +19,7 @@ final class StartPart {
     }
     page.section("start", "The start");
     pictures.start().ifPresent(p -> ReviewLayout.figure(page, p));
+    pictures.torque().ifPresent(p -> ReviewLayout.figure(page, p));
     stages(page, cold.get());
     page.end();
   }

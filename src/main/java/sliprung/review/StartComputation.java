@@ -18,7 +18,6 @@ import sliprung.runup.StartHistory;
 import sliprung.runup.StartSimulator;
 import sliprung.runup.StartSimulator.RunningPoint;
 import sliprung.starter.Duty;
-import sliprung.starter.Motor;
 import sliprung.starter.ResistorBank;
 import sliprung.starter.Starter;
 import sliprung.tolerance.Corner;
@@ -91,13 +90,13 @@ final class StartComputation {
     return new Computed(starts, running, method);
   }
 
-  /** The history of a fault; at the nominal corner also a steady one has the peaks. */
-  private StartHistory fault(Scenario fault, Both at, RunUpMethod method) {
+  /**
+   * The history of a failed start: it lasts long against any transient and is followed with the
+   * steady circuit, at the nominal corner with the peaks of the transient.
+   */
+  private StartHistory fault(Scenario fault, Both at) {
     if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
       return simulator.run(fault, at.conditions()); // nothing closes: there is no closing peak
-    }
-    if (method.isTransient()) {
-      return simulator.runTransient(fault, at.conditions());
     }
     StartHistory steady = simulator.run(fault, at.conditions());
     return at.corner().isNominal()
@@ -113,11 +112,7 @@ final class StartComputation {
             ? both.withTransient()
             : both.steady().withPeaksOf(both.withTransient());
     Optional<RunningPoint> running = simulator.runningPoint(conditions);
-    // A motor that cannot carry its load at this corner is found by trip/running; what it was warm
-    // from before is then its rated current.
-    Motor motor = starter.motor();
-    double stator = running.map(r -> r.point().statorAmps()).orElse(motor.current());
-    double ring = running.map(r -> r.point().ringAmps()).orElse(motor.rotorCurrent().orElse(0.0));
+    Preloads before = Preloads.of(starter, running);
     Duty duty = starter.duty();
 
     List<ComputedStart> starts = new ArrayList<>();
@@ -129,16 +124,16 @@ final class StartComputation {
     }
     List<Double> sections =
         permitted.sectionLevelsAfter(PartPreload.COLD, Math.max(1, duty.coldStarts()));
-    DevicePreload warm = DevicePreload.running(stator, ring);
-    PartPreload restarted = new PartPreload(stator, ring, duty.restartAfterSeconds(), sections);
+    DevicePreload warm = before.devices();
+    PartPreload restarted = before.parts(duty.restartAfterSeconds(), sections);
     for (int n = 1; n <= duty.hotStarts(); n++) {
       starts.add(permitted(corner, permitted, ComputedStart.From.HOT, n, warm, restarted));
     }
 
-    DevicePreload forgotten = DevicePreload.remembered(stator, ring);
-    PartPreload hot = new PartPreload(stator, ring, 0.0, sections);
+    DevicePreload forgotten = before.remembered();
+    PartPreload hot = before.parts(0.0, sections);
     for (Scenario fault : faults()) {
-      StartProtection history = evaluator.over(fault(fault, both, method));
+      StartProtection history = evaluator.over(fault(fault, both));
       if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
         starts.add(
             fault(corner, history, ComputedStart.From.HOT, warmFromLightLoad(conditions), hot));

@@ -65,9 +65,9 @@ class LayoutTest {
   @Test
   void should_refuse_a_band_whose_edges_do_not_fit() {
     double[] two = {1, 2};
-    assertThatThrownBy(() -> new Band("F1", new double[] {2, 1}, two, two))
+    assertThatThrownBy(() -> new Band("F1", new double[] {2, 1}, two, two, two))
         .isInstanceOf(IllegalArgumentException.class);
-    assertThatThrownBy(() -> new Band("F1", two, new double[] {1}, two))
+    assertThatThrownBy(() -> new Band("F1", two, new double[] {1}, two, two))
         .isInstanceOf(IllegalArgumentException.class);
   }
 

@@ -30,6 +30,10 @@ class RecordWriterTest {
             "profile.csv",
             "first-limit.svg",
             "start-over-time.svg",
+            "margins.svg",
+            "torque-speed.svg",
+            "use-over-time.svg",
+            "section-levels.svg",
             "time-current.svg");
     assertThat(files.values()).allSatisfy(bytes -> assertThat(bytes).isNotEmpty());
   }
