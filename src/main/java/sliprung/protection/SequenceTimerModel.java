@@ -63,6 +63,10 @@ final class SequenceTimerModel implements EdgeModel {
     if (history.scenario().kind() == Scenario.Kind.RUNNING_LOCKED) {
       return 0.0; // its stop event came long ago, whichever it is
     }
+    if (untilSpeedShare.isEmpty() && history.scenario().kind() == Scenario.Kind.RINGS_SHORTED) {
+      // the last step's contactor is closed, or reports so: the timer has nothing to wait for
+      return 0.0;
+    }
     return untilSpeedShare.isEmpty()
         ? history.lastClosingSeconds().orElse(Double.POSITIVE_INFINITY)
         : reachedSeconds(history, untilSpeedShare.getAsDouble() * synchronousSpeed);

@@ -202,7 +202,12 @@ public final class EveryContactorCarriesItsCurrent implements Rule {
     ComputedStart worst = null;
     double use = 0.0;
     for (ComputedStart start : facts.permitted().toList()) {
-      double there = start.part(contactor.tag()).map(PartResponse::use).orElse(0.0);
+      PartResponse part = start.part(contactor.tag()).orElseThrow();
+      if (part.missing().isPresent()) {
+        missing.add(part.missing().get());
+        return;
+      }
+      double there = part.use();
       if (worst == null || there > use) {
         use = there;
         worst = start;

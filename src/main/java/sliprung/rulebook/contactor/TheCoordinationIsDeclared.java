@@ -47,7 +47,10 @@ public final class TheCoordinationIsDeclared implements Rule {
     FindingBuilder builder = FindingBuilder.of(facts, INFO, contactor.tag());
     String path = "contactors." + contactor.tag() + ".coordination";
     ShortCircuitDevices devices = ShortCircuitDevices.of(facts.starter());
-    OptionalDouble r = testAmps(facts.practice(), contactor);
+    boolean inScope =
+        facts.starter().supply().voltage()
+            <= facts.practice().figure("contactor.greatest-voltage").value();
+    OptionalDouble r = inScope ? testAmps(facts.practice(), contactor) : OptionalDouble.empty();
     if (contactor.coordination().isEmpty()) {
       return builder
           .mend("Declare the tested combination (" + path + "), from the maker's tables.")
