@@ -18,7 +18,10 @@ final class TransientDrive implements Drive {
   /** Error of a step, over the flux at no load and over synchronous speed. */
   private static final double ERROR = 1e-8;
 
-  /** Rates below this share of the scale a second count as settled. */
+  /**
+   * Rates below this count as settled: of a flux linkage over that of the supply, of the speed over
+   * synchronous speed in a second. Well above what the errors of the steps leave.
+   */
   private static final double SETTLED = 1e-6;
 
   /** A speed this close to the balance of torques is taken for it, over synchronous speed. */
@@ -194,7 +197,7 @@ final class TransientDrive implements Drive {
       flux = Math.max(flux, Math.abs(rate[i]));
     }
     double speed = Math.abs(rate[FluxModel.SPEED]) / circumstance.machine().synchronousSpeed();
-    return Math.max(flux / model.ratedFlux(), speed) - SETTLED;
+    return Math.max(flux / (model.electricalSpeed() * model.ratedFlux()), speed) - SETTLED;
   }
 
   @Override
