@@ -31,10 +31,7 @@ import sliprung.runup.Trace;
 class AnyStarterTest {
 
   @ParameterizedTest
-  @ValueSource(
-      ints = {
-        1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12, 13, 14, 15, 16
-      })
+  @ValueSource(ints = {1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12, 13, 14, 15, 16})
   void a_review_of_any_starter_answers_every_rule_that_must_be_judged(int seed) throws IOException {
     StarterText text = new Any(new Random(seed)).text();
     Review review = Reviewer.review(text.starter(), StarterText.DAY);
