@@ -45,6 +45,7 @@ public record CornerBand(
         }
       }
     }
+    least = Math.max(least, DurationCurve.LEAST_SHARE * greatest);
     double[] amps = new double[LEVELS];
     double[] low = new double[LEVELS];
     double[] high = new double[LEVELS];

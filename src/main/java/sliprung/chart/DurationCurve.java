@@ -15,6 +15,9 @@ import sliprung.runup.Stage;
 public record DurationCurve(String label, double[] amps, double[] seconds) {
   private static final int LEVELS = 160;
 
+  /** A current builds up from nothing after line closing; a log axis begins above that. */
+  static final double LEAST_SHARE = 0.05;
+
   /** Copies. */
   public DurationCurve {
     amps = amps.clone();
@@ -38,6 +41,7 @@ public record DurationCurve(String label, double[] amps, double[] seconds) {
         greatest = Math.max(greatest, amps[i]);
       }
     }
+    least = Math.max(least, LEAST_SHARE * greatest);
     double[] levels = new double[LEVELS];
     double[] seconds = new double[LEVELS];
     for (int k = 0; k < LEVELS; k++) {

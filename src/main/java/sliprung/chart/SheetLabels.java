@@ -37,13 +37,20 @@ final class SheetLabels {
     for (TimeCurrentSheet.Stall stall : sheet.stall()) {
       stall(stall);
     }
-    for (Band band : sheet.bands()) {
-      beside(Lines.cut(band.label(), LABEL_LETTERS), Ink.LABEL, Ink.DEVICE, slow(band), true);
-    }
     for (TakeOverMark mark : sheet.takeOvers()) {
       double x = frame.x(mark.amps());
       double y = frame.y(mark.seconds());
-      put(mark.label(), Ink.SMALL, Ink.DEVICE, List.of(at(x + 12, y - 8), at(x + 10, y - 26)));
+      double left = x - words.width(mark.label(), Ink.SMALL) - 12;
+      List<Point2D> places = new ArrayList<>();
+      for (double beside : new double[] {x + 12, left}) {
+        for (double up : new double[] {8, 14, 20, 2, -4}) {
+          places.add(at(beside, y - up));
+        }
+      }
+      put(mark.label(), Ink.SMALL, Ink.DEVICE, places);
+    }
+    for (Band band : sheet.bands()) {
+      beside(Lines.cut(band.label(), LABEL_LETTERS), Ink.LABEL, Ink.DEVICE, slow(band), true);
     }
     for (Withstand line : sheet.withstand()) {
       beside(line.label(), Ink.SMALL, Ink.PART, new Curve(line.amps(), line.seconds()), true);

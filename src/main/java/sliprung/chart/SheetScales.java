@@ -51,9 +51,9 @@ public record SheetScales(
     double least = Double.POSITIVE_INFINITY;
     for (Stage stage : cold.history().stages()) {
       Trace trace = stage.trace();
-      for (int i = 0; i < trace.size(); i++) {
-        least = Math.min(least, trace.ringAmps()[i] / trace.statorAmps()[i]);
-      }
+      // as it stands before the next closing: just after one, currents are not yet settled
+      int end = trace.last();
+      least = Math.min(least, trace.ringAmps()[end] / trace.statorAmps()[end]);
     }
     return least;
   }

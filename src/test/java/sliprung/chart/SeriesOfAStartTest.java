@@ -71,6 +71,16 @@ class SeriesOfAStartTest {
   }
 
   @Test
+  void should_begin_above_nothing_where_a_current_builds_up_from_zero() {
+    double[] zero = new double[3];
+    double[] amps = {0.0, 100.0, 200.0};
+    Trace trace = new Trace(new double[] {0, 1, 2}, zero, amps, zero, zero, zero, zero, zero);
+    Stage stage = new Stage(1, List.of(1), 0.1, 0.0, 2.0, false, "K1", trace);
+    DurationCurve curve = DurationCurve.stator("start", List.of(stage), 2.0);
+    assertThat(curve.amps()[curve.amps().length - 1]).isCloseTo(10.0, within(1e-6));
+  }
+
+  @Test
   void should_draw_held_steps_that_settle_alike_as_one_line() {
     TimeCurrentSheet sheet = TimeCurrentSheet.of(REVIEW, List.of());
     assertThat(sheet.held())
