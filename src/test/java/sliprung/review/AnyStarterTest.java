@@ -9,6 +9,7 @@ import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Random;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -62,7 +63,8 @@ class AnyStarterTest {
     if (seed % 4 == 0) {
       Map<String, byte[]> files =
           RecordWriter.files(
-              new Dossier(review, List.of(), List.of(), StatorBands.of(review.starter()), "test"));
+              new Dossier(review, List.of(), List.of(), StatorBands.of(review.starter()), "test"),
+              Optional.empty());
       assertThat(files.values()).allMatch(content -> content.length > 0);
     }
   }
