@@ -73,7 +73,6 @@ public final class NoStepLingers implements Rule {
     FindingBuilder builder =
         FindingBuilder.of(facts, INFO, "step " + step)
             .at(least.closing().start())
-            .margin(margin)
             .figures(least.share(), allowed, "share of the step's time")
             .says(
                 "Of the "
@@ -87,12 +86,13 @@ public final class NoStepLingers implements Rule {
                     + " of synchronous speed, at "
                     + Show.amps(trace.statorAmps()[trace.last()])
                     + ", in the start that settles latest.");
+    // no margin where it is late: under 1 it would read as a limit that is not met
     return Optional.of(
         late
             ? builder
                 .mend("Close step contactor " + step + " sooner: waiting only heats the bank.")
                 .build(Verdict.TIGHT)
-            : builder.byMargin());
+            : builder.margin(margin).byMargin());
   }
 
   /** How long before the closing the speed came within that gain of the speed at the closing. */

@@ -66,7 +66,6 @@ public final class TheClosingsAreEven implements Rule {
     double allowed = facts.practice().figure("grading.ratio").value();
     double margin = allowed / ratio;
     builder
-        .margin(margin)
         .figures(ratio, allowed, "greatest over least")
         .says(
             "The closings put "
@@ -80,11 +79,12 @@ public final class TheClosingsAreEven implements Rule {
                 + ") through the rings, a ratio of "
                 + Show.ratio(ratio)
                 + ".");
+    // no margin where they are uneven: under 1 it would read as a limit that is not met
     return new Answer.Findings(
         List.of(
             margin < facts.wanted(INFO.name())
                 ? builder.mend(mend(closings, high, low, sections)).build(Verdict.TIGHT)
-                : builder.byMargin()));
+                : builder.margin(margin).byMargin()));
   }
 
   /** The closing that lies farther from the geometric mean is the one to move. */
