@@ -37,10 +37,25 @@ final class Ink {
           2f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10f, new float[] {7f, 4f}, 0f);
   static final Stroke WALL = new BasicStroke(3f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_MITER);
 
-  static final Font LABEL = new Font(Font.SANS_SERIF, Font.PLAIN, 13);
-  static final Font STRONG = new Font(Font.SANS_SERIF, Font.BOLD, 13);
-  static final Font FINE = new Font(Font.SANS_SERIF, Font.PLAIN, 11);
-  static final Font SMALL = new Font(Font.SANS_SERIF, Font.PLAIN, 12);
+  static final Font LABEL = Letters.plain(13);
+  static final Font STRONG = Letters.bold(13);
+  static final Font FINE = Letters.plain(11);
+  static final Font SMALL = Letters.plain(12);
+
+  private static final Color RING_LETTERS = new Color(0x00734F);
+  private static final Color PART_LETTERS = new Color(0xA84A00);
+  private static final Color LOAD_LETTERS = new Color(0x1F6E9C);
+
+  /** The colour of letters that name a line: darker than a line where its hue is too pale. */
+  static Color letters(Color line) {
+    if (line.equals(RING)) {
+      return RING_LETTERS;
+    }
+    if (line.equals(PART)) {
+      return PART_LETTERS;
+    }
+    return line.equals(LOAD) ? LOAD_LETTERS : line;
+  }
 
   private Ink() {}
 }

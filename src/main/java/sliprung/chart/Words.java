@@ -22,7 +22,7 @@ final class Words {
   /** Starts at x, on the base line y. */
   void left(String text, Font font, Color colour, double x, double y) {
     surface.setFont(font);
-    surface.setColor(colour);
+    surface.setColor(Ink.letters(colour));
     surface.drawString(Lines.printable(text), (float) x, (float) y);
   }
 

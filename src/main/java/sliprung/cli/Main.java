@@ -30,7 +30,7 @@ public final class Main {
     line.setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF));
     line.setParameterExceptionHandler(
         (mistake, words) -> {
-          err.println("sliprung: " + mistake.getMessage());
+          err.println("sliprung: " + Printable.of(mistake.getMessage()));
           CommandLine.UnmatchedArgumentException.printSuggestions(mistake, err);
           err.println("Try 'sliprung " + tried(mistake) + "--help'.");
           return ExitStatus.WRONG_INPUT;

@@ -7,6 +7,7 @@ import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -19,6 +20,7 @@ import sliprung.config.StarterReading;
 import sliprung.record.AsRead;
 import sliprung.record.Dossier;
 import sliprung.record.InputFile;
+import sliprung.record.Paper;
 import sliprung.record.RecordWriter;
 import sliprung.review.Review;
 import sliprung.review.Reviewer;
@@ -48,6 +50,18 @@ final class ReviewCommand implements Callable<Integer> {
       paramLabel = "DATE",
       description = "Judge accepted deviations at this date, such as 2027-01-31; today if absent.")
   private LocalDate date;
+
+  @Option(
+      names = "--paper",
+      paramLabel = "SIZE",
+      converter = PaperName.class,
+      description = "Paper of review.pdf: a4 (default) or letter.")
+  private Paper paper = Paper.A4;
+
+  @Option(
+      names = "--no-pdf",
+      description = "Leave review.pdf out, which takes about as long as all the rest.")
+  private boolean withoutPdf;
 
   @Option(names = "--all", description = "Print every clear finding.")
   private boolean everything;
@@ -95,10 +109,14 @@ final class ReviewCommand implements Callable<Integer> {
       if (directory != null) {
         Path place = directory.resolve(stem(one.file()));
         try {
-          RecordWriter.write(place, RecordWriter.files(one.dossier()));
+          RecordWriter.write(
+              place,
+              RecordWriter.files(one.dossier(), Optional.of(paper).filter(p -> !withoutPdf)));
         } catch (IOException e) {
           out.flush();
-          err.println("sliprung: the record cannot be written to " + place + ": " + e.getMessage());
+          err.println(
+              "sliprung: the record cannot be written to "
+                  + Printable.of(place + ": " + e.getMessage()));
           return ExitStatus.WRONG_INPUT;
         }
         summary.written(place.resolve("review.html").toString());
@@ -121,9 +139,9 @@ final class ReviewCommand implements Callable<Integer> {
       if (directory != null && !stems.add(stem(file))) {
         err.println(
             "sliprung: two files are named "
-                + stem(file)
+                + Printable.of(stem(file))
                 + ": their records would overwrite each other in "
-                + directory);
+                + Printable.of(directory.toString()));
         good = false;
       }
     }

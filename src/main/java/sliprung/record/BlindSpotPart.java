@@ -22,7 +22,9 @@ final class BlindSpotPart {
             : unseen
                 + " of "
                 + spots.rows().size()
-                + " faults have no device that by itself clears them in time at every corner.");
+                + (unseen == 1 ? " faults has" : " faults have")
+                + " no device that by itself clears it in time at every corner; whether two of them"
+                + " do it together, the findings say.");
     List<String> heads = new ArrayList<>(List.of("fault"));
     heads.addAll(spots.devices());
     Cells cells =
@@ -33,8 +35,12 @@ final class BlindSpotPart {
                 heads);
     for (BlindSpots.Row row : spots.rows()) {
       List<String> texts = new ArrayList<>(List.of(row.fault()));
-      row.cells().forEach(c -> texts.add(words(c)));
-      cells.row(texts.toArray(String[]::new));
+      List<String> classes = new ArrayList<>(List.of(""));
+      for (BlindSpots.Cell cell : row.cells()) {
+        texts.add(words(cell));
+        classes.add(weight(cell.sight()));
+      }
+      cells.row(texts, classes);
     }
     cells.close();
     page.element(
@@ -44,6 +50,15 @@ final class BlindSpotPart {
         "class",
         "quiet");
     page.end();
+  }
+
+  /** What sees in time stands out, what is blind steps back; the words say it too. */
+  private static String weight(BlindSpots.Sight sight) {
+    return switch (sight) {
+      case SEES -> "strong";
+      case BLIND -> "plain";
+      default -> "some";
+    };
   }
 
   static String words(BlindSpots.Cell cell) {

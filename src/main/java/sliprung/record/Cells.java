@@ -46,6 +46,20 @@ final class Cells {
     return this;
   }
 
+  /** A row of plain cells but for the first, each of a class of its own. */
+  Cells row(List<String> texts, List<String> classes) {
+    page.open("tr");
+    for (int i = 0; i < texts.size(); i++) {
+      if (i == 0) {
+        page.element("th", texts.get(i), "scope", "row");
+      } else {
+        page.element("td", texts.get(i), "class", classes.get(i));
+      }
+    }
+    page.end();
+    return this;
+  }
+
   /** Closes the table. */
   void close() {
     page.end().end().end();

@@ -43,12 +43,12 @@ final class CheckList {
   record Item(String state, String test, String expect) {}
 
   /** The list for a starter. */
-  static List<Item> of(Review review) {
+  static List<Item> of(Review review, StepReadings readings) {
     CheckList list = new CheckList(review);
     list.dead();
     list.control();
     list.power();
-    list.start();
+    list.start(readings);
     return List.copyOf(list.items);
   }
 
@@ -229,8 +229,7 @@ final class CheckList {
     }
   }
 
-  private void start() {
-    StepReadings readings = StepReadings.of(review);
+  private void start(StepReadings readings) {
     for (StepReadings.Step step : readings.normal()) {
       StepReadings.Reading at = step.begins();
       add(

@@ -31,7 +31,7 @@ record DialText(String device, String dial, String setting) {
   }
 
   private static void step(List<DialText> dials, Step step) {
-    String device = "Step contactor " + step.contactor();
+    String device = step.contactor() + " step contactor";
     if (step.rule() instanceof Step.After after) {
       dials.add(new DialText(device, "timer", Show.seconds(after.seconds())));
     } else if (step.rule() instanceof Step.StatorBelow below) {

@@ -5,8 +5,8 @@ import sliprung.review.Review;
 
 /** The settings sheet for the panel door: one page of its own, columns for the hand. */
 final class DoorSheetPart {
-  private static final int BIG = 16;
-  private static final int MIDDLE = 24;
+  private static final int BIG = 12;
+  private static final int MIDDLE = 17;
 
   private DoorSheetPart() {}
 
@@ -29,8 +29,9 @@ final class DoorSheetPart {
     page.open("div", "class", "wide").open("table", "class", "hand", "aria-label", "By hand");
     page.open("tbody");
     blank(page, "Set by", "Date");
-    blank(page, "Test set, calibrated until", "Trip of each device proved on");
-    blank(page, "Witness", "Air at the panel, °C");
+    blank(page, "Test set", "Trips proved on");
+    blank(page, "Calibrated until", "Air at the panel");
+    blank(page, "Witness", "Signature");
     page.end().end().end();
     page.end();
   }

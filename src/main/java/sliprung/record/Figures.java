@@ -2,7 +2,10 @@ package sliprung.record;
 
 import sliprung.chart.Picture;
 
-/** How charts and margin bars come onto a page: on a screen and on paper in different ways. */
+/**
+ * How charts, margin bars and overlong words come onto a page: on a screen and on paper in
+ * different ways.
+ */
 interface Figures {
   /** Puts a chart where the page stands. */
   void chart(Html page, Picture picture);
@@ -13,4 +16,7 @@ interface Figures {
    * @param share margin over wanted margin, 0 or more
    */
   void bar(Html page, double share);
+
+  /** A text as it can be set there. */
+  String fitted(String text);
 }

@@ -90,7 +90,9 @@ final class FindingPart {
             .open(
                 "Defaults, taken because the file is silent, that decided a verdict; tight: it"
                     + " decided a breach or a tight margin",
-                List.of("input", "verdict", "what was taken, and what it decided", "next"));
+                List.of("input", "verdict", "what was taken, and what it decided", "next"),
+                "class",
+                "defaults");
     findings.forEach(f -> cells.row(f.subject(), f.verdict().word(), f.says(), f.mend()));
     cells.close();
   }

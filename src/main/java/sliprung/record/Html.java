@@ -82,7 +82,7 @@ final class Html {
 
   /** A text. */
   Html text(String text) {
-    out.append(escaped(text));
+    out.append(escaped(figures.fitted(text)));
     return this;
   }
 

@@ -24,7 +24,9 @@ final class InputsPart {
             .open(
                 "What the file says, what it was taken for, and how well it is known; a grade in"
                     + " brackets was not stated",
-                List.of("input", "as written", "#taken as", "evidence"));
+                List.of("input", "as written", "#taken as", "evidence"),
+                "class",
+                "dense");
     for (AsRead value : dossier.values()) {
       cells.row(value.path(), value.text(), taken(value), grade(starter, value.path()));
     }

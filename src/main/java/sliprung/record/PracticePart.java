@@ -14,6 +14,9 @@ import sliprung.rulebook.Practice;
 final class PracticePart {
   private static final String WANTED = "wanted.";
 
+  /** Ranges behind data/plausible: ours, some eighty, and none of them decides a margin. */
+  private static final String PLAUSIBLE = "plausible.";
+
   private PracticePart() {}
 
   static void write(Html page, Review review) {
@@ -26,7 +29,9 @@ final class PracticePart {
                     + name
                     + ": wanted margins of the rules that were asked, and the standards' figures"
                     + " behind them; a mark says who has seen the figure in its source",
-                List.of("figure", "#value", "clause", "mark"));
+                List.of("figure", "#value", "clause", "mark"),
+                "class",
+                "dense");
     for (Practice.Figure figure : used(review, Practice.named(name)).toList()) {
       cells.row(figure.key(), Show.three(figure.value()), figure.clause(), figure.mark());
     }
@@ -41,7 +46,9 @@ final class PracticePart {
             .flatMap(c -> c.ratings().keySet().stream())
             .collect(Collectors.toSet());
     return practice.figures().values().stream()
-        .filter(f -> !f.key().startsWith(WANTED) || asked.contains(f.key().substring(7)))
+        .filter(f -> !f.key().startsWith(PLAUSIBLE))
+        .filter(
+            f -> !f.key().startsWith(WANTED) || asked.contains(f.key().substring(WANTED.length())))
         .filter(f -> !f.key().startsWith("AC-") || categories.contains(f.key().split("\\.", 2)[0]));
   }
 }

@@ -45,7 +45,9 @@ final class ProtectionPart {
                     "#clears",
                     "#current margin",
                     "#stretch margin",
-                    "remark"));
+                    "remark"),
+                "class",
+                "dense");
     for (DeviceResponse device : start.devices()) {
       devices.row(cells(device));
     }
@@ -54,7 +56,9 @@ final class ProtectionPart {
         new Cells(page)
             .open(
                 "Parts over the nominal " + words + "; a use of 1.00 or more is past the limit",
-                List.of("part", "#use", "#limit reached", "remark"));
+                List.of("part", "#use", "#limit reached", "remark"),
+                "class",
+                "dense");
     for (PartResponse part : start.parts()) {
       boolean known = part.missing().isEmpty();
       parts.row(
@@ -110,7 +114,9 @@ final class ProtectionPart {
                     "first part at its limit",
                     "#at",
                     "#clearing ratio",
-                    "finding"));
+                    "finding"),
+                "class",
+                "faults");
     for (FaultRow row : chart.rows()) {
       Optional<FaultRow.Limit> limit = row.limit();
       cells.row(

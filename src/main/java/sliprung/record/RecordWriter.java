@@ -5,7 +5,8 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
-import sliprung.chart.FirstLimitChart;
+import java.util.Optional;
+import java.util.concurrent.CompletableFuture;
 import sliprung.chart.Picture;
 import sliprung.chart.Svg;
 import sliprung.review.Review;
@@ -14,19 +15,27 @@ import sliprung.review.Review;
 public final class RecordWriter {
   private RecordWriter() {}
 
-  /** Every file of a record by its name, not yet written. */
-  public static Map<String, byte[]> files(Dossier dossier) {
+  /**
+   * Every file of a record by its name, not yet written. The PDF, which takes longest, is made
+   * beside the others.
+   *
+   * @param paper of the PDF; empty: no PDF
+   */
+  public static Map<String, byte[]> files(Dossier dossier, Optional<Paper> paper) {
     Review review = dossier.review();
+    Contents contents = Contents.of(dossier);
+    Optional<CompletableFuture<byte[]>> pdf =
+        paper.map(p -> CompletableFuture.supplyAsync(() -> ReviewPdf.bytes(contents, p)));
     Map<String, String> texts = new LinkedHashMap<>();
-    texts.put("review.html", ReviewHtml.text(dossier));
+    texts.put("review.html", ReviewHtml.text(contents));
     texts.put("review.json", ReviewJson.text(review, dossier.inputs(), dossier.program()));
     texts.put("profile.csv", ProfileCsv.text(review));
-    FirstLimitChart firstLimit = FirstLimitChart.of(review);
-    for (Picture picture : ReviewPictures.of(review, firstLimit, dossier.bands()).all()) {
+    for (Picture picture : contents.pictures().all()) {
       texts.put(picture.name() + ".svg", Svg.file(picture));
     }
     Map<String, byte[]> files = new LinkedHashMap<>();
     texts.forEach((name, text) -> files.put(name, text.getBytes(StandardCharsets.UTF_8)));
+    pdf.ifPresent(p -> files.put("review.pdf", p.join()));
     return files;
   }
 

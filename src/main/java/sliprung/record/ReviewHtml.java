@@ -20,12 +20,16 @@ public final class ReviewHtml {
 
   /** The whole page. */
   public static String text(Dossier dossier) {
+    return text(Contents.of(dossier));
+  }
+
+  static String text(Contents contents) {
     Html page = new Html(new ScreenFigures());
     page.markup("<!DOCTYPE html>\n");
     page.open("html", "lang", "en", "xmlns", "http://www.w3.org/1999/xhtml").markup("\n");
-    head(page, dossier.review());
+    head(page, contents.review());
     page.open("body").markup("\n");
-    ReviewLayout.write(page, dossier);
+    ReviewLayout.write(page, contents);
     page.end();
     page.end();
     return page.toString();

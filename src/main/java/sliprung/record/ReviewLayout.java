@@ -4,21 +4,19 @@ import sliprung.chart.FirstLimitChart;
 import sliprung.chart.Picture;
 import sliprung.review.Answer;
 import sliprung.review.Answers;
-import sliprung.review.BlindSpots;
 import sliprung.review.Question;
 import sliprung.review.Review;
-import sliprung.review.StepReadings;
-import sliprung.review.TripMatrix;
 
 /** The order of a record on screen and on paper. */
 final class ReviewLayout {
   private ReviewLayout() {}
 
-  static void write(Html page, Dossier dossier) {
-    Review review = dossier.review();
-    Answers answers = Answers.of(review);
-    FirstLimitChart firstLimit = FirstLimitChart.of(review);
-    ReviewPictures pictures = ReviewPictures.of(review, firstLimit, dossier.bands());
+  static void write(Html page, Contents contents) {
+    Dossier dossier = contents.dossier();
+    Review review = contents.review();
+    Answers answers = contents.answers();
+    FirstLimitChart firstLimit = contents.firstLimit();
+    ReviewPictures pictures = contents.pictures();
     TitlePart.write(page, dossier);
     page.open("main").markup("\n");
     answer(page, answers, firstLimit, pictures);
@@ -32,14 +30,14 @@ final class ReviewLayout {
     figure(page, pictures.margins());
     page.end();
     AcceptedPart.write(page, review);
-    TripMatrixPart.write(page, TripMatrix.of(review));
-    BlindSpotPart.write(page, BlindSpots.of(review));
+    TripMatrixPart.write(page, contents.trips());
+    BlindSpotPart.write(page, contents.blindSpots());
     StartPart.write(page, review, pictures);
-    StepTablePart.write(page, StepReadings.of(review));
+    StepTablePart.write(page, contents.readings());
     ProtectionPart.write(page, review, firstLimit, pictures);
-    Cautions.write(page);
     DoorSheetPart.write(page, dossier);
-    CheckListPart.write(page, review);
+    Cautions.write(page);
+    CheckListPart.write(page, review, contents.readings());
     BasisPart.write(page, review);
     PracticePart.write(page, review);
     InputsPart.values(page, dossier);
@@ -51,9 +49,15 @@ final class ReviewLayout {
   /** The answer in the first screen. */
   private static void answer(
       Html page, Answers answers, FirstLimitChart firstLimit, ReviewPictures pictures) {
-    page.element("p", answers.headline(), "class", "headline");
+    page.element("p", answers.headline(), "class", "headline", "id", "answer");
     AnswerPart.glance(page, answers);
     figure(page, pictures.firstLimit());
+    page.element(
+        "p",
+        "In the findings a bar shows the margin: the mark in its middle is the wanted margin, a bar"
+            + " that ends before it is short of it.",
+        "class",
+        "quiet");
     if (!firstLimit.withoutData().isEmpty()) {
       page.element(
           "p",

@@ -35,6 +35,11 @@ final class ScreenFigures implements Figures {
     page.close();
   }
 
+  @Override
+  public String fitted(String text) {
+    return text;
+  }
+
   private static void rectangle(Html page, String kind, double x, double y, double width) {
     page.empty(
         "rect",

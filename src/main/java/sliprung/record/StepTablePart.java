@@ -80,27 +80,31 @@ final class StepTablePart {
                     "does not close",
                     "load",
                     skipped ? "next closing" : "hangs on",
+                    "read at",
                     "#speed",
                     "#stator",
                     "#rings",
                     "#rotor",
                     "#ring volts",
-                    "#steady after",
-                    "cleared by"));
+                    "would settle at",
+                    "opened by"),
+                "class",
+                skipped ? "skipped" : "held");
     for (StepReadings.LeftOut row : rows) {
-      StepReadings.Reading r = row.hangs();
+      StepReadings.Reading r = row.read();
       cells.row(
           row.contactor(),
           row.start().scenario().load() == Scenario.LoadMode.START ? "starting" : "running",
           row.next().map(StepTablePart::jump).orElse("step " + row.start().scenario().step()),
+          Show.seconds(r.seconds()) + (row.opensFirst() ? ", opening" : ", steady"),
           Show.rpm(r.speed()),
           Show.amps(r.statorAmps()),
           ring(r),
           hertz(r),
           Show.volts(r.ringVolts()),
-          Show.seconds(row.steadySeconds()),
+          Show.rpm(row.hangs().speed()) + ", " + Show.amps(row.hangs().statorAmps()),
           row.clearing()
-              .map(c -> c.device() + ", at " + Show.seconds(c.clearsAtSeconds()) + " at the latest")
+              .map(c -> c.device() + " by " + Show.seconds(c.clearsAtSeconds()))
               .orElse("nothing"));
     }
     cells.close();

@@ -28,7 +28,9 @@ final class TripMatrixPart {
                     "#greatest current",
                     "when",
                     "#short circuit, up to",
-                    "proven to break"));
+                    "proven to break"),
+                "class",
+                "trips");
     for (TripMatrix.Row row : matrix.rows()) {
       cells.row(
           DeviceText.words(row.device()),

@@ -23,6 +23,17 @@ record TripTest(String test, String expect) {
       return Optional.empty();
     }
     String opens = device.trips().map(t -> t + " opens").orElse("it opens nothing: find out why");
+    if (device instanceof Device.Instantaneous quick) {
+      return Optional.of(
+          new TripTest(
+              "Raise the current in " + device.tag() + " from below, briefly each time.",
+              opens
+                  + " at "
+                  + Show.amps(quick.pickUpAmps())
+                  + " ± "
+                  + Show.percent(quick.accuracy().pickUp())
+                  + (quick.measures() == Device.Measures.PEAK ? " of a sine wave." : ".")));
+    }
     Optional<Double> pickUp = device.fold(new PickUps());
     if (pickUp.isEmpty()) {
       return Optional.of(

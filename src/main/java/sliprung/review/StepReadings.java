@@ -62,17 +62,24 @@ public record StepReadings(List<Step> normal, List<LeftOut> leftOut) {
    * @param contactor tag
    * @param start the computed fault
    * @param next after a skipped step: just after the next closing; empty where the sequence stops
-   * @param hangs where it comes to rest or settles at last
-   * @param steadySeconds from when on the stator current stays within 2 % of that reading
+   * @param read once the stator current stays within 2 % of its last value, or just before the
+   *     circuit is opened if that comes first
+   * @param hangs where it settles at last if nothing opens
    * @param clearing slow-edge response of the device that clears it, if any
    */
   public record LeftOut(
       String contactor,
       ComputedStart start,
       Optional<Reading> next,
+      Reading read,
       Reading hangs,
-      double steadySeconds,
-      Optional<DeviceResponse> clearing) {}
+      Optional<DeviceResponse> clearing) {
+
+    /** Whether the circuit opens before the readings are steady. */
+    public boolean opensFirst() {
+      return clearing.filter(c -> c.clearsAtSeconds() <= read.seconds()).isPresent();
+    }
+  }
 
   /** Copies the lists. */
   public StepReadings {
@@ -102,11 +109,21 @@ public record StepReadings(List<Step> normal, List<LeftOut> leftOut) {
         for (Scenario.LoadMode load : Scenario.LoadMode.values()) {
           review
               .start(new Scenario(kind, k, load).id())
-              .ifPresent(s -> leftOut.add(leftOut(review, facts, s)));
+              .map(s -> leftOut(review, facts, s))
+              .filter(StepReadings::isReached)
+              .ifPresent(leftOut::add);
         }
       }
     }
     return new StepReadings(normal, leftOut);
+  }
+
+  /** Whether the last stage, in which a running load is put on, is reached before the opening. */
+  private static boolean isReached(LeftOut row) {
+    List<Stage> stages = row.start().history().stages();
+    double from = stages.get(stages.size() - 1).fromSeconds();
+    return row.start().scenario().load() == Scenario.LoadMode.START
+        || row.clearing().filter(c -> c.clearsAtSeconds() <= from).isEmpty();
   }
 
   private static LeftOut leftOut(Review review, Facts facts, ComputedStart start) {
@@ -121,13 +138,38 @@ public record StepReadings(List<Step> normal, List<LeftOut> leftOut) {
               .findFirst()
               .map(s -> reading(review, s, 0));
     }
+    Optional<DeviceResponse> clearing = Exposure.of(facts, start).clearing();
+    double opens = clearing.map(DeviceResponse::clearsAtSeconds).orElse(Double.POSITIVE_INFINITY);
     return new LeftOut(
         review.starter().steps().get(failed - 1).contactor(),
         start,
         next,
+        at(review, stages, Math.min(steady(stages), opens)),
         reading(review, last, last.trace().last()),
-        steady(stages),
-        Exposure.of(facts, start).clearing());
+        clearing);
+  }
+
+  /** Readings at a time, those of the sample at or just before it. */
+  private static Reading at(Review review, List<Stage> stages, double seconds) {
+    Stage stage = stages.get(0);
+    for (Stage candidate : stages) {
+      if (candidate.fromSeconds() <= seconds) {
+        stage = candidate;
+      }
+    }
+    double[] times = stage.trace().seconds();
+    int i = 0;
+    while (i < stage.trace().last() && times[i + 1] <= seconds) {
+      i++;
+    }
+    Reading sample = reading(review, stage, i);
+    return new Reading(
+        seconds,
+        sample.speed(),
+        sample.statorAmps(),
+        sample.ringAmps(),
+        sample.rotorHertz(),
+        sample.ringVolts());
   }
 
   private static double steady(List<Stage> stages) {

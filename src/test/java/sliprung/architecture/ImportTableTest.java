@@ -95,7 +95,12 @@ class ImportTableTest {
                       RULES,
                       "review",
                       "chart",
-                      "com.fasterxml.jackson..")),
+                      "com.fasterxml.jackson..",
+                      "com.openhtmltopdf..",
+                      "org.apache.pdfbox..",
+                      "de.rototor.pdfbox..",
+                      "org.w3c.dom..",
+                      "java.awt..")),
               Map.entry(
                   "cli",
                   List.of(

@@ -10,6 +10,7 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -22,11 +23,13 @@ class RecordWriterTest {
   void should_make_every_file_of_a_record() {
     Map<String, byte[]> files =
         RecordWriter.files(
-            new Dossier(CrusherReview.plain(), List.of(), List.of(), List.of(), "0.1.0"));
+            new Dossier(CrusherReview.plain(), List.of(), List.of(), List.of(), "0.1.0"),
+            Optional.of(Paper.A4));
     assertThat(files.keySet())
         .containsExactlyInAnyOrder(
             "review.html",
             "review.json",
+            "review.pdf",
             "profile.csv",
             "first-limit.svg",
             "start-over-time.svg",

@@ -3,7 +3,6 @@ package sliprung.record;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
-import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
@@ -14,23 +13,13 @@ import sliprung.review.Question;
 import sliprung.review.Review;
 
 class ReviewHtmlTest {
-  private static final String HOSTILE =
-      "<script>alert(1)</script> ]]> \" ' & \u0000\u0007\u009b <!-- \uD800 --> "
-          + "<img src=x onerror=y> javascript:z";
   private static final List<InputFile> INPUTS =
       List.of(new InputFile("crusher.yaml", "00ff", "starter: <b>\n  <![CDATA[ x ]]>\n"));
   private static final String PAGE = page(CrusherReview.plain());
 
   @Test
   void should_be_well_formed_with_hostile_text_everywhere() {
-    String page =
-        ReviewHtml.text(
-            new Dossier(
-                CrusherReview.of(HOSTILE, HOSTILE, true),
-                List.of(new InputFile(HOSTILE, HOSTILE, HOSTILE)),
-                List.of(new AsRead(HOSTILE, HOSTILE, OptionalDouble.empty(), HOSTILE)),
-                List.of(),
-                HOSTILE));
+    String page = ReviewHtml.text(Dossiers.hostile());
     Document document = Parsed.xml(page);
     assertThat(Parsed.elements(document))
         .extracting(Element::getTagName)
@@ -40,7 +29,8 @@ class ReviewHtmlTest {
     assertThat(page.split("<script", -1)).hasSize(2);
     assertThat(document.getElementsByTagName("script").item(0).getTextContent())
         .isEqualTo(PageScript.text());
-    assertThat(page).doesNotContain("<img").doesNotContain("\u0000");
+    assertThat(page).doesNotContain("<img").doesNotContain("\u0000").doesNotContain("\u001b");
+    assertThat(page).doesNotContain("\u202E");
     assertThat(document.getElementsByTagName("h1").item(0).getTextContent())
         .startsWith("<script>alert(1)</script> ]]> \" ' &");
   }
