@@ -9,12 +9,14 @@ import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Random;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import sliprung.chart.StatorBands;
 import sliprung.fixture.StarterText;
 import sliprung.record.Dossier;
+import sliprung.record.Paper;
 import sliprung.record.RecordWriter;
 import sliprung.record.ReviewJson;
 import sliprung.rulebook.Finding;
@@ -65,7 +67,8 @@ class AnyStarterTest {
     if (seed % 4 == 0) {
       Map<String, byte[]> files =
           RecordWriter.files(
-              new Dossier(review, List.of(), List.of(), StatorBands.of(review.starter()), "test"));
+              new Dossier(review, List.of(), List.of(), StatorBands.of(review.starter()), "test"),
+              Optional.of(Paper.A4));
       assertThat(files.values()).allMatch(content -> content.length > 0);
     }
   }
