@@ -16,7 +16,7 @@ import sliprung.rulebook.Verdict;
 final class Summary {
   private static final String INDENT = "   ";
   private static final int VERDICT = 12;
-  private static final int SUBJECT = 17;
+  private static final int SUBJECT = 19;
   private static final int MARGIN = 15;
   private static final int CLEAR_SHOWN = 3;
 

@@ -8,6 +8,7 @@ import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
 import java.io.Writer;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -174,7 +175,9 @@ class MainTest {
     Path out = folder.resolve("records");
     run("review", sound, "--out", out);
     for (String file : under(out)) {
-      assertThat(Files.readString(out.resolve(file))).as(file).doesNotContain(folder.toString());
+      assertThat(Files.readString(out.resolve(file), StandardCharsets.ISO_8859_1))
+          .as(file)
+          .doesNotContain(folder.toString());
     }
   }
 
@@ -187,9 +190,9 @@ class MainTest {
 
     assertThat(under(first)).isEqualTo(under(second)).isNotEmpty();
     for (String file : under(first)) {
-      assertThat(Files.readString(second.resolve(file)))
+      assertThat(Files.readAllBytes(second.resolve(file)))
           .as(file)
-          .isEqualTo(Files.readString(first.resolve(file)));
+          .isEqualTo(Files.readAllBytes(first.resolve(file)));
     }
   }
 

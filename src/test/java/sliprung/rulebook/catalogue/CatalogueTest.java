@@ -95,7 +95,7 @@ class CatalogueTest {
   @Test
   void built_and_not_built_are_the_whole_book_and_no_more() {
     Set<String> all = new TreeSet<>(Catalogue.built().keySet());
-    assertThat(all).doesNotContainAnyElementsOf(Catalogue.notBuilt().keySet());
+    assertThat(all.stream().filter(Catalogue.notBuilt()::containsKey)).isEmpty();
     all.addAll(Catalogue.notBuilt().keySet());
 
     assertThat(all).containsExactlyInAnyOrderElementsOf(BOOK);
