@@ -22,8 +22,9 @@ import sliprung.starter.Starter;
 /**
  * {@code overload/rotor}: the resistor bank is protected without any overload relay of the motor.
  *
- * <p>Margin: least clearing ratio of a held or skipped step without those relays. Below the wanted
- * one it is tight, never a breach: whether anything clears in time is {@code held/exposure}.
+ * <p>Margin: least clearing ratio of a held or skipped step without those relays; none below 1.
+ * Below the wanted one it is tight, never a breach: whether anything clears in time is {@code
+ * held/exposure}.
  */
 public final class NoOverloadIsCreditedWithTheBank implements Rule {
   private static final Info INFO =
@@ -89,10 +90,10 @@ public final class NoOverloadIsCreditedWithTheBank implements Rule {
       return builder.notJudged(worst.missing(), sees + " What a held step heats is not known.");
     }
     double ratio = worst.clearingRatio();
-    builder
-        .at(worst.start())
-        .margin(ratio)
-        .figures(worst.clearedAtSeconds(), worst.limitAtSeconds(), "s");
+    builder.at(worst.start()).figures(worst.clearedAtSeconds(), worst.limitAtSeconds(), "s");
+    if (ratio >= 1.0) {
+      builder.margin(ratio); // a margin below 1 is a breach, and that is held/exposure's
+    }
     if (ratio >= facts.wanted(INFO.name())) {
       return builder
           .says(
