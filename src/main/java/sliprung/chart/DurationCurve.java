@@ -16,7 +16,7 @@ public record DurationCurve(String label, double[] amps, double[] seconds) {
   private static final int LEVELS = 160;
 
   /** A current builds up from nothing after line closing; a log axis begins above that. */
-  static final double LEAST_SHARE = 0.05;
+  static final double LEAST_SHARE = 0.2;
 
   /** Copies. */
   public DurationCurve {

@@ -171,8 +171,8 @@ public record TorqueSpeed(
   private static String says(ComputedStart cold, List<Hang> hangs) {
     String path =
         cold.history().runUpSeconds().isPresent()
-            ? "The heavy line is the nominal cold start: down along the curve of a step, up to the"
-                + " next at each closing."
+            ? "The heavy line is the nominal cold start: it follows the curve of a step and goes up"
+                + " to the next at each closing."
             : "The heavy line is the nominal cold start, which never runs up.";
     if (hangs.isEmpty()) {
       return path + " No step that stays in leaves the motor hanging at a steady speed.";

@@ -77,7 +77,7 @@ class SeriesOfAStartTest {
     Trace trace = new Trace(new double[] {0, 1, 2}, zero, amps, zero, zero, zero, zero, zero);
     Stage stage = new Stage(1, List.of(1), 0.1, 0.0, 2.0, false, "K1", trace);
     DurationCurve curve = DurationCurve.stator("start", List.of(stage), 2.0);
-    assertThat(curve.amps()[curve.amps().length - 1]).isCloseTo(10.0, within(1e-6));
+    assertThat(curve.amps()[curve.amps().length - 1]).isCloseTo(40.0, within(1e-6));
   }
 
   @Test
