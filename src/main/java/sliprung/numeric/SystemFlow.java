@@ -1,21 +1,37 @@
 package sliprung.numeric;
 
-import java.util.Arrays;
-import org.apache.commons.math3.ode.FirstOrderDifferentialEquations;
-import org.apache.commons.math3.ode.events.EventHandler;
-import org.apache.commons.math3.ode.nonstiff.DormandPrince853Integrator;
-import org.apache.commons.math3.ode.sampling.StepHandler;
-import org.apache.commons.math3.ode.sampling.StepInterpolator;
-
 /**
  * Integration of an autonomous system {@code dy/dt = f(y)} until a time or until a function of y
- * crosses zero: Dormand and Prince's method of order 8 with dense output, from Commons Math (see
- * {@link Flow}).
+ * crosses zero: Dormand and Prince's method of order 8 with dense output and step control by two
+ * error estimates (DOP853, see {@link DormandPrinceTableau}). Written out here because a start has
+ * thousands of small steps.
  */
 public final class SystemFlow {
+  private static final double SAFETY = 0.9;
+  private static final double GROWS_MOST = 6.0;
+  private static final double SHRINKS_MOST = 0.333;
   private static final double LEAST_STEP = 1e-13;
+  private static final double ORDER = 8.0;
 
-  private SystemFlow() {}
+  private final Rates rates;
+  private final double[] tolerances;
+  private final int n;
+  private final double[][] k;
+  private final double[] y;
+  private final double[] next;
+  private final double[] work;
+  private double time;
+
+  private SystemFlow(Rates rates, double[] tolerances, double fromTime, double[] fromState) {
+    this.rates = rates;
+    this.tolerances = tolerances;
+    this.n = tolerances.length;
+    this.k = new double[DormandPrinceTableau.ALL][n];
+    this.y = fromState.clone();
+    this.next = new double[n];
+    this.work = new double[n];
+    this.time = fromTime;
+  }
 
   /** The right-hand side. */
   public interface Rates {
@@ -59,7 +75,8 @@ public final class SystemFlow {
    * @param fromState y there
    * @param toTime latest end, after the start
    * @param steps takes every step
-   * @param stops the first to change its sign ends the integration
+   * @param stops the first to change its sign ends the integration; one that begins at zero counts
+   *     from the sign it takes
    */
   public static End run(
       Rates rates,
@@ -69,92 +86,172 @@ public final class SystemFlow {
       double toTime,
       Steps steps,
       Stop... stops) {
-    double span = toTime - fromTime;
-    double[] none = new double[tolerances.length];
-    DormandPrince853Integrator integrator =
-        new DormandPrince853Integrator(Math.min(LEAST_STEP, span / 2.0), span, tolerances, none);
-    integrator.addStepHandler(new Handler(steps));
-    int[] crossed = {-1};
+    return new SystemFlow(rates, tolerances, fromTime, fromState).run(toTime, steps, stops);
+  }
+
+  private End run(double toTime, Steps steps, Stop[] stops) {
+    rates.at(y, k[0]);
+    double[] before = new double[stops.length];
     for (int i = 0; i < stops.length; i++) {
-      integrator.addEventHandler(
-          new Crossing(stops[i], i, crossed), span, Math.max(1e-12, 1e-12 * span), 200);
+      before[i] = stops[i].at(y);
     }
-    double[] y = fromState.clone();
-    double time =
-        integrator.integrate(
-            new FirstOrderDifferentialEquations() {
-              @Override
-              public int getDimension() {
-                return tolerances.length;
-              }
-
-              @Override
-              public void computeDerivatives(double t, double[] state, double[] rate) {
-                rates.at(state, rate);
-              }
-            },
-            fromTime,
-            y,
-            toTime,
-            y);
-    return new End(time, y, crossed[0]);
+    double step = Math.min(firstStep(), toTime - time);
+    boolean rejected = false;
+    while (time < toTime) {
+      boolean last = time + 1.01 * step >= toTime;
+      double h = last ? toTime - time : step;
+      double error = attempt(h);
+      double change = Math.pow(error, 1.0 / ORDER) / SAFETY;
+      if (error > 1.0 && h > LEAST_STEP) {
+        step = h / Math.min(1.0 / SHRINKS_MOST, change);
+        rejected = true;
+        continue;
+      }
+      double from = time;
+      double to = last ? toTime : time + h;
+      DenseStep dense = dense(from, h);
+      Crossing crossing = firstCrossing(stops, before, dense, from, to);
+      if (crossing != null) {
+        steps.step(from, crossing.time(), dense);
+        return new End(crossing.time(), dense.at(crossing.time()), crossing.index());
+      }
+      steps.step(from, to, dense);
+      time = to;
+      System.arraycopy(next, 0, y, 0, n);
+      System.arraycopy(k[DormandPrinceTableau.STAGES], 0, k[0], 0, n);
+      double growth = 1.0 / Math.max(1.0 / GROWS_MOST, Math.min(1.0 / SHRINKS_MOST, change));
+      step = h * (rejected ? Math.min(1.0, growth) : growth);
+      rejected = false;
+    }
+    return new End(time, y.clone(), -1);
   }
 
-  private static final class Crossing implements EventHandler {
-    private final Stop function;
-    private final int index;
-    private final int[] crossed;
-
-    Crossing(Stop function, int index, int[] crossed) {
-      this.function = function;
-      this.index = index;
-      this.crossed = crossed;
+  /** Hairer, Nørsett, Wanner, section II.4: by the sizes of y, of f and of its change. */
+  private double firstStep() {
+    double d0 = norm(y);
+    double d1 = norm(k[0]);
+    double h0 = d0 < 1e-5 || d1 < 1e-5 ? 1e-6 : 0.01 * d0 / d1;
+    for (int i = 0; i < n; i++) {
+      work[i] = y[i] + h0 * k[0][i];
     }
-
-    @Override
-    public void init(double t0, double[] y0, double t) {
-      // nothing to prepare: the function has no memory
+    rates.at(work, k[1]);
+    for (int i = 0; i < n; i++) {
+      work[i] = (k[1][i] - k[0][i]) / h0;
     }
+    double most = Math.max(d1, norm(work));
+    double h1 = most <= 1e-15 ? Math.max(1e-6, h0 * 1e-3) : Math.pow(0.01 / most, 1.0 / ORDER);
+    return Math.max(LEAST_STEP, Math.min(100.0 * h0, h1));
+  }
 
-    @Override
-    public double g(double t, double[] y) {
-      return function.at(y);
+  private double norm(double[] vector) {
+    double sum = 0.0;
+    for (int i = 0; i < n; i++) {
+      double scaled = vector[i] / tolerances[i];
+      sum += scaled * scaled;
     }
+    return Math.sqrt(sum / n);
+  }
 
-    @Override
-    public Action eventOccurred(double t, double[] y, boolean increasing) {
-      crossed[0] = index;
-      return Action.STOP;
+  /** Takes a step into {@code next}; its error over the tolerance. */
+  private double attempt(double h) {
+    for (int stage = 1; stage < DormandPrinceTableau.STAGES; stage++) {
+      take(DormandPrinceTableau.A[stage], h, work);
+      rates.at(work, k[stage]);
     }
+    take(DormandPrinceTableau.A[DormandPrinceTableau.STAGES], h, next);
+    rates.at(next, k[DormandPrinceTableau.STAGES]);
+    double fifth = 0.0;
+    double third = 0.0;
+    for (int i = 0; i < n; i++) {
+      double e5 = DormandPrinceTableau.E5.of(k, i) / tolerances[i];
+      double e3 = DormandPrinceTableau.E3.of(k, i) / tolerances[i];
+      fifth += e5 * e5;
+      third += e3 * e3;
+    }
+    double both = fifth + 0.01 * third;
+    return both <= 0.0 ? 0.0 : h * fifth / Math.sqrt(both * n);
+  }
 
-    @Override
-    public void resetState(double t, double[] y) {
-      // the state goes on unchanged
+  private void take(DormandPrinceTableau.Row row, double h, double[] into) {
+    for (int i = 0; i < n; i++) {
+      into[i] = y[i] + h * row.of(k, i);
     }
   }
 
-  private static final class Handler implements StepHandler {
-    private final Steps steps;
-
-    Handler(Steps steps) {
-      this.steps = steps;
+  private DenseStep dense(double from, double h) {
+    for (int stage = DormandPrinceTableau.STAGES + 1; stage < DormandPrinceTableau.ALL; stage++) {
+      take(DormandPrinceTableau.A[stage], h, work);
+      rates.at(work, k[stage]);
     }
+    double[][] terms = new double[7][n];
+    for (int i = 0; i < n; i++) {
+      double change = next[i] - y[i];
+      double first = h * k[0][i];
+      terms[0][i] = change;
+      terms[1][i] = first - change;
+      terms[2][i] = 2.0 * change - h * (k[DormandPrinceTableau.STAGES][i] + k[0][i]);
+      for (int j = 0; j < DormandPrinceTableau.D.length; j++) {
+        terms[3 + j][i] = h * DormandPrinceTableau.D[j].of(k, i);
+      }
+    }
+    return new DenseStep(from, h, y.clone(), terms);
+  }
 
+  private record DenseStep(double from, double length, double[] state, double[][] terms)
+      implements Dense {
     @Override
-    public void init(double t0, double[] y0, double t) {
-      // the first state is the caller's
+    public double[] at(double time) {
+      double x = (time - from) / length;
+      double[] result = new double[state.length];
+      for (int i = 0; i < result.length; i++) {
+        double sum = 0.0;
+        for (int j = terms.length - 1; j >= 0; j--) {
+          sum = (sum + terms[j][i]) * (j % 2 == 0 ? x : 1.0 - x);
+        }
+        result[i] = state[i] + sum;
+      }
+      return result;
     }
+  }
 
-    @Override
-    public void handleStep(StepInterpolator interpolator, boolean isLast) {
-      steps.step(
-          interpolator.getPreviousTime(),
-          interpolator.getCurrentTime(),
-          time -> {
-            interpolator.setInterpolatedTime(time);
-            double[] state = interpolator.getInterpolatedState();
-            return Arrays.copyOf(state, state.length);
-          });
+  private record Crossing(int index, double time) {}
+
+  /**
+   * The first function to change its sign in a step; the values at its end replace those before.
+   */
+  private Crossing firstCrossing(
+      Stop[] stops, double[] before, Dense dense, double from, double to) {
+    Crossing first = null;
+    for (int i = 0; i < stops.length; i++) {
+      double after = stops[i].at(next);
+      if (before[i] != 0.0 && after != 0.0 && Math.signum(before[i]) != Math.signum(after)
+          || before[i] != 0.0 && after == 0.0) {
+        double at = crossing(stops[i], dense, from, to, before[i]);
+        if (first == null || at < first.time()) {
+          first = new Crossing(i, at);
+        }
+      }
+      before[i] = after;
     }
+    return first;
+  }
+
+  /** Halves until the doubles run out; the later side, where the function has crossed. */
+  private static double crossing(Stop stop, Dense dense, double from, double to, double before) {
+    double sign = Math.signum(before);
+    double a = from;
+    double b = to;
+    for (int i = 0; i < 100; i++) {
+      double middle = 0.5 * (a + b);
+      if (middle <= a || middle >= b) {
+        break;
+      }
+      if (Math.signum(stop.at(dense.at(middle))) == sign) {
+        a = middle;
+      } else {
+        b = middle;
+      }
+    }
+    return b;
   }
 }

@@ -1,43 +1,72 @@
 package sliprung.runup;
 
-/** The greatest value of a sampled quantity, by the parabola through the highest three samples. */
+import java.util.function.DoubleUnaryOperator;
+
+/** The greatest value of a quantity over time: by samples first, then between them. */
 final class PeakTracker {
-  private double time0 = Double.NaN;
-  private double value0;
-  private double time1 = Double.NaN;
-  private double value1;
+  private static final double GOLDEN = 0.5 * (Math.sqrt(5.0) - 1.0);
+  private static final int HALVINGS = 40;
+
   private double time = Double.NaN;
   private double value = Double.NEGATIVE_INFINITY;
+  private boolean risen;
 
   /** The next sample. */
   void add(double at, double amount) {
     if (amount > value) {
       time = at;
       value = amount;
+      risen = true;
     }
-    if (value1 > value0 && value1 >= amount && !Double.isNaN(time0)) {
-      parabola(at, amount);
-    }
-    time0 = time1;
-    value0 = value1;
-    time1 = at;
-    value1 = amount;
   }
 
-  private void parabola(double at, double amount) {
-    double left = (value1 - value0) / (time1 - time0);
-    double right = (amount - value1) / (at - time1);
-    double bend = (right - left) / (at - time0);
-    if (!(bend < 0.0)) {
+  /**
+   * Seeks the top around the sample that was greatest, if it lies in the span or just before it:
+   * golden section.
+   *
+   * @param from beginning of the span in which the quantity is known
+   * @param to its end
+   * @param spacing of the samples, s
+   * @param quantity at a time of the span
+   */
+  void refine(double from, double to, double spacing, DoubleUnaryOperator quantity) {
+    // a top just behind the last sample of one span is found from the next
+    if (!risen && !(time >= from - spacing)) {
       return;
     }
-    // slope of the parabola at the middle sample
-    double slope = left + bend * (time1 - time0);
-    double offset = -slope / (2.0 * bend);
-    double top = value1 - slope * slope / (4.0 * bend);
-    if (top > value) {
-      time = time1 + offset;
-      value = top;
+    risen = false;
+    double a = Math.max(from, time - spacing);
+    double b = Math.min(to, time + spacing);
+    if (b <= a) {
+      return;
+    }
+    double c = b - GOLDEN * (b - a);
+    double d = a + GOLDEN * (b - a);
+    double atC = quantity.applyAsDouble(c);
+    double atD = quantity.applyAsDouble(d);
+    for (int i = 0; i < HALVINGS; i++) {
+      if (atC > atD) {
+        b = d;
+        d = c;
+        atD = atC;
+        c = b - GOLDEN * (b - a);
+        atC = quantity.applyAsDouble(c);
+      } else {
+        a = c;
+        c = d;
+        atC = atD;
+        d = a + GOLDEN * (b - a);
+        atD = quantity.applyAsDouble(d);
+      }
+    }
+    keep(c, atC);
+    keep(d, atD);
+  }
+
+  private void keep(double at, double amount) {
+    if (amount > value) {
+      time = at;
+      value = amount;
     }
   }
 

@@ -5,8 +5,8 @@ import sliprung.machine.OperatingPoint;
 
 /** Gathers the samples of one stage into a trace. */
 final class TraceBuilder {
-  private double[] seconds = new double[64];
-  private double[][] rows = new double[7][64];
+  private double[] seconds = new double[256];
+  private double[][] rows = new double[7][256];
   private int count;
 
   boolean isEmpty() {

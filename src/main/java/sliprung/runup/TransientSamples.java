@@ -10,7 +10,7 @@ import sliprung.numeric.SystemFlow;
  */
 final class TransientSamples implements SystemFlow.Steps {
   /** Greatest share by which halving a piece may change the integral of a squared current. */
-  private static final double CHANGE = 1e-5;
+  private static final double CHANGE = 1e-4;
 
   private static final int MOST_PIECES = 64;
   private static final double RMS = Math.sqrt(2.0);
@@ -33,28 +33,27 @@ final class TransientSamples implements SystemFlow.Steps {
     this.cycles = cycles;
   }
 
-  /** One instant. */
-  private record Sample(double time, double[] state, double[] currents, double[] squares) {}
+  /**
+   * One instant: the state and the components of both currents, peak A.
+   *
+   * @param statorSquare squared magnitude, A²
+   * @param ringSquare likewise
+   */
+  private record Sample(
+      double time, double[] state, double[] currents, double statorSquare, double ringSquare) {}
 
   private Sample sample(double time, double[] state) {
     if (state[FluxModel.SPEED] < 0.0 && !circumstance.active()) {
       // what the error of a step leaves of a rotor that a passive load holds at rest
       state[FluxModel.SPEED] = 0.0;
     }
-    double[] currents = {
+    double[] c = {
       model.statorReal(state),
       model.statorImaginary(state),
       model.ringReal(state),
       model.ringImaginary(state)
     };
-    return new Sample(
-        time,
-        state,
-        currents,
-        new double[] {
-          currents[0] * currents[0] + currents[1] * currents[1],
-          currents[2] * currents[2] + currents[3] * currents[3]
-        });
+    return new Sample(time, state, c, c[0] * c[0] + c[1] * c[1], c[2] * c[2] + c[3] * c[3]);
   }
 
   /** Motion begins at a state. */
@@ -70,50 +69,62 @@ final class TransientSamples implements SystemFlow.Steps {
     if (to <= from) {
       return;
     }
-    Sample first = last;
     double half = 0.5 * (to - from);
-    Sample[] four = {
-      sample(from + 0.5 * half, solution.at(from + 0.5 * half)),
-      sample(from + half, solution.at(from + half)),
-      sample(from + 1.5 * half, solution.at(from + 1.5 * half)),
-      sample(to, solution.at(to))
-    };
-    int pieces = pieces(first, four);
-    if (pieces == 1) {
-      piece(first, four[1], four[3]);
-      return;
-    }
-    Sample before = first;
-    Sample middle = null;
+    double[] early = solution.at(from + 0.5 * half);
+    Sample middle = sample(from + half, solution.at(from + half));
+    double[] late = solution.at(from + 1.5 * half);
+    Sample end = sample(to, solution.at(to));
+    int pieces = pieces(last, early, middle, late, end);
+    Sample between = null;
     for (int i = 1; i <= 2 * pieces; i++) {
-      double at = i == 2 * pieces ? to : from + half * i / pieces;
-      Sample here = 2 * i % pieces == 0 ? four[2 * i / pieces - 1] : sample(at, solution.at(at));
+      double at = from + half * i / pieces;
+      Sample here = i == 2 * pieces ? end : i == pieces ? middle : sample(at, solution.at(at));
       if (i % 2 == 1) {
-        middle = here;
+        between = here;
       } else {
-        piece(before, middle, here);
-        before = here;
+        piece(last, between, here);
       }
     }
+    double spacing = half / pieces;
+    stator.refine(from, to, spacing, t -> model.statorAmps(solution.at(t)) * RMS);
+    ring.refine(from, to, spacing, t -> model.ringAmps(solution.at(t)) * RMS);
+    torque.refine(from, to, spacing, t -> model.torque(solution.at(t)));
+    backTorque.refine(from, to, spacing, t -> -model.torque(solution.at(t)));
   }
 
   /** As many as Simpson's rule needs, whose error goes with the fourth power of the length. */
-  private static int pieces(Sample first, Sample[] four) {
-    double change = 0.0;
-    for (int k = 0; k < 2; k++) {
-      double a = first.squares[k];
-      double c = four[1].squares[k];
-      double e = four[3].squares[k];
-      double coarse = (a + 4.0 * c + e) / 6.0;
-      double fine = (a + 4.0 * four[0].squares[k] + 2.0 * c + 4.0 * four[2].squares[k] + e) / 12.0;
-      change = Math.max(change, Math.abs(coarse - fine) / Math.max(fine, Double.MIN_NORMAL));
-    }
+  private int pieces(Sample first, double[] early, Sample middle, double[] late, Sample end) {
+    double change =
+        Math.max(
+            change(
+                first.statorSquare,
+                square(model.statorReal(early), model.statorImaginary(early)),
+                middle.statorSquare,
+                square(model.statorReal(late), model.statorImaginary(late)),
+                end.statorSquare),
+            change(
+                first.ringSquare,
+                square(model.ringReal(early), model.ringImaginary(early)),
+                middle.ringSquare,
+                square(model.ringReal(late), model.ringImaginary(late)),
+                end.ringSquare));
     int pieces = 1;
     while (change > CHANGE && pieces < MOST_PIECES) {
       pieces *= 2;
       change /= 16.0;
     }
     return pieces;
+  }
+
+  private static double square(double real, double imaginary) {
+    return real * real + imaginary * imaginary;
+  }
+
+  /** By how much the integral changes when the piece is halved, over itself. */
+  private static double change(double a, double b, double c, double d, double e) {
+    double coarse = (a + 4.0 * c + e) / 6.0;
+    double fine = (a + 4.0 * b + 2.0 * c + 4.0 * d + e) / 12.0;
+    return Math.abs(coarse - fine) / Math.max(fine, Double.MIN_NORMAL);
   }
 
   private void piece(Sample first, Sample middle, Sample end) {
@@ -140,8 +151,8 @@ final class TransientSamples implements SystemFlow.Steps {
   private void append(Sample sample) {
     double[] state = sample.state;
     double speed = state[FluxModel.SPEED];
-    double statorPeak = Math.sqrt(sample.squares[0]);
-    double ringPeak = Math.sqrt(sample.squares[1]);
+    double statorPeak = Math.sqrt(sample.statorSquare);
+    double ringPeak = Math.sqrt(sample.ringSquare);
     double newtonMetres = model.torque(state);
     FluxModel.Terminals terminals = model.terminals(state);
     trace.append(

@@ -344,6 +344,15 @@ class AlternativesTest {
   }
 
   @Test
+  void the_method_of_the_run_up_is_read_and_left_to_the_review_where_absent() {
+    assertThat(starter(winchWith("method: steady\n", "method: transient\n")).method())
+        .isEqualTo(Starter.Method.TRANSIENT);
+    Starter silent = starter(winchWith("method: steady\n", ""));
+    assertThat(silent.method()).isEqualTo(Starter.Method.AUTO);
+    assertThat(silent.assumptions()).noneMatch(a -> a.path().equals("method"));
+  }
+
+  @Test
   void what_is_left_out_is_assumed_and_on_record() {
     Starter starter =
         starter(
