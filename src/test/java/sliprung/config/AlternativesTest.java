@@ -345,9 +345,9 @@ class AlternativesTest {
 
   @Test
   void the_method_of_the_run_up_is_read_and_left_to_the_review_where_absent() {
-    assertThat(starter(winchWith("method: steady\n", "method: transient\n")).method())
+    assertThat(starter(winchWith("practice: iec\n", "practice: iec\nmethod: transient\n")).method())
         .isEqualTo(Starter.Method.TRANSIENT);
-    Starter silent = starter(winchWith("method: steady\n", ""));
+    Starter silent = starter(winchWith("practice: iec\n", "practice: iec\n"));
     assertThat(silent.method()).isEqualTo(Starter.Method.AUTO);
     assertThat(silent.assumptions()).noneMatch(a -> a.path().equals("method"));
   }

@@ -59,7 +59,9 @@ class ModelErrorRecordTest {
   @Test
   void every_nominal_fault_has_its_peaks() throws IOException {
     for (JsonNode start : record("steady").get("starts")) {
-      if (start.get("corner").get("id").asText().equals("nominal")) {
+      // a jam while running closes nothing and has no closing peak
+      if (start.get("corner").get("id").asText().equals("nominal")
+          && !start.get("id").asText().startsWith("running-locked")) {
         for (JsonNode stage : start.get("stages")) {
           assertThat(stage.get("stator_peak_a").isNumber()).as(start.get("id").asText()).isTrue();
         }

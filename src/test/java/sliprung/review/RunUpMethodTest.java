@@ -70,7 +70,7 @@ class RunUpMethodTest {
             .says()
             .replace('\u00a0', ' ');
     assertThat(says)
-        .contains("a run-up of 9.89 s against 10.0 s")
+        .contains("a run-up of 9.89 s against 10 s")
         .contains("(−1.10 %), stator I²t −16.00 %, ring I²t +0.40 %")
         .contains("The transient feeds devices and parts, since up to 16 % lie between them");
     assertThat(choose(Method.AUTO, new ModelError(NEVER, NEVER), error(0, 0, 0)).says())
