@@ -54,6 +54,9 @@ final class RulesCommand implements Callable<Integer> {
       String mark = RuleBook.MUST_JUDGE.contains(rule.getKey()) ? "*" : " ";
       row(mark + " " + rule.getKey(), rule.getValue().question());
     }
+    if (Catalogue.notBuilt().isEmpty()) {
+      return;
+    }
     out.println();
     out.println("Rules of the book that are not built yet:");
     Catalogue.notBuilt().forEach((rule, question) -> row("  " + rule, question));

@@ -94,13 +94,15 @@ final class Summary {
                         + ": "
                         + Printable.of(n.because()),
                     INDENT + " ".repeat(VERDICT)));
-    wrapped(
-        INDENT,
-        "not built    "
-            + review.notBuilt().size()
-            + " rules of the book: "
-            + String.join(", ", review.notBuilt()),
-        INDENT + " ".repeat(VERDICT));
+    if (!review.notBuilt().isEmpty()) {
+      wrapped(
+          INDENT,
+          "not built    "
+              + review.notBuilt().size()
+              + " rules of the book: "
+              + String.join(", ", review.notBuilt()),
+          INDENT + " ".repeat(VERDICT));
+    }
     if (!review.starter().notYetJudged().isEmpty()) {
       wrapped(
           INDENT,
