@@ -16,7 +16,7 @@ import sliprung.rulebook.Verdict;
 final class Summary {
   private static final String INDENT = "   ";
   private static final int VERDICT = 12;
-  private static final int SUBJECT = 19;
+  private static final int SUBJECT = 18;
   private static final int MARGIN = 15;
   private static final int CLEAR_SHOWN = 3;
 
@@ -121,7 +121,7 @@ final class Summary {
     String margin = FindingText.marginOfWanted(finding);
     String head =
         String.format(
-            "%-" + SUBJECT + "s%-" + MARGIN + "s%s",
+            "%-" + SUBJECT + "s %-" + MARGIN + "s %s",
             Printable.of(finding.subject()),
             margin.isEmpty() ? "–" : margin,
             finding.rule());

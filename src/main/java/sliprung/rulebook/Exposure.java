@@ -166,12 +166,16 @@ public record Exposure(
   public String clause() {
     String limit =
         first
-            .map(p -> limit(p.part()) + " after " + Show.seconds(p.limitAtSeconds()))
+            .map(
+                p ->
+                    p.limitAtSeconds() > 0.0
+                        ? limit(p.part()) + " after " + Show.seconds(p.limitAtSeconds())
+                        : lower(name(p.part())) + " was past its limit before the fault")
             .orElse("no part reaches its limit within 30\u00a0min");
     String clears =
         clearing
             .map(d -> d.device() + " clears after " + Show.seconds(d.clearsAtSeconds()))
-            .orElse("nothing clears it");
+            .orElse(unproven.isPresent() ? "nothing is proven to clear it" : "nothing clears it");
     return limit + "; " + clears;
   }
 

@@ -37,12 +37,16 @@ public final class Exposures {
     // what is known may already be past its limit: what is not known makes that no better
     if (!worst.missing().isEmpty() && worst.clearingRatio() >= 1.0) {
       return builder.notJudged(
-          worst.missing(), where(worst.start()) + ": what it heats has no known limit.");
+          worst.missing(),
+          where(worst.start()) + ": not every part that it heats has a known limit.");
     }
     builder.figures(worst.clearedAtSeconds(), worst.limitAtSeconds(), "s");
     double ratio = worst.clearingRatio();
     String sentence = where(worst.start()) + ": " + worst.clause() + ".";
-    if (ratio < wanted && worst.unproven().isPresent()) {
+    // what comes too late, whatever it is proven to break, saves nothing
+    boolean mightSave =
+        worst.unproven().filter(d -> worst.limitAtSeconds() >= d.clearsAtSeconds()).isPresent();
+    if (ratio < wanted && mightSave) {
       String tag =
           facts
               .starter()
@@ -72,7 +76,7 @@ public final class Exposures {
   }
 
   private static String exposed(Exposure worst) {
-    return worst.exposureSeconds() > 0.0
+    return worst.exposureSeconds() > 0.0 && worst.clearing().isPresent()
         ? "; " + Show.seconds(worst.exposureSeconds()) + " past the limit"
         : "";
   }

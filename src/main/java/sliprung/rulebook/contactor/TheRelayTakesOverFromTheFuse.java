@@ -77,12 +77,11 @@ public final class TheRelayTakesOverFromTheFuse implements Rule {
     Ratings ratings = Ratings.of(facts, contactor);
     Optional<String> unknown = unknown(law, relay, fuse);
     if (ratings.gap().isPresent() || unknown.isPresent()) {
-      if (declared.isPresent()) {
+      if (declared.isPresent() && ratings.gap().isEmpty()) {
         return builder
             .says(
-                "No crossing is computed. "
-                    + declaration(contactor, declared.get())
-                    + " This rests on the declaration alone.")
+                declaration(contactor, declared.get())
+                    + " This rests on the declaration alone: no crossing is computed.")
             .build(Verdict.CLEAR);
       }
       return ratings.gap().isPresent()
