@@ -152,13 +152,19 @@ public final class TheClassFitsStartAndStall implements Rule {
         + least.name()
         + ": at rest with the rings shorted, "
         + Show.amps(amps)
-        + ", it takes up to "
-        + Show.seconds(seconds(facts, relay, least, amps))
+        + ", it "
+        + trips(seconds(facts, relay, least, amps))
         + ", class "
         + relay.tripClass().name()
-        + " up to "
-        + Show.seconds(seconds(facts, relay, relay.tripClass(), amps))
+        + " "
+        + trips(seconds(facts, relay, relay.tripClass(), amps))
         + ".";
+  }
+
+  private static String trips(double seconds) {
+    return Double.isInfinite(seconds)
+        ? "need never trip"
+        : "takes up to " + Show.seconds(seconds) + " to trip";
   }
 
   private static String stall(Facts facts, Device.Overload relay) {
@@ -169,8 +175,8 @@ public final class TheClassFitsStartAndStall implements Rule {
     String alone =
         " At rest with the rings shorted "
             + relay.tag()
-            + " trips within "
-            + Show.seconds(seconds(facts, relay, relay.tripClass(), amps))
+            + " "
+            + trips(seconds(facts, relay, relay.tripClass(), amps))
             + " at "
             + Show.amps(amps)
             + "; the motor stands "
