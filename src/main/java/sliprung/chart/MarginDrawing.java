@@ -5,6 +5,8 @@ import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
+import java.util.List;
 import org.jfree.chart.axis.NumberAxis;
 
 /** Draws a {@link MarginOverview}: a bar from the wanted margin to the one there is. */
@@ -20,15 +22,29 @@ public final class MarginDrawing {
   private static final double GREATEST = 10.0;
   private static final double DOT = 4.5;
   private static final int SUBJECT_LETTERS = 24;
+  private static final int MOST_ROWS = 40;
 
   private MarginDrawing() {}
 
-  /** The picture. */
-  public static Picture picture(MarginOverview chart) {
+  /** The pictures, each no taller than a sheet of paper holds: usually one to three. */
+  public static List<Picture> pictures(MarginOverview chart) {
+    List<Picture> pictures = new ArrayList<>();
+    for (MarginOverview part : chart.parts(MOST_ROWS)) {
+      // margins, margins-b, margins-c …
+      String name =
+          pictures.isEmpty()
+              ? "margins"
+              : "margins-" + (char) ('a' + Math.min(25, pictures.size()));
+      pictures.add(picture(part, name));
+    }
+    return pictures;
+  }
+
+  private static Picture picture(MarginOverview chart, String name) {
     int rows = chart.groups().stream().mapToInt(g -> g.rows().size()).sum();
     int height = TOP + BOTTOM + Math.max(ROW, rows * ROW + chart.groups().size() * HEAD);
     return new Picture(
-        "margins",
+        name,
         "Margin overview: every margin over the one that is wanted, under the four questions",
         chart.says(),
         WIDTH,

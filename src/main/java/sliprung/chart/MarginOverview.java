@@ -80,6 +80,38 @@ public record MarginOverview(List<Group> groups, int without, String says) {
     return new MarginOverview(groups, without, says(all, without));
   }
 
+  /**
+   * The same in parts of at most so many rows, each short enough for a sheet of paper; the sentence
+   * stands on the first.
+   */
+  public List<MarginOverview> parts(int mostRows) {
+    List<MarginOverview> parts = new ArrayList<>();
+    List<Group> here = new ArrayList<>();
+    int room = mostRows;
+    for (Group group : groups) {
+      int from = 0;
+      while (from < group.rows().size()) {
+        int to = Math.min(group.rows().size(), from + room);
+        here.add(new Group(group.question(), group.rows().subList(from, to)));
+        room -= to - from;
+        from = to;
+        if (room == 0) {
+          parts.add(part(here, parts.size()));
+          here.clear();
+          room = mostRows;
+        }
+      }
+    }
+    if (!here.isEmpty() || parts.isEmpty()) {
+      parts.add(part(here, parts.size()));
+    }
+    return parts;
+  }
+
+  private MarginOverview part(List<Group> some, int before) {
+    return new MarginOverview(some, without, before == 0 ? says : "Margins, continued.");
+  }
+
   private static Row row(Finding finding) {
     return new Row(
         finding.subject(),

@@ -27,7 +27,7 @@ final class ReviewLayout {
       }
     }
     page.section("margins", "Margins");
-    figure(page, pictures.margins());
+    pictures.margins().forEach(p -> figure(page, p));
     page.end();
     AcceptedPart.write(page, review);
     TripMatrixPart.write(page, contents.trips());

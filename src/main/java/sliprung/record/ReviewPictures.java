@@ -34,7 +34,7 @@ import sliprung.review.Review;
  */
 record ReviewPictures(
     Picture firstLimit,
-    Picture margins,
+    List<Picture> margins,
     Optional<Picture> start,
     Optional<Picture> torque,
     Optional<Picture> use,
@@ -44,7 +44,7 @@ record ReviewPictures(
   static ReviewPictures of(Review review, FirstLimitChart firstLimit, List<Band> bands) {
     return new ReviewPictures(
         FirstLimitDrawing.picture(firstLimit),
-        MarginDrawing.picture(MarginOverview.of(review)),
+        MarginDrawing.pictures(MarginOverview.of(review)),
         StartOverTime.of(review).map(StartDrawing::picture),
         TorqueSpeed.of(review).map(TorqueSpeedDrawing::picture),
         UseOverTime.of(review).map(UseDrawing::picture),
@@ -56,7 +56,7 @@ record ReviewPictures(
   List<Picture> all() {
     List<Picture> all = new ArrayList<>();
     all.add(firstLimit);
-    all.add(margins);
+    all.addAll(margins);
     start.ifPresent(all::add);
     torque.ifPresent(all::add);
     all.add(timeCurrent);

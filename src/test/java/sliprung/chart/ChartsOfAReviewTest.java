@@ -204,6 +204,22 @@ class ChartsOfAReviewTest {
   }
 
   @Test
+  void should_part_many_margins_into_pictures_without_losing_one() {
+    MarginOverview chart = MarginOverview.of(CrusherReview.plain());
+    List<MarginOverview> parts = chart.parts(1);
+    assertThat(parts).hasSize(4);
+    assertThat(parts.stream().flatMap(p -> p.groups().stream()).flatMap(g -> g.rows().stream()))
+        .containsExactlyElementsOf(
+            chart.groups().stream().flatMap(g -> g.rows().stream()).toList());
+    assertThat(parts.get(0).says()).isEqualTo(chart.says());
+    assertThat(parts.get(1).says()).isEqualTo("Margins, continued.");
+    assertThat(chart.parts(100)).containsExactly(chart);
+    assertThat(MarginDrawing.pictures(MarginOverview.of(REVIEW)))
+        .extracting(Picture::height)
+        .allSatisfy(h -> assertThat(h).isLessThan(1100));
+  }
+
+  @Test
   void should_start_a_device_line_where_the_device_picks_up() {
     FirstLimitChart chart = FirstLimitChart.of(REVIEW);
     FaultRow shorted = chart.row("rings-shorted").orElseThrow();

@@ -27,7 +27,7 @@ class SvgTest {
         FirstLimitDrawing.picture(FirstLimitChart.of(REVIEW)),
         StartDrawing.picture(StartOverTime.of(REVIEW).orElseThrow()),
         TimeCurrentDrawing.picture(TimeCurrentSheet.of(REVIEW, List.of(BAND))),
-        MarginDrawing.picture(MarginOverview.of(REVIEW)),
+        MarginDrawing.pictures(MarginOverview.of(REVIEW)).get(0),
         TorqueSpeedDrawing.picture(TorqueSpeed.of(REVIEW).orElseThrow()),
         UseDrawing.picture(UseOverTime.of(REVIEW).orElseThrow()),
         SectionDrawing.picture(SectionLevels.of(REVIEW).orElseThrow()));
