@@ -42,6 +42,9 @@ public record TimeCurrentSheet(
   private static final double WIDEST = 60.0;
   private static final double LEAST_SHARE = 0.2;
 
+  /** How far below the rated current the sheet goes down at most. */
+  private static final double LEAST_OF_RATED = 20.0;
+
   /** A take-over must lie well inside the sheet, which ends at four times the greatest. */
   private static final double TAKE_OVER_ROOM = 3.0;
 
@@ -235,10 +238,11 @@ public record TimeCurrentSheet(
     return DoubleStream.concat(curves, limits).max().orElse(ratedAmps * 6.0);
   }
 
-  /** Least ampere of what is computed. */
+  /** Least ampere of what is computed; never far below the rated: a current rises from zero. */
   public double leastAmps() {
     DoubleStream curves = starts.stream().flatMapToDouble(c -> DoubleStream.of(c.amps()));
     DoubleStream lines = held.stream().mapToDouble(HeldCurrent::amps);
-    return Math.min(ratedAmps, DoubleStream.concat(curves, lines).min().orElse(ratedAmps));
+    double least = DoubleStream.concat(curves, lines).min().orElse(ratedAmps);
+    return Math.min(ratedAmps, Math.max(least, ratedAmps / LEAST_OF_RATED));
   }
 }

@@ -50,7 +50,7 @@ final class StartJson {
       json.writeStringField("part", part.part());
       fields.number("use", part.use());
       fields.number("limit_at_s", part.limitAtSeconds());
-      json.writeNullField("energy_kj");
+      fields.number("energy_kj", part.energyJoules().orElse(Double.NaN) / 1e3);
       json.writeEndObject();
     }
     json.writeEndArray();
