@@ -297,15 +297,6 @@ class MainTest {
   }
 
   @Test
-  void rules_says_of_a_rule_that_is_not_built_that_it_is_not() {
-    for (String name : Catalogue.notBuilt().keySet()) {
-      Ran ran = run("rules", name);
-      assertThat(ran.status()).isZero();
-      assertThat(ran.out()).contains("not built");
-    }
-  }
-
-  @Test
   void curves_lists_laws_classes_and_gates_with_their_source() {
     Ran ran = run("curves");
 
