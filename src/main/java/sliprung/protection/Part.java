@@ -1,9 +1,11 @@
 package sliprung.protection;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
+import sliprung.runup.Stage;
 import sliprung.runup.StartHistory;
 
 /**
@@ -23,6 +25,9 @@ record Part(
     Optional<ToDoubleFunction<StartHistory>> threePhaseOhms) {
 
   private static final double LONGEST = 1e6;
+
+  /** Longer than any time constant's last creep. */
+  private static final double BEYOND_SECONDS = 1e6;
 
   /** A part that cannot be judged. */
   static Part missing(String name, String path) {
@@ -67,7 +72,8 @@ record Part(
       return PartResponse.missing(name, missing.get());
     }
     Waveform waveform = currents.of(channel);
-    Passage passage = Passage.of(meter.apply(preload), waveform, starts);
+    Meter used = meter.apply(preload);
+    Passage passage = Passage.of(used, waveform, starts);
     OptionalDouble energy =
         threePhaseOhms
             .map(
@@ -75,7 +81,26 @@ record Part(
                     OptionalDouble.of(
                         ohms.applyAsDouble(currents.history()) * waveform.jouleIntegral()))
             .orElse(OptionalDouble.empty());
-    return new PartResponse(
-        name, passage.use(), passage.reachedAtSeconds(), energy, Optional.empty());
+    double limitAt = passage.reachedAtSeconds();
+    if (Double.isInfinite(limitAt) && goesOnSteadily(currents.history())) {
+      limitAt = beyond(used, waveform, currents.history().endSeconds());
+    }
+    return new PartResponse(name, passage.use(), limitAt, energy, Optional.empty());
+  }
+
+  /** A fault that has settled goes on as it is until something opens the circuit. */
+  private static boolean goesOnSteadily(StartHistory history) {
+    List<Stage> stages = history.stages();
+    return history.scenario().isFault() && stages.get(stages.size() - 1).settled();
+  }
+
+  /**
+   * When the limit comes after the end of the history, in closed form: what creeps towards a level
+   * above its limit reaches it, however late.
+   */
+  private static double beyond(Meter used, Waveform waveform, double end) {
+    Piece last = waveform.piece(waveform.size() - 1);
+    double amps = last.last();
+    return end + used.advance(new Piece(BEYOND_SECONDS, amps, amps, amps, last.standing()));
   }
 }

@@ -171,12 +171,19 @@ public record Exposure(
                     p.limitAtSeconds() > 0.0
                         ? limit(p.part()) + " after " + Show.seconds(p.limitAtSeconds())
                         : lower(name(p.part())) + " was past its limit before the fault")
-            .orElse("no part reaches its limit within 30\u00a0min");
+            .orElse("no part reaches its limit");
     String clears =
         clearing
             .map(d -> d.device() + " clears after " + Show.seconds(d.clearsAtSeconds()))
-            .orElse(unproven.isPresent() ? "nothing is proven to clear it" : "nothing clears it");
+            .orElse(nothing());
     return limit + "; " + clears;
+  }
+
+  private String nothing() {
+    String clears = unproven.isPresent() ? "nothing is proven to clear it" : "nothing clears it";
+    boolean late =
+        limitAtSeconds() > start.history().endSeconds() && Double.isFinite(limitAtSeconds());
+    return late ? clears + " within 30\u00a0min" : clears;
   }
 
   private static String limit(String part) {

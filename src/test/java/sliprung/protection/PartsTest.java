@@ -49,6 +49,25 @@ class PartsTest {
         .isLessThan(1800);
   }
 
+  /**
+   * Section 1 of fan-500: 79 A for good, 360 A for 20 s, so τ = −20/ln(1 − (79/360)²) = 405 s. At
+   * 79.4 A it heads for 1.0102, and from cold gets to 1 after τ·ln(1.0102/0.0102) = 1 864 s.
+   */
+  @Test
+  void a_limit_after_the_end_of_the_history_is_not_lost() {
+    List<Integer> all = List.of(1, 2, 3, 4);
+    double tau = -20.0 / Math.log(1.0 - Math.pow(79.0 / 360.0, 2));
+    double level = Math.pow(79.4 / 79.0, 2);
+    PartResponse creeping = part("section-1", constant(1800, all, 0, 79.4, TURNING));
+
+    assertThat(creeping.use()).isLessThan(1);
+    assertThat(creeping.limitAtSeconds())
+        .isGreaterThan(1800)
+        .isCloseTo(tau * Math.log(level / (level - 1.0)), within(1e-6));
+    assertThat(part("section-1", constant(1800, all, 0, 79.0 * 0.999, TURNING)).limitAtSeconds())
+        .isInfinite();
+  }
+
   @Test
   void a_section_that_is_out_is_dead_and_cools() {
     StartHistory history =

@@ -92,7 +92,7 @@ public final class NoLevelIsMetAtRest implements Rule {
                 + ".")
         .mend(
             least < facts.wanted(INFO.name())
-                ? "Lower the level, or give the step a least dwell that a standing rotor does not pass."
+                ? "Lower the level, or close by rotor frequency, which a standing rotor never meets."
                 : "")
         .byMargin();
   }
