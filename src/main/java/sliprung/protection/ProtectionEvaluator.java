@@ -144,8 +144,7 @@ public final class ProtectionEvaluator {
         outcome.passage().useAtRunUp(),
         operates,
         clears(device, operates),
-        outcome.currentMargin(),
-        outcome.stretchMargin(),
+        outcome.margins(),
         operates < Double.POSITIVE_INFINITY ? outcome.bound() : Optional.empty(),
         outcome.notJudged());
   }
