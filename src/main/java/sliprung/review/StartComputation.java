@@ -22,6 +22,7 @@ import sliprung.starter.ResistorBank;
 import sliprung.starter.Starter;
 import sliprung.tolerance.Corner;
 import sliprung.tolerance.Corners;
+import sliprung.tolerance.WorstPoints;
 
 /** Computes every start of a starter at every corner, and what devices and parts make of it. */
 final class StartComputation {
@@ -67,8 +68,10 @@ final class StartComputation {
 
   /** Corners share nothing, so both cores work on them; the order stays that of the corners. */
   Computed compute() {
+    Map<Corner, Conditions> points = new LinkedHashMap<>(Corners.of(starter));
+    points.putAll(WorstPoints.of(starter, simulator));
     List<Both> permitted =
-        Corners.of(starter).entrySet().stream().toList().parallelStream()
+        points.entrySet().stream().toList().parallelStream()
             .map(
                 e ->
                     new Both(
@@ -155,13 +158,7 @@ final class StartComputation {
    */
   private DevicePreload warmFromLightLoad(Conditions conditions) {
     double light = Math.min(conditions.loadFactor(), 1.0 + starter.load().spreadLow());
-    Conditions lightly =
-        new Conditions(
-            conditions.source(),
-            light,
-            conditions.bankFactor(),
-            conditions.timerFactor(),
-            conditions.levelFactor());
+    Conditions lightly = conditions.withLoad(light);
     return simulator
         .runningPoint(lightly)
         .map(r -> DevicePreload.running(r.point().statorAmps(), r.point().ringAmps()))

@@ -95,7 +95,7 @@ public final class StartSimulator {
         loadTorque,
         breakaway,
         starter.load().active(),
-        inertia);
+        inertia * conditions.inertiaFactor());
   }
 
   /**
