@@ -29,6 +29,8 @@ public final class FluxModel {
   /** Index of the speed, rad/s, in a state. */
   public static final int SPEED = 4;
 
+  private static final double ROOT_TWO = Math.sqrt(2.0);
+
   private final double ratio;
   private final double volts;
   private final double electricalSpeed;
@@ -111,14 +113,19 @@ public final class FluxModel {
     return ratio * (ls * state[3] - lm * state[1]) / determinant;
   }
 
+  /** Without the care for extremes that costs more than everything around it. */
+  private static double magnitude(double real, double imaginary) {
+    return Math.sqrt(real * real + imaginary * imaginary);
+  }
+
   /** Magnitude of the stator current over √2, A. */
   public double statorAmps(double[] state) {
-    return Math.hypot(statorReal(state), statorImaginary(state)) / Math.sqrt(2.0);
+    return magnitude(statorReal(state), statorImaginary(state)) / ROOT_TWO;
   }
 
   /** Magnitude of the ring current over √2, A. */
   public double ringAmps(double[] state) {
-    return Math.hypot(ringReal(state), ringImaginary(state)) / Math.sqrt(2.0);
+    return magnitude(ringReal(state), ringImaginary(state)) / ROOT_TWO;
   }
 
   /**
@@ -134,7 +141,7 @@ public final class FluxModel {
     double dqdt = (lr * rate[1] - lm * rate[3]) / determinant;
     double ud = volts - sourceInductance * (didt - electricalSpeed * isq);
     double uq = -sourceInductance * (dqdt + electricalSpeed * isd);
-    return new Terminals(Math.sqrt(1.5) * Math.hypot(ud, uq), 1.5 * (ud * isd + uq * isq));
+    return new Terminals(Math.sqrt(1.5) * magnitude(ud, uq), 1.5 * (ud * isd + uq * isq));
   }
 
   /**
