@@ -2,6 +2,7 @@ package sliprung.cli;
 
 import java.io.IOException;
 import java.io.PrintWriter;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.util.ArrayList;
@@ -52,16 +53,16 @@ final class ReviewCommand implements Callable<Integer> {
   private LocalDate date;
 
   @Option(
+      names = "--pdf",
+      description = "Write review.pdf too, for signing and filing; it takes a second or two more.")
+  private boolean withPdf;
+
+  @Option(
       names = "--paper",
       paramLabel = "SIZE",
       converter = PaperName.class,
-      description = "Paper of review.pdf: a4 (default) or letter.")
-  private Paper paper = Paper.A4;
-
-  @Option(
-      names = "--no-pdf",
-      description = "Leave review.pdf out, which takes about as long as all the rest.")
-  private boolean withoutPdf;
+      description = "Paper of review.pdf: a4 (default) or letter. Asks for --pdf by itself.")
+  private Paper paper;
 
   @Option(names = "--all", description = "Print every clear finding.")
   private boolean everything;
@@ -90,6 +91,10 @@ final class ReviewCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
+    if (directory == null && paperAsked().isPresent()) {
+      err.println("sliprung: a PDF is part of a record: give --out DIR");
+      return ExitStatus.WRONG_INPUT;
+    }
     List<StarterReading.Described> read = new ArrayList<>();
     if (!readAll(read)) {
       return ExitStatus.WRONG_INPUT;
@@ -109,9 +114,7 @@ final class ReviewCommand implements Callable<Integer> {
       if (directory != null) {
         Path place = directory.resolve(stem(one.file()));
         try {
-          RecordWriter.write(
-              place,
-              RecordWriter.files(one.dossier(), Optional.of(paper).filter(p -> !withoutPdf)));
+          RecordWriter.write(place, RecordWriter.files(one.dossier(), paperAsked()));
         } catch (IOException e) {
           out.flush();
           err.println(
@@ -119,11 +122,26 @@ final class ReviewCommand implements Callable<Integer> {
                   + Printable.of(place + ": " + e.getMessage()));
           return ExitStatus.WRONG_INPUT;
         }
-        summary.written(place.resolve("review.html").toString());
+        summary.written(place.resolve("review.html").toString(), sheets(place));
       }
       status = ExitStatus.worse(status, one.review().exitStatus());
     }
     return status;
+  }
+
+  /** Paper of the PDF; empty where nobody asked for one. */
+  private Optional<Paper> paperAsked() {
+    return Optional.ofNullable(paper).or(() -> withPdf ? Optional.of(Paper.A4) : Optional.empty());
+  }
+
+  /** What to say of the sheets for paper; an older one must not be taken for this record's. */
+  private String sheets(Path place) {
+    if (paperAsked().isPresent()) {
+      return "and review.pdf beside it";
+    }
+    return Files.exists(place.resolve("review.pdf"))
+        ? "the review.pdf beside it is of an earlier review: --pdf makes it anew"
+        : "--pdf makes it on paper too, to sign and file";
   }
 
   /** Reads every file before anything is computed or written; false after a mistake in any. */
