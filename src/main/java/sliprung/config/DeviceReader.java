@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.function.BiFunction;
 import java.util.stream.Stream;
 import sliprung.curve.CurveLibrary;
+import sliprung.quantity.Dimension;
 import sliprung.starter.Device;
 
 /** Reads one kind of device after the other of {@code protection}. */
@@ -93,13 +94,36 @@ final class DeviceReader {
     kind("standstill", direct, settings::standstill, List.of("kind", "trips"), "time");
   }
 
+  private static final Map<String, List<DialReader.Dial>> DIALS =
+      Map.of(
+          "overload", List.of(new DialReader.Dial("dial", Dimension.CURRENT)),
+          "inverse-time",
+              List.of(
+                  new DialReader.Dial("pick-up", Dimension.CURRENT),
+                  new DialReader.Dial("time-multiplier", Dimension.NUMBER)),
+          "instantaneous", List.of(new DialReader.Dial("pick-up", Dimension.CURRENT)),
+          "sequence-timer", List.of(new DialReader.Dial("time", Dimension.TIME)),
+          "thermal",
+              List.of(
+                  new DialReader.Dial("base", Dimension.CURRENT),
+                  new DialReader.Dial("time-constant", Dimension.TIME)),
+          "definite-time",
+              List.of(
+                  new DialReader.Dial("pick-up", Dimension.CURRENT),
+                  new DialReader.Dial("time", Dimension.TIME)),
+          "standstill", List.of(new DialReader.Dial("time", Dimension.TIME)));
+
   private void kind(
       String name,
       Device.Measurement usual,
       BiFunction<Section, Device.Fitting, Device> read,
       List<String> common,
       String... own) {
-    String[] keys = Stream.concat(common.stream(), Arrays.stream(own)).toArray(String[]::new);
+    Stream<String> dials =
+        DIALS.containsKey(name) ? Arrays.stream(DialReader.KEYS) : Stream.empty();
+    String[] keys =
+        Stream.concat(Stream.concat(common.stream(), Arrays.stream(own)), dials)
+            .toArray(String[]::new);
     kinds.put(name, new Kind(keys, usual, read));
   }
 
@@ -142,8 +166,10 @@ final class DeviceReader {
       return Optional.empty();
     }
     Section section = field.section(kind.keys());
-    return Optional.ofNullable(
-        kind.read().apply(section, fitting(field.key(), section, kind, switchgear)));
+    Device read = kind.read().apply(section, fitting(field.key(), section, kind, switchgear));
+    DialReader.read(
+        section, "protection." + Wording.clip(field.key()), DIALS.getOrDefault(name, List.of()));
+    return Optional.ofNullable(read);
   }
 
   private static Device.Fitting fitting(

@@ -182,7 +182,8 @@ final class StarterAssembly {
             accepted,
             reading.assumptions(),
             reading.notYetJudged(),
-            method));
+            method,
+            reading.dialScales()));
   }
 
   /** One tag, one thing: findings name their subject by its tag. */
