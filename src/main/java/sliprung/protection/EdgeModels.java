@@ -50,6 +50,11 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
 
   @Override
   public EdgeModel fuse(Device.Fuse device) {
+    if (!Device.Fuse.gatesHoldAt(starter.supply().voltage())) {
+      return new UnknownModel(
+          "the gates of a low-voltage fuse end at 1\u00a0000\u00a0V; the fuse that is there needs its"
+              + " own curve as points");
+    }
     if (device.gates().isPresent()) {
       FuseGates gates = device.gates().get();
       return switch (edge) {

@@ -118,6 +118,14 @@ public sealed interface Device {
       OptionalDouble breakingAmps)
       implements Device {
 
+    /** A.c. volts up to which gates and ratings of IEC 60269 hold (its scope, from memory). */
+    public static final double GREATEST_VOLTS = 1000.0;
+
+    /** Whether the gates say anything of a fuse at that line voltage. */
+    public static boolean gatesHoldAt(double volts) {
+      return volts <= GREATEST_VOLTS;
+    }
+
     /** A fuse without a declared breaking capacity. */
     public Fuse(
         Fitting fitting,

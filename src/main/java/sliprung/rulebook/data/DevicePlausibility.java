@@ -11,8 +11,6 @@ import sliprung.starter.Step;
 /** The protective devices' settings against the current of the place where they measure. */
 final class DevicePlausibility implements Device.Cases<Void> {
   /** Greatest a.c. voltage of IEC 60269-1 fuses (from memory). */
-  private static final double LOW_VOLTAGE = 1000.0;
-
   private final Tally tally;
 
   private DevicePlausibility(Tally tally) {
@@ -62,7 +60,7 @@ final class DevicePlausibility implements Device.Cases<Void> {
     tally.ratio(
         "fuse-voltage",
         path(device, "kind"),
-        OptionalDouble.of(starter().supply().voltage() / LOW_VOLTAGE),
+        OptionalDouble.of(starter().supply().voltage() / Device.Fuse.GREATEST_VOLTS),
         "the supply's voltage over the 1 000 V up to which the gates of " + device.tag() + " hold",
         "Above 1000 V a low-voltage fuse has no place; give the real fuse's own curve as points.");
     return null;
