@@ -167,6 +167,8 @@ public record StartOverTime(
         ticks.add(tick(timer.tag(), timer.seconds(), spread));
       } else if (device instanceof Device.Standstill sensor) {
         ticks.add(tick(sensor.tag() + " at rest", sensor.seconds(), spread));
+      } else if (device instanceof Device.StepProof proof) {
+        ticks.add(tick(proof.tag() + " each step", proof.seconds(), spread));
       }
     }
     return ticks;

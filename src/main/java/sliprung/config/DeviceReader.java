@@ -27,7 +27,13 @@ final class DeviceReader {
   private record Kind(
       String[] keys, Device.Measurement usual, BiFunction<Section, Device.Fitting, Device> read) {}
 
-  DeviceReader(CurveLibrary library, DeviceSettings.PointCurves pointCurves) {
+  /**
+   * A reader.
+   *
+   * @param sectionCount of the bank; 0 where it could not be read
+   */
+  DeviceReader(CurveLibrary library, DeviceSettings.PointCurves pointCurves, int sectionCount) {
+    SupervisionSettings supervision = new SupervisionSettings(sectionCount);
     DeviceSettings settings = new DeviceSettings(library, pointCurves);
     Device.Measurement direct = Device.Measurement.DIRECT;
     Device.Measurement ct = Device.Measurement.CT;
@@ -92,6 +98,26 @@ final class DeviceReader {
         "blocked-above");
     kind("points", ct, settings::points, MEASURING, "curve", "rating");
     kind("standstill", direct, settings::standstill, List.of("kind", "trips"), "time");
+    kind("step-proof", direct, supervision::stepProof, List.of("kind", "trips"), "time");
+    kind(
+        "undervoltage",
+        direct,
+        supervision::undervoltage,
+        List.of("kind", "trips"),
+        "below",
+        "time",
+        "accuracy");
+    kind(
+        "temperature",
+        direct,
+        supervision::temperature,
+        List.of("kind", "trips", "place"),
+        "sections",
+        "limit",
+        "rise",
+        "air",
+        "lag",
+        "accuracy");
   }
 
   private static final Map<String, List<DialReader.Dial>> DIALS =
@@ -187,7 +213,11 @@ final class DeviceReader {
     }
     List<String> keys = List.of(kind.keys());
     Device.Place place = Device.Place.STATOR;
-    if (keys.contains("place")) {
+    if (keys.contains("lag")) {
+      // a sensor on elements sits in the bank and nowhere else
+      section.optional("place").ifPresent(f -> f.choice(Map.of("bank", Device.Place.BANK)));
+      place = Device.Place.BANK;
+    } else if (keys.contains("place")) {
       place =
           section.choiceOr(
               "place",

@@ -42,8 +42,7 @@ public final class Bands {
   }
 
   private static EdgeModel model(Device device, Edge edge, Starter starter) {
-    return device.fold(
-        new EdgeModels(edge, starter.timerSpread(), starter.ambient().panelCelsius()));
+    return device.fold(new EdgeModels(edge, starter));
   }
 
   /** Empty, or why that edge of a device cannot be computed at all. */

@@ -127,19 +127,24 @@ final class StartComputation {
     }
     List<Double> sections =
         permitted.sectionLevelsAfter(PartPreload.COLD, Math.max(1, duty.coldStarts()));
-    DevicePreload warm = before.devices();
+    DevicePreload warm = before.devices().onWarmBank(sections);
     PartPreload restarted = before.parts(duty.restartAfterSeconds(), sections);
     for (int n = 1; n <= duty.hotStarts(); n++) {
       starts.add(permitted(corner, permitted, ComputedStart.From.HOT, n, warm, restarted));
     }
 
-    DevicePreload forgotten = before.remembered();
+    DevicePreload forgotten = before.remembered().onWarmBank(sections);
     PartPreload hot = before.parts(0.0, sections);
     for (Scenario fault : faults()) {
       StartProtection history = evaluator.over(fault(fault, both));
       if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
         starts.add(
-            fault(corner, history, ComputedStart.From.HOT, warmFromLightLoad(conditions), hot));
+            fault(
+                corner,
+                history,
+                ComputedStart.From.HOT,
+                warmFromLightLoad(conditions).onWarmBank(sections),
+                hot));
         continue;
       }
       // a reclosed motor was running just before: it has no cold start

@@ -204,7 +204,7 @@ public final class TwoSectionsAtOnceAreStood implements Rule {
     Optional<MakingCapacity> capacity = MakingCapacity.of(facts, contactor);
     if (capacity.isEmpty()) {
       return builder.notJudged(
-          MakingCapacity.missing(contactor),
+          MakingCapacity.missing(facts, contactor),
           sentence + " Nothing proves what " + contactor.tag() + " makes.");
     }
     OptionalDouble torqueLimit = facts.starter().limits().torquePeak();

@@ -280,7 +280,7 @@ public final class TheClassFitsStartAndStall implements Rule {
   }
 
   /** The classes with a shortest time that the practice has figures for, least first. */
-  static List<TripClass> classes(Facts facts) {
+  public static List<TripClass> classes(Facts facts) {
     return facts.practice().figures().keySet().stream()
         .filter(k -> k.startsWith(KEY) && k.endsWith(".shortest"))
         .map(k -> k.substring(KEY.length(), k.length() - ".shortest".length()))

@@ -66,10 +66,13 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
     for (ComputedStart start : facts.permitted().toList()) {
       DeviceResponse found = start.device(device.tag(), Edge.FAST).orElseThrow();
       if (found.notJudged().isPresent()) {
+        boolean current = device.measuresCurrent();
         return builder
             .at(start)
-            .mend("Give the device's own curve as points.")
-            .notJudged(List.of("protection." + device.tag() + ".curve"), found.notJudged().get());
+            .mend(current ? "Give the device's own curve as points." : "Give what it needs.")
+            .notJudged(
+                List.of(current ? "protection." + device.tag() + ".curve" : "resistors.sections"),
+                found.notJudged().get());
       }
       if (worst == null || isBelow(device, found, least)) {
         least = margin(device, found);
@@ -93,8 +96,15 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
 
   /** Timers have no current margin: how much longer the start may take. */
   private static double margin(Device device, DeviceResponse response) {
-    boolean timer = device instanceof Device.SequenceTimer || device instanceof Device.Standstill;
-    return timer ? response.stretchMargin().orElseThrow() : response.currentMargin().orElseThrow();
+    return isTimer(device)
+        ? response.stretchMargin().orElseThrow()
+        : response.currentMargin().orElseThrow();
+  }
+
+  private static boolean isTimer(Device device) {
+    return device instanceof Device.SequenceTimer
+        || device instanceof Device.Standstill
+        || device instanceof Device.StepProof;
   }
 
   /** Whether the margin is below another: asked first, since it costs less than the margin. */
@@ -138,11 +148,11 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
     String room =
         Double.isInfinite(margin)
             ? ": nothing near it"
-            : device instanceof Device.SequenceTimer || device instanceof Device.Standstill
+            : isTimer(device)
                 ? "; the start may take " + Show.ratio(margin) + " times as long"
-                : "; the current may be "
-                    + Show.ratio(margin)
-                    + " times as high"
+                : (device instanceof Device.Undervoltage
+                        ? "; the voltage may be " + Show.ratio(margin) + " times lower"
+                        : "; the current may be " + Show.ratio(margin) + " times as high")
                     + response.stretchMargin().stream()
                         .filter(Double::isFinite)
                         .mapToObj(s -> ", or the start " + Show.ratio(s) + " times as long")
@@ -168,6 +178,12 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
                 + " a hot restart.",
             Device.SequenceTimer.class,
             "Set it longer.",
+            Device.StepProof.class,
+            "Set it longer.",
+            Device.Undervoltage.class,
+            "Lower its voltage, lengthen its delay, or stiffen the supply.",
+            Device.Temperature.class,
+            "Raise its limit as far as the sections allow, or shorten the series of starts.",
             Device.Fuse.class,
             "Take a higher rating under the declared coordination.");
     return cures.getOrDefault(device.getClass(), "Raise its pick-up or its time.");
