@@ -121,23 +121,34 @@ final class DeviceReader {
   }
 
   private static final Map<String, List<DialReader.Dial>> DIALS =
-      Map.of(
-          "overload", List.of(new DialReader.Dial("dial", Dimension.CURRENT)),
-          "inverse-time",
-              List.of(
-                  new DialReader.Dial("pick-up", Dimension.CURRENT),
-                  new DialReader.Dial("time-multiplier", Dimension.NUMBER)),
-          "instantaneous", List.of(new DialReader.Dial("pick-up", Dimension.CURRENT)),
-          "sequence-timer", List.of(new DialReader.Dial("time", Dimension.TIME)),
-          "thermal",
-              List.of(
-                  new DialReader.Dial("base", Dimension.CURRENT),
-                  new DialReader.Dial("time-constant", Dimension.TIME)),
-          "definite-time",
-              List.of(
-                  new DialReader.Dial("pick-up", Dimension.CURRENT),
-                  new DialReader.Dial("time", Dimension.TIME)),
-          "standstill", List.of(new DialReader.Dial("time", Dimension.TIME)));
+      Map.ofEntries(
+          dials("overload", new DialReader.Dial("dial", Dimension.CURRENT)),
+          dials(
+              "inverse-time",
+              new DialReader.Dial("pick-up", Dimension.CURRENT),
+              new DialReader.Dial("time-multiplier", Dimension.NUMBER)),
+          dials("instantaneous", new DialReader.Dial("pick-up", Dimension.CURRENT)),
+          dials("sequence-timer", new DialReader.Dial("time", Dimension.TIME)),
+          dials(
+              "thermal",
+              new DialReader.Dial("base", Dimension.CURRENT),
+              new DialReader.Dial("time-constant", Dimension.TIME)),
+          dials(
+              "definite-time",
+              new DialReader.Dial("pick-up", Dimension.CURRENT),
+              new DialReader.Dial("time", Dimension.TIME)),
+          dials("standstill", new DialReader.Dial("time", Dimension.TIME)),
+          dials("step-proof", new DialReader.Dial("time", Dimension.TIME)),
+          dials("undervoltage", new DialReader.Dial("time", Dimension.TIME)),
+          dials(
+              "temperature",
+              new DialReader.Dial("limit", Dimension.TEMPERATURE),
+              new DialReader.Dial("rise", Dimension.TEMPERATURE_RISE)));
+
+  private static Map.Entry<String, List<DialReader.Dial>> dials(
+      String kind, DialReader.Dial... dials) {
+    return Map.entry(kind, List.of(dials));
+  }
 
   private void kind(
       String name,

@@ -238,6 +238,47 @@ public final class Dials {
               (o, v) -> new Device.Standstill(o.fitting(), v)));
     }
 
+    @Override
+    public List<Dial> stepProof(Device.StepProof d) {
+      return List.of(
+          dial(
+              d,
+              "time",
+              Dimension.TIME,
+              d.seconds(),
+              (o, v) -> new Device.StepProof(o.fitting(), v)));
+    }
+
+    @Override
+    public List<Dial> undervoltage(Device.Undervoltage d) {
+      return List.of(
+          dial(
+              d,
+              "time",
+              Dimension.TIME,
+              d.seconds(),
+              (o, v) -> new Device.Undervoltage(o.fitting(), o.share(), v, o.accuracy())));
+    }
+
+    @Override
+    public List<Dial> temperature(Device.Temperature d) {
+      return List.of(
+          dial(
+              d,
+              d.absolute() ? "limit" : "rise",
+              d.absolute() ? Dimension.TEMPERATURE : Dimension.TEMPERATURE_RISE,
+              d.limit(),
+              (o, v) ->
+                  new Device.Temperature(
+                      o.fitting(),
+                      o.sections(),
+                      v,
+                      o.absolute(),
+                      o.air(),
+                      o.lagSeconds(),
+                      o.accuracy())));
+    }
+
     /**
      * The device is looked up anew in the starter that is set: another dial of it may have moved.
      */

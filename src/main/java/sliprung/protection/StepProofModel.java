@@ -84,19 +84,16 @@ final class StepProofModel implements EdgeModel {
             wait.seconds() / setSeconds,
             operates ? wait.from() + setSeconds : Double.POSITIVE_INFINITY);
     if (!withMargins) {
-      return new EdgeOutcome(
-          passage,
-          OptionalDouble.empty(),
-          OptionalDouble.empty(),
-          Optional.empty(),
-          Optional.empty());
+      return new EdgeOutcome(passage, Optional.empty(), Optional.empty(), Optional.empty());
     }
     double stretch = wait.seconds() > 0.0 ? setSeconds / wait.seconds() : Double.POSITIVE_INFINITY;
     return new EdgeOutcome(
         passage,
         // no current moves a timer
-        OptionalDouble.of(operates ? 0.0 : Double.POSITIVE_INFINITY),
-        OptionalDouble.of(stretch > 100.0 ? Double.POSITIVE_INFINITY : stretch),
+        Optional.of(
+            StartMargins.known(
+                operates ? 0.0 : Double.POSITIVE_INFINITY,
+                stretch > 100.0 ? Double.POSITIVE_INFINITY : stretch)),
         Optional.empty(),
         Optional.empty());
   }

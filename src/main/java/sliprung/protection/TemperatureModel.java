@@ -117,21 +117,16 @@ final class TemperatureModel implements EdgeModel {
   public EdgeOutcome over(Starts starts, boolean withMargins) {
     Passage passage = passage(starts, UnaryOperator.identity());
     if (!withMargins) {
-      return new EdgeOutcome(
-          passage,
-          OptionalDouble.empty(),
-          OptionalDouble.empty(),
-          Optional.empty(),
-          Optional.empty());
+      return new EdgeOutcome(passage, Optional.empty(), Optional.empty(), Optional.empty());
     }
     return new EdgeOutcome(
         passage,
-        OptionalDouble.of(
-            Margin.of(
-                f -> passage(starts, w -> w.scaled(f, 1.0)).use(), passage.use(), Margin.COARSE)),
-        OptionalDouble.of(
-            Margin.of(
-                f -> passage(starts, w -> w.scaled(1.0, f)).use(), passage.use(), Margin.COARSE)),
+        Optional.of(
+            new StartMargins(
+                f -> passage(starts, w -> w.scaled(f, 1.0)).use(),
+                f -> passage(starts, w -> w.scaled(1.0, f)).use(),
+                passage.use(),
+                Margin.COARSE)),
         Optional.empty(),
         Optional.empty());
   }
