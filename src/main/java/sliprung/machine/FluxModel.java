@@ -159,6 +159,41 @@ public final class FluxModel {
     return 0.75 * (stator + rotor);
   }
 
+  /**
+   * Time constant in s with which the rotor's flux dies while the stator is open: {@code Tdo = (X2
+   * + Xm)/(ω·R)}, R of the whole rotor circuit.
+   */
+  public double openCircuitSeconds() {
+    return lr / r;
+  }
+
+  /**
+   * The stator, cut off from a state and left open for a while, the angle to the supply counted
+   * anew from the beginning: the rotor keeps its flux at the cut and lets it die with {@link
+   * #openCircuitSeconds()}; the stator is linked with what of it crosses the gap.
+   *
+   * @param state at the cut
+   * @param seconds open, 0 or more
+   * @param speed at the end of it, rad/s
+   * @param angle by which the flux has turned against the supply, rad
+   */
+  public double[] openedFrom(double[] state, double seconds, double speed, double angle) {
+    double left = Math.exp(-seconds / openCircuitSeconds());
+    double d = left * (state[2] * Math.cos(angle) - state[3] * Math.sin(angle));
+    double q = left * (state[2] * Math.sin(angle) + state[3] * Math.cos(angle));
+    double crosses = lm / lr;
+    return new double[] {crosses * d, crosses * q, d, q, speed};
+  }
+
+  /**
+   * Residual voltage at the open stator, RMS line to line, V: {@code √(3/2)·(Lm/Lr)·|−R/Lr +
+   * jpω|·|ψr|}.
+   */
+  public double residualVolts(double[] opened) {
+    double rate = magnitude(r / lr, polePairs * opened[SPEED]);
+    return Math.sqrt(1.5) * lm / lr * rate * magnitude(opened[2], opened[3]);
+  }
+
   /** The settled state at a constant speed, rad/s. */
   public double[] settledAt(double speed) {
     // currents from the steady circuit with complex numbers: rotor branch y + jx22, main jxm

@@ -101,6 +101,9 @@ final class StartComputation {
     if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
       return simulator.run(fault, at.conditions()); // nothing closes: there is no closing peak
     }
+    if (fault.kind() == Scenario.Kind.RECLOSED) {
+      return simulator.runReclosed(fault, at.conditions());
+    }
     StartHistory steady = simulator.run(fault, at.conditions());
     return at.corner().isNominal()
         ? steady.withPeaksOf(simulator.runTransient(fault, at.conditions()))
