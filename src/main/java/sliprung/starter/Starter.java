@@ -382,6 +382,37 @@ public record Starter(
         dialScales);
   }
 
+  /** The same starter with another bank of as many sections. */
+  public Starter withResistors(ResistorBank bank) {
+    return new Starter(
+        name,
+        practice,
+        supply,
+        motor,
+        load,
+        bank,
+        steps,
+        sequence,
+        timerSpread,
+        levelSpread,
+        contactors,
+        breakers,
+        protection,
+        statorConductor,
+        rotorConductor,
+        duty,
+        limits,
+        margins,
+        fuseWear,
+        interlocks,
+        ambient,
+        evidence,
+        accepted,
+        assumptions,
+        notYetJudged,
+        method);
+  }
+
   /** Number of sections of the bank. */
   public int sectionCount() {
     return resistors.sections().size();
