@@ -134,10 +134,8 @@ public record StartOverTime(
       java.util.function.Function<Trace, double[]> quantity,
       double factor,
       double end) {
-    return new Banded(
-        Sampling.series(history, quantity, factor, end),
-        Sampling.edge(corners, quantity, factor, end, false),
-        Sampling.edge(corners, quantity, factor, end, true));
+    List<Series> edges = Sampling.edges(corners, quantity, factor, end);
+    return new Banded(Sampling.series(history, quantity, factor, end), edges.get(0), edges.get(1));
   }
 
   private static double end(List<StartHistory> corners, List<TimerTick> timers) {

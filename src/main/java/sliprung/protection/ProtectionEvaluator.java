@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import sliprung.machine.Machine;
 import sliprung.runup.StartHistory;
+import sliprung.starter.Contactor;
 import sliprung.starter.Device;
 import sliprung.starter.Starter;
 
@@ -93,6 +94,11 @@ public final class ProtectionEvaluator {
    */
   public OptionalDouble withstandSeconds(String part, double amps) {
     return part(part).withstandSeconds(amps);
+  }
+
+  /** Current in a pole of a step contactor over the ring current, by the way its poles join. */
+  public static double poleShare(Contactor contactor) {
+    return ContactorParts.poleShare(contactor);
   }
 
   /** The model of one edge of the device of a tag. */

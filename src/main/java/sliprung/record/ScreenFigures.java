@@ -46,6 +46,12 @@ final class ScreenFigures implements Figures {
     page.close();
   }
 
+  /** A row each, so that a reader's software meets it in order. */
+  @Override
+  public int rowsAbreast() {
+    return 1;
+  }
+
   @Override
   public String fitted(String text) {
     return text;
