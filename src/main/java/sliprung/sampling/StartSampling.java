@@ -2,12 +2,14 @@ package sliprung.sampling;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.apache.commons.math3.random.RandomGenerator;
 import org.apache.commons.math3.random.Well19937c;
 import org.apache.commons.math3.stat.descriptive.rank.Percentile;
 import sliprung.machine.Machine;
+import sliprung.starter.Device;
 import sliprung.starter.Starter;
 
 /**
@@ -57,6 +59,8 @@ public final class StartSampling {
         quantities.add(quantity(name, known));
       }
     }
+    List<String> tags = starter.protection().stream().map(Device::tag).toList();
+    trips.sort(Comparator.comparingInt(t -> tags.indexOf(t.device())));
     return new Sampled(starts, seed, notRunUp, trips, quantities);
   }
 
