@@ -378,8 +378,7 @@ public record Starter(
         accepted,
         assumptions,
         notYetJudged,
-        method,
-        dialScales);
+        method);
   }
 
   /** Number of sections of the bank. */
