@@ -60,31 +60,61 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
 
   private static Finding judge(Facts facts, Device device) {
     FindingBuilder builder = FindingBuilder.of(facts, INFO, device.tag()).edge(Edge.FAST);
-    ComputedStart worst = null;
-    DeviceResponse response = null;
-    double least = Double.POSITIVE_INFINITY;
+    Nearest nearest = null;
+    Nearest certain = null;
+    ComputedStart unknown = null;
     for (ComputedStart start : facts.permitted().toList()) {
       DeviceResponse found = start.device(device.tag(), Edge.FAST).orElseThrow();
       if (found.notJudged().isPresent()) {
-        return builder
-            .at(start)
-            .mend("Give the device's own curve as points.")
-            .notJudged(List.of("protection." + device.tag() + ".curve"), found.notJudged().get());
+        unknown = unknown == null ? start : unknown;
+        continue;
       }
-      double margin = margin(device, found);
-      if (worst == null || margin < least) {
-        least = margin;
-        worst = start;
-        response = found;
+      Nearest here = new Nearest(start, found, margin(device, found));
+      nearest = nearer(nearest, here);
+      if (found.bound().isEmpty()) {
+        certain = nearer(certain, here);
       }
     }
-    builder.at(worst).figures(response.use(), 1.0, "share of operation");
-    if (least < 1.0 && response.bound().isPresent()) {
-      return builder.notJudged(
-          List.of("protection." + device.tag() + ".curve"),
-          says(device, worst, response, least) + " " + response.bound().get());
+    if (certain != null && certain.margin() < 1.0) {
+      return byMargin(facts, builder, device, certain);
     }
-    builder.margin(least).says(says(device, worst, response, least)).mend(mend(device, least));
+    if (unknown != null) {
+      return builder
+          .at(unknown)
+          .mend("Give the device's own curve as points.")
+          .notJudged(
+              List.of("protection." + device.tag() + ".curve"),
+              unknown.device(device.tag(), Edge.FAST).orElseThrow().notJudged().orElseThrow());
+    }
+    if (nearest.margin() < 1.0) {
+      return builder
+          .at(nearest.start())
+          .figures(nearest.response().use(), 1.0, "share of operation")
+          .notJudged(
+              List.of("protection." + device.tag() + ".curve"),
+              says(device, nearest.start(), nearest.response(), nearest.margin())
+                  + " "
+                  + nearest.response().bound().orElseThrow());
+    }
+    return byMargin(facts, builder, device, nearest);
+  }
+
+  /** The start that comes nearest to operating the device, of those looked at. */
+  private record Nearest(ComputedStart start, DeviceResponse response, double margin) {}
+
+  /** The first of the thinnest: the nominal corner comes first. */
+  private static Nearest nearer(Nearest so, Nearest here) {
+    return so == null || here.margin() < so.margin() ? here : so;
+  }
+
+  private static Finding byMargin(
+      Facts facts, FindingBuilder builder, Device device, Nearest nearest) {
+    builder
+        .at(nearest.start())
+        .figures(nearest.response().use(), 1.0, "share of operation")
+        .margin(nearest.margin())
+        .says(says(device, nearest.start(), nearest.response(), nearest.margin()))
+        .mend(mend(device, nearest.margin()));
     Optional<Double> classAlone = classAlone(facts, device);
     if (classAlone.isPresent() && classAlone.get() > facts.wanted(INFO.name())) {
       builder.wanted(classAlone.get());
