@@ -67,10 +67,13 @@ public final class Bands {
 
   /**
    * The least constant current in A that ever operates an edge, to 1e-9; empty where there is none
-   * up to a hundred thousand amperes or it cannot be told.
+   * up to a hundred thousand amperes or it cannot be told. A rotation sensor and a sequence timer
+   * have no level in amperes: they measure rest and time.
    */
   public OptionalDouble pickUpAmps(Device device, Edge edge) {
-    return pickUpAmps(model(device, edge, starter));
+    boolean seesCurrent =
+        !(device instanceof Device.Standstill) && !(device instanceof Device.SequenceTimer);
+    return seesCurrent ? pickUpAmps(model(device, edge, starter)) : OptionalDouble.empty();
   }
 
   /** The same of a model. */
