@@ -5,19 +5,24 @@ import java.awt.geom.PathIterator;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /** Finds places for labels: never on another label, and on as few lines as can be. */
 final class FreeSpace {
   private static final double SAMPLE = 4.0;
+  private static final double COLUMN = 16.0;
   private static final double PAD = 3.0;
   private static final int RINGS = 14;
   private static final double RING_STEP = 14.0;
   private static final double FAR_COST = 0.4;
   private final Rectangle2D area;
   private final List<Rectangle2D> taken = new ArrayList<>();
-  private final List<Point2D> inked = new ArrayList<>();
+
+  /** Ink by columns of the area, so that a box looks only at what can lie in it. */
+  private final Map<Integer, List<Point2D>> inked = new HashMap<>();
 
   /** Free space inside an area. */
   FreeSpace(Rectangle2D area) {
@@ -36,7 +41,7 @@ final class FreeSpace {
           double w = d / length;
           Point2D point = new Point2D.Double(x + w * (at[0] - x), y + w * (at[1] - y));
           if (area.contains(point)) {
-            inked.add(point);
+            inked.computeIfAbsent(column(point.getX()), k -> new ArrayList<>()).add(point);
           }
         }
       }
@@ -88,6 +93,9 @@ final class FreeSpace {
     for (int i = 0; i < places.size(); i++) {
       Rectangle2D box =
           new Rectangle2D.Double(places.get(i).getX(), places.get(i).getY(), width, height);
+      if (FAR_COST * i >= least) {
+        break;
+      }
       double cost = cost(box) + FAR_COST * i;
       if (cost < least) {
         least = cost;
@@ -101,9 +109,24 @@ final class FreeSpace {
     Rectangle2D padded =
         new Rectangle2D.Double(
             box.getX() - PAD, box.getY() - 1, box.getWidth() + 2 * PAD, box.getHeight() + 2);
-    if (!area.contains(box) || taken.stream().anyMatch(padded::intersects)) {
+    if (!area.contains(box)) {
       return Double.POSITIVE_INFINITY;
     }
-    return inked.stream().filter(padded::contains).count();
+    for (Rectangle2D other : taken) {
+      if (padded.intersects(other)) {
+        return Double.POSITIVE_INFINITY;
+      }
+    }
+    int covered = 0;
+    for (int c = column(padded.getX()); c <= column(padded.getMaxX()); c++) {
+      for (Point2D point : inked.getOrDefault(c, List.of())) {
+        covered += padded.contains(point) ? 1 : 0;
+      }
+    }
+    return covered;
+  }
+
+  private static int column(double x) {
+    return (int) Math.floor(x / COLUMN);
   }
 }

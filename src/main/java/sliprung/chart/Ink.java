@@ -39,6 +39,7 @@ final class Ink {
 
   static final Font LABEL = Letters.plain(13);
   static final Font STRONG = Letters.bold(13);
+  static final Font SMALL_STRONG = Letters.bold(12);
   static final Font FINE = Letters.plain(11);
   static final Font SMALL = Letters.plain(12);
 

@@ -16,17 +16,17 @@ public final class MarginDrawing {
   private static final int RIGHT = 190;
   private static final int TOP = 24;
   private static final int BOTTOM = 50;
-  private static final int ROW = 20;
+  private static final int ROW = 16;
   private static final int HEAD = 30;
   private static final double LEAST = 0.1;
   private static final double GREATEST = 10.0;
-  private static final double DOT = 4.5;
+  private static final double DOT = 4.0;
   private static final int SUBJECT_LETTERS = 24;
-  private static final int MOST_ROWS = 40;
+  private static final int MOST_ROWS = 34;
 
   private MarginDrawing() {}
 
-  /** The pictures, each no taller than a sheet of paper holds: usually one to three. */
+  /** The pictures, each of half a sheet of paper: usually three. */
   public static List<Picture> pictures(MarginOverview chart) {
     List<Picture> pictures = new ArrayList<>();
     for (MarginOverview part : chart.parts(MOST_ROWS)) {
@@ -89,7 +89,7 @@ public final class MarginDrawing {
     boolean loud = row.isShort();
     double line = top + ROW / 2.0;
     String subject = Lines.cut(row.subject(), SUBJECT_LETTERS);
-    words.left(subject, loud ? Ink.STRONG : Ink.LABEL, Ink.TEXT, 18, line + 5);
+    words.left(subject, loud ? Ink.SMALL_STRONG : Ink.SMALL, Ink.TEXT, 18, line + 4);
     words.right(row.rule(), Ink.FINE, Ink.QUIET, LEFT - 10, line + 4);
     double one = frame.x(1.0);
     double x = frame.x(Math.min(GREATEST, Math.max(LEAST, row.share())));
@@ -106,7 +106,7 @@ public final class MarginDrawing {
     double end = frame.area().getMaxX() + 14;
     words.left(
         row.text() + "  " + row.verdict().word(),
-        loud ? Ink.STRONG : Ink.SMALL,
+        loud ? Ink.SMALL_STRONG : Ink.SMALL,
         loud ? Ink.TEXT : Ink.QUIET,
         end,
         line + 4);

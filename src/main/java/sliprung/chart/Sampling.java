@@ -34,52 +34,62 @@ final class Sampling {
         points.stream().mapToDouble(p -> p[1]).toArray());
   }
 
-  /** Least (or greatest) of a quantity over several histories, on an even grid of times. */
-  static Series edge(
-      List<StartHistory> histories,
-      Function<Trace, double[]> quantity,
-      double factor,
-      double end,
-      boolean greatest) {
-    double[] seconds = new double[GRID + 1];
-    double[] values = new double[GRID + 1];
-    for (int k = 0; k <= GRID; k++) {
-      double t = end * k / GRID;
-      double extreme = greatest ? Double.NEGATIVE_INFINITY : Double.POSITIVE_INFINITY;
-      for (StartHistory history : histories) {
-        double value = at(history, quantity, t) * factor;
-        extreme = greatest ? Math.max(extreme, value) : Math.min(extreme, value);
-      }
-      seconds[k] = t;
-      values[k] = extreme;
+  /** A quantity of a history with its stages laid out once, to be read at many times. */
+  private record Laid(List<Stage> stages, List<double[]> seconds, List<double[]> values) {
+    static Laid of(StartHistory history, Function<Trace, double[]> quantity) {
+      List<Stage> stages = history.everything();
+      return new Laid(
+          stages,
+          stages.stream().map(s -> s.trace().seconds()).toList(),
+          stages.stream().map(s -> quantity.apply(s.trace())).toList());
     }
-    return new Series(seconds, values);
+
+    /** At a time; after the end of the history its last value. */
+    double at(double time) {
+      int stage = 0;
+      while (stage < stages.size() - 1 && !(time < stages.get(stage).toSeconds())) {
+        stage++;
+      }
+      double[] t = seconds.get(stage);
+      double[] v = values.get(stage);
+      int found = java.util.Arrays.binarySearch(t, time);
+      if (found >= 0) {
+        return v[found];
+      }
+      int upper = -found - 1;
+      if (upper == 0) {
+        return v[0];
+      }
+      if (upper >= t.length) {
+        return v[t.length - 1];
+      }
+      double w = (time - t[upper - 1]) / (t[upper] - t[upper - 1]);
+      return v[upper - 1] + w * (v[upper] - v[upper - 1]);
+    }
   }
 
-  /** A quantity at a time; after the end of the history its last value. */
-  static double at(StartHistory history, Function<Trace, double[]> quantity, double time) {
-    List<Stage> stages = history.everything();
-    Stage stage = stages.get(stages.size() - 1);
-    for (Stage candidate : stages) {
-      if (time < candidate.toSeconds()) {
-        stage = candidate;
-        break;
+  /**
+   * Least and greatest of a quantity over several histories, on an even grid of times.
+   *
+   * @return the least, then the greatest
+   */
+  static List<Series> edges(
+      List<StartHistory> histories, Function<Trace, double[]> quantity, double factor, double end) {
+    List<Laid> laid = histories.stream().map(h -> Laid.of(h, quantity)).toList();
+    double[] seconds = new double[GRID + 1];
+    double[] least = new double[GRID + 1];
+    double[] greatest = new double[GRID + 1];
+    for (int k = 0; k <= GRID; k++) {
+      double t = end * k / GRID;
+      least[k] = Double.POSITIVE_INFINITY;
+      greatest[k] = Double.NEGATIVE_INFINITY;
+      for (Laid history : laid) {
+        double value = history.at(t) * factor;
+        least[k] = Math.min(least[k], value);
+        greatest[k] = Math.max(greatest[k], value);
       }
+      seconds[k] = t;
     }
-    double[] t = stage.trace().seconds();
-    double[] v = quantity.apply(stage.trace());
-    int found = java.util.Arrays.binarySearch(t, time);
-    if (found >= 0) {
-      return v[found];
-    }
-    int upper = -found - 1;
-    if (upper == 0) {
-      return v[0];
-    }
-    if (upper >= t.length) {
-      return v[t.length - 1];
-    }
-    double w = (time - t[upper - 1]) / (t[upper] - t[upper - 1]);
-    return v[upper - 1] + w * (v[upper] - v[upper - 1]);
+    return List.of(new Series(seconds, least), new Series(seconds, greatest));
   }
 }

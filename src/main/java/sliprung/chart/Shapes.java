@@ -6,20 +6,29 @@ import java.awt.geom.Path2D;
 final class Shapes {
   private Shapes() {}
 
+  /** Points nearer than this to the last one drawn are left out: nobody sees them, px. */
+  private static final double UNSEEN = 0.4;
+
   /** A line through the points; points that are not finite break it. */
   static Path2D line(Frame frame, double[] across, double[] up) {
     Path2D path = new Path2D.Double();
     boolean open = false;
+    double lastX = 0.0;
+    double lastY = 0.0;
     for (int i = 0; i < across.length; i++) {
       double x = frame.x(across[i]);
       double y = frame.y(up[i]);
       if (!Double.isFinite(x) || !Double.isFinite(y)) {
         open = false;
-      } else if (open) {
-        path.lineTo(x, y);
-      } else {
+      } else if (!open) {
         path.moveTo(x, y);
         open = true;
+        lastX = x;
+        lastY = y;
+      } else if (i == across.length - 1 || Math.hypot(x - lastX, y - lastY) >= UNSEEN) {
+        path.lineTo(x, y);
+        lastX = x;
+        lastY = y;
       }
     }
     return path;

@@ -134,10 +134,8 @@ public record StartOverTime(
       java.util.function.Function<Trace, double[]> quantity,
       double factor,
       double end) {
-    return new Banded(
-        Sampling.series(history, quantity, factor, end),
-        Sampling.edge(corners, quantity, factor, end, false),
-        Sampling.edge(corners, quantity, factor, end, true));
+    List<Series> edges = Sampling.edges(corners, quantity, factor, end);
+    return new Banded(Sampling.series(history, quantity, factor, end), edges.get(0), edges.get(1));
   }
 
   private static double end(List<StartHistory> corners, List<TimerTick> timers) {
@@ -167,6 +165,8 @@ public record StartOverTime(
         ticks.add(tick(timer.tag(), timer.seconds(), spread));
       } else if (device instanceof Device.Standstill sensor) {
         ticks.add(tick(sensor.tag() + " at rest", sensor.seconds(), spread));
+      } else if (device instanceof Device.StepProof proof) {
+        ticks.add(tick(proof.tag() + " each step", proof.seconds(), spread));
       }
     }
     return ticks;

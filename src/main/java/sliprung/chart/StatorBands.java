@@ -27,8 +27,8 @@ public final class StatorBands {
     int count = (int) Math.ceil(STEPS_PER_DECADE * Math.log10(to / from)) + 1;
     List<Band> out = new ArrayList<>();
     for (Device device : starter.protection()) {
-      // a rotation sensor counts time at rest, whatever the current
-      if (device.fitting().place() != Device.Place.STATOR || device instanceof Device.Standstill) {
+      // timers and rotation sensors count time, whatever the current
+      if (device.fitting().place() != Device.Place.STATOR || !device.measuresCurrent()) {
         continue;
       }
       double[] amps = new double[count];

@@ -1,9 +1,9 @@
 package sliprung.chart;
 
-import java.awt.Graphics2D;
 import java.awt.RenderingHints;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;
+import java.util.List;
 import org.apache.batik.dom.GenericDOMImplementation;
 import org.apache.batik.svggen.SVGGeneratorContext;
 import org.apache.batik.svggen.SVGGraphics2DIOException;
@@ -30,31 +30,42 @@ public final class Svg {
 
   /** An {@code svg} element to stand in a page that says its sentence itself. */
   public static String inline(Picture picture) {
-    return write(picture, picture.height(), picture.painter());
+    return write(picture);
   }
 
   /** A file of its own, with the sentence above the chart. */
   public static String file(Picture picture) {
-    java.util.List<String> lines = Lines.broken(picture.says(), CAPTION_LETTERS);
-    int above = lines.size() * CAPTION_LINE + CAPTION_LINE / 2;
-    String svg =
-        write(
-            picture,
-            picture.height() + above,
-            g -> {
-              g.setColor(Ink.TEXT);
-              g.setFont(Ink.STRONG.deriveFont((float) CAPTION_SIZE));
-              for (int i = 0; i < lines.size(); i++) {
-                g.drawString(lines.get(i), 4, CAPTION_LINE * (i + 1) - 4);
-              }
-              Graphics2D below = (Graphics2D) g.create();
-              below.translate(0, above);
-              picture.painter().paint(below);
-            });
-    return "<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n" + svg;
+    return file(picture, inline(picture));
   }
 
-  private static String write(Picture picture, int height, Picture.Painter painter) {
+  /**
+   * The same around an element that is already drawn.
+   *
+   * @param inline what {@link #inline} gave for the picture
+   */
+  public static String file(Picture picture, String inline) {
+    List<String> lines = Lines.broken(picture.says(), CAPTION_LETTERS);
+    int above = lines.size() * CAPTION_LINE + CAPTION_LINE / 2;
+    int height = picture.height() + above;
+    StringBuilder out = new StringBuilder(inline.length() + 1024);
+    out.append("<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n<svg xmlns=\"" + NAMESPACE + "\"");
+    out.append(" viewBox=\"0 0 " + picture.width() + " " + height + "\"");
+    out.append(" width=\"" + picture.width() + "\" height=\"" + height + "\">\n");
+    out.append("<g aria-hidden=\"true\" fill=\"#1a1a1a\" font-weight=\"bold\" font-size=\"");
+    out.append(CAPTION_SIZE + "\" font-family=\"" + LETTERS + "\">\n");
+    for (int i = 0; i < lines.size(); i++) {
+      out.append("<text x=\"4\" y=\"" + (CAPTION_LINE * (i + 1) - 4) + "\">");
+      out.append(escaped(lines.get(i))).append("</text>\n");
+    }
+    out.append("</g>\n");
+    return out + inline.replaceFirst("<svg ", "<svg y=\"" + above + "\" ") + "</svg>\n";
+  }
+
+  private static String escaped(String text) {
+    return text.replace("&", "&amp;").replace("<", "&lt;").replace(">", "&gt;");
+  }
+
+  private static String write(Picture picture) {
     Document document =
         GenericDOMImplementation.getDOMImplementation().createDocument(NAMESPACE, "svg", null);
     SVGGeneratorContext context = SVGGeneratorContext.createDefault(document);
@@ -70,9 +81,9 @@ public final class Svg {
     MarkedSurface surface = new MarkedSurface(context);
     // the axes put this hint back as they found it, and Batik refuses to be given none
     surface.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
-    painter.paint(surface);
+    picture.painter().paint(surface);
     Element root = surface.getRoot();
-    describe(root, picture, height);
+    describe(root, picture);
     root.setAttribute("data-frames", surface.frames());
     StringWriter out = new StringWriter();
     try {
@@ -86,10 +97,10 @@ public final class Svg {
     return text.substring(text.indexOf("<svg")).strip() + "\n";
   }
 
-  private static void describe(Element root, Picture picture, int height) {
-    root.setAttribute("viewBox", "0 0 " + picture.width() + " " + height);
+  private static void describe(Element root, Picture picture) {
+    root.setAttribute("viewBox", "0 0 " + picture.width() + " " + picture.height());
     root.setAttribute("width", Integer.toString(picture.width()));
-    root.setAttribute("height", Integer.toString(height));
+    root.setAttribute("height", Integer.toString(picture.height()));
     root.setAttribute("role", "img");
     String title = picture.name() + "-title";
     String says = picture.name() + "-says";

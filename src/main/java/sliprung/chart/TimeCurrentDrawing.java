@@ -18,7 +18,7 @@ public final class TimeCurrentDrawing {
   static final double STALL_SPAN = 1.25;
 
   private static final int WIDTH = 960;
-  private static final int SHEET = 560;
+  private static final int SHEET = 540;
   private static final int LEFT = 72;
   private static final int RIGHT = 24;
   private static final int SCALE = 40;
@@ -149,7 +149,7 @@ public final class TimeCurrentDrawing {
   private static void withstand(Graphics2D g, Frame frame, FreeSpace space, Withstand line) {
     Marks.series(g, line.label());
     g.setColor(Ink.PART);
-    g.setStroke(Ink.COMPUTED);
+    g.setStroke(line.isSwitchgear() ? Ink.DASHED : Ink.COMPUTED);
     Path2D path = Shapes.line(frame, line.amps(), shown(line.seconds()));
     g.draw(path);
     space.avoid(path);

@@ -6,13 +6,16 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import java.util.stream.DoubleStream;
+import sliprung.machine.Source;
 import sliprung.quantity.Show;
+import sliprung.review.PartText;
 import sliprung.review.Review;
 import sliprung.rulebook.ComputedStart;
 import sliprung.runup.Outcome;
 import sliprung.runup.Scenario;
 import sliprung.runup.Scenario.Kind;
 import sliprung.runup.Trace;
+import sliprung.starter.Motor;
 
 /**
  * Starts and devices on one sheet, stator amperes across, seconds up, both logarithmic.
@@ -92,18 +95,20 @@ public record TimeCurrentSheet(
     review.start("locked").ifPresent(s -> starts.add(curve("locked, sequence running", s)));
     List<HeldCurrent> held = held(review);
     SheetScales scales = SheetScales.of(review);
+    List<Withstand> withstand =
+        Withstand.of(
+            review,
+            scales.ringPerStator(),
+            review.starter().motor().current() * LEAST_SHARE,
+            review.starter().motor().current() * WIDEST);
     return new TimeCurrentSheet(
         bands,
         starts,
         held,
         review.starter().motor().current(),
-        stall(review),
+        stall(review, withstand),
         scales,
-        Withstand.of(
-            review,
-            scales.ringPerStator(),
-            review.starter().motor().current() * LEAST_SHARE,
-            review.starter().motor().current() * WIDEST),
+        withstand,
         TakeOverMark.of(review.starter()),
         CornerBand.of(review),
         says(review, bands, held, scales));
@@ -189,18 +194,21 @@ public record TimeCurrentSheet(
     return last.statorAmps()[last.last()];
   }
 
-  private static List<Stall> stall(Review review) {
-    Optional<ComputedStart> shorted = review.start("rings-shorted");
+  /**
+   * At the current that they are declared for, rated voltage from an ideal source. The cold limit
+   * is a point of the winding's own line, where that is drawn.
+   */
+  private static List<Stall> stall(Review review, List<Withstand> withstand) {
+    boolean drawn =
+        withstand.stream()
+            .anyMatch(w -> w.label().equals(PartText.words("rotor") + Withstand.AT_REST));
+    Motor motor = review.starter().motor();
+    double amps = review.machine().at(new Source(motor.voltage(), 0.0), 0.0, 1.0).statorAmps();
     List<Stall> stall = new ArrayList<>();
-    shorted.ifPresent(
-        s -> {
-          double amps = settledAmps(s);
-          var motor = review.starter().motor();
-          motor
-              .stallColdSeconds()
-              .ifPresent(t -> stall.add(new Stall("stall limit cold", amps, t)));
-          motor.stallHotSeconds().ifPresent(t -> stall.add(new Stall("stall limit hot", amps, t)));
-        });
+    if (!drawn) {
+      motor.stallColdSeconds().ifPresent(t -> stall.add(new Stall("stall limit cold", amps, t)));
+    }
+    motor.stallHotSeconds().ifPresent(t -> stall.add(new Stall("stall limit hot", amps, t)));
     return stall;
   }
 
@@ -213,7 +221,8 @@ public record TimeCurrentSheet(
     String meaning =
         "A start has no single point here: its curve says how long the current stays at or above"
             + " each value (light blue: at every corner). Grey: each device between its fast and"
-            + " its slow edge, at a constant current from cold.";
+            + " its slow edge. Orange: how long a part stands a current with the rotor at rest,"
+            + " hatched where it is past its limit. Both from cold, at a constant current.";
     double rated = review.starter().motor().current();
     if (held.isEmpty() || held.get(0).amps() >= rated) {
       return meaning;

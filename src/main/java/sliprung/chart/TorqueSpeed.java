@@ -29,6 +29,8 @@ import sliprung.tolerance.Corners;
  * @param breakawayTorque of the load, N·m
  * @param path of the start
  * @param hangs where it settles if a step's contactor stays open
+ * @param runningHangs the same at running load
+ * @param runningTorque of the load when running, N·m
  * @param ratedTorque N·m
  * @param says what to see
  */
@@ -40,6 +42,8 @@ public record TorqueSpeed(
     double breakawayTorque,
     Curve path,
     List<Hang> hangs,
+    List<Hang> runningHangs,
+    double runningTorque,
     double ratedTorque,
     String says) {
   private static final double RPM = 30.0 / Math.PI;
@@ -67,6 +71,7 @@ public record TorqueSpeed(
   public TorqueSpeed {
     steps = List.copyOf(steps);
     hangs = List.copyOf(hangs);
+    runningHangs = List.copyOf(runningHangs);
   }
 
   /** Of a review; empty where the nominal cold start was not computed. */
@@ -78,12 +83,16 @@ public record TorqueSpeed(
     Conditions nominal = Corners.conditions(review.starter(), Corner.NOMINAL);
     double synchronous = review.machine().synchronousSpeed();
     Curve path = path(cold);
-    List<Hang> hangs = hangs(review);
+    List<Hang> hangs = hangs(review, Scenario.LoadMode.START);
+    List<Hang> running = hangs(review, Scenario.LoadMode.RUNNING);
     double least = 0.0;
     for (double rpm : path.across()) {
       least = Math.min(least, rpm);
     }
     for (Hang hang : hangs) {
+      least = Math.min(least, hang.rpm());
+    }
+    for (Hang hang : running) {
       least = Math.min(least, hang.rpm());
     }
     double[] speeds = new double[POINTS + 1];
@@ -102,8 +111,10 @@ public record TorqueSpeed(
         load.breakawayTorque().orElse(load.torque().at(0.0)),
         path,
         hangs,
+        running,
+        new StartSimulator(review.starter(), review.machine()).runningTorque(nominal),
         review.starter().motor().ratedTorque(),
-        says(cold, hangs));
+        says(cold, hangs, running));
   }
 
   private static List<StepCurve> steps(Review review, Conditions nominal, double[] speeds) {
@@ -149,12 +160,12 @@ public record TorqueSpeed(
         points.stream().mapToDouble(p -> p[1]).toArray());
   }
 
-  private static List<Hang> hangs(Review review) {
+  private static List<Hang> hangs(Review review, Scenario.LoadMode load) {
     List<Hang> hangs = new ArrayList<>();
     for (ComputedStart start : review.starts()) {
       boolean held =
           start.scenario().kind() == Scenario.Kind.HELD
-              && start.scenario().load() == Scenario.LoadMode.START
+              && start.scenario().load() == load
               && start.corner().isNominal()
               && start.circuit().isEmpty()
               && start.from() == ComputedStart.From.COLD
@@ -168,7 +179,7 @@ public record TorqueSpeed(
     return hangs;
   }
 
-  private static String says(ComputedStart cold, List<Hang> hangs) {
+  private static String says(ComputedStart cold, List<Hang> hangs, List<Hang> running) {
     String path =
         cold.history().runUpSeconds().isPresent()
             ? "The heavy line is the nominal cold start: it follows the curve of a step and goes up"
@@ -197,7 +208,8 @@ public record TorqueSpeed(
                 + ".";
     return path
         + " If a contactor stays open the motor hangs where that step's curve meets the load"
-        + at;
+        + at
+        + (running.isEmpty() ? "" : " Diamonds: the same at running load.");
   }
 
   /** Speed of a hang in words. */

@@ -25,6 +25,7 @@ public final class TorqueSpeedDrawing {
   private static final int BOTTOM = 54;
   private static final double HEADROOM = 1.1;
   private static final double CIRCLE = 5.0;
+  private static final double DIAMOND = 6.5;
   private static final double LINE = 17.0;
   private static final Stroke HEAVY =
       new BasicStroke(3.5f, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND);
@@ -64,12 +65,16 @@ public final class TorqueSpeedDrawing {
     for (TorqueSpeed.Hang hang : chart.hangs()) {
       circle(g, frame.x(hang.rpm()), frame.y(hang.torque()));
     }
+    for (TorqueSpeed.Hang hang : chart.runningHangs()) {
+      diamond(g, frame.x(hang.rpm()), frame.y(hang.torque()));
+    }
     labels(g, frame, space, chart);
     rated(g, frame, chart);
   }
 
   private static Frame frame(Rectangle2D area, TorqueSpeed chart) {
     double greatest = Math.max(chart.ratedTorque(), chart.breakawayTorque());
+    greatest = Math.max(greatest, chart.runningTorque());
     double least = 0.0;
     for (Curve curve : curves(chart)) {
       for (double torque : curve.up()) {
@@ -115,6 +120,14 @@ public final class TorqueSpeedDrawing {
     space.avoid(load);
     space.avoid(Shapes.line(frame, chart.loadLow().across(), chart.loadLow().up()));
     space.avoid(Shapes.line(frame, chart.loadHigh().across(), chart.loadHigh().up()));
+    if (!chart.runningHangs().isEmpty()) {
+      Marks.series(g, "running load");
+      g.setStroke(Ink.DASHED);
+      double y = frame.y(chart.runningTorque());
+      Line2D running = new Line2D.Double(frame.x(0.0), y, frame.area().getMaxX(), y);
+      g.draw(running);
+      space.avoid(running);
+    }
     Marks.series(g, "start");
     g.setColor(Ink.DEVICE);
     g.setStroke(HEAVY);
@@ -133,6 +146,34 @@ public final class TorqueSpeedDrawing {
     g.draw(circle);
   }
 
+  private static void diamond(Graphics2D g, double x, double y) {
+    Path2D diamond = new Path2D.Double();
+    diamond.moveTo(x - DIAMOND, y);
+    diamond.lineTo(x, y - DIAMOND);
+    diamond.lineTo(x + DIAMOND, y);
+    diamond.lineTo(x, y + DIAMOND);
+    diamond.closePath();
+    g.setColor(Ink.PAPER);
+    g.fill(diamond);
+    g.setColor(Ink.DEVICE);
+    g.setStroke(Ink.COMPUTED);
+    g.draw(diamond);
+  }
+
+  /** The line that the diamonds lie on, named. */
+  private static void running(Frame frame, FreeSpace space, Words words, TorqueSpeed chart) {
+    if (chart.runningHangs().isEmpty()) {
+      return;
+    }
+    double y = frame.y(chart.runningTorque());
+    List<Point2D> places = new ArrayList<>();
+    for (double x = frame.x(0.0) + 150; x < frame.area().getMaxX(); x += 24) {
+      places.add(new Point2D.Double(x, y - LINE - 2));
+      places.add(new Point2D.Double(x, y + 3));
+    }
+    at(words, space, "running load " + Show.torque(chart.runningTorque()), Ink.TEXT, places);
+  }
+
   private static void labels(Graphics2D g, Frame frame, FreeSpace space, TorqueSpeed chart) {
     Words words = new Words(g);
     for (TorqueSpeed.Hang hang : chart.hangs()) {
@@ -140,7 +181,12 @@ public final class TorqueSpeedDrawing {
       double y = frame.y(hang.torque());
       space.take(new Rectangle2D.Double(x - 6, y - 6, 12, 12));
     }
-    hangs(g, frame, space, chart);
+    for (TorqueSpeed.Hang hang : chart.runningHangs()) {
+      double x = frame.x(hang.rpm());
+      double y = frame.y(hang.torque());
+      space.take(new Rectangle2D.Double(x - 7, y - 7, 14, 14));
+    }
+    HangLabels.draw(g, frame, chart);
     double breakaway = frame.y(chart.breakawayTorque());
     double zero = frame.x(0.0);
     g.setColor(Ink.LOAD);
@@ -155,6 +201,7 @@ public final class TorqueSpeedDrawing {
     for (TorqueSpeed.StepCurve step : chart.steps()) {
       at(words, space, step.label(), Ink.RING, along(frame, step.curve(), words, step.label()));
     }
+    running(frame, space, words, chart);
     Curve load = chart.load();
     List<Point2D> places = along(frame, load, words, "load, with its spread");
     at(words, space, "load, with its spread", Ink.TEXT, places);
@@ -179,36 +226,6 @@ public final class TorqueSpeedDrawing {
     space
         .place(words.width(text, Ink.SMALL), LINE, places)
         .ifPresent(p -> words.plate(text, Ink.SMALL, colour, p.getX(), p.getY() + 13));
-  }
-
-  /** Speeds in a column on the right, led to their circles: there they never meet a curve. */
-  private static void hangs(Graphics2D g, Frame frame, FreeSpace space, TorqueSpeed chart) {
-    List<TorqueSpeed.Hang> hangs =
-        chart.hangs().stream().sorted(java.util.Comparator.comparingDouble(h -> -h.rpm())).toList();
-    // the fastest on top: so no leader crosses another
-    double middle = hangs.stream().mapToDouble(h -> frame.y(h.torque())).average().orElse(0.0);
-    double first =
-        Math.min(
-            frame.area().getMaxY() - LINE * (hangs.size() - 1),
-            Math.max(frame.area().getY() + 26, middle - LINE * 0.5 * (hangs.size() - 1)));
-    double[] y = new double[hangs.size()];
-    for (int i = 0; i < y.length; i++) {
-      y[i] = first + LINE * i;
-    }
-    Words words = new Words(g);
-    double x = frame.area().getMaxX() + 14;
-    if (!hangs.isEmpty()) {
-      double top = y[0] - LINE;
-      words.left("hangs at", Ink.SMALL, Ink.QUIET, x, top);
-    }
-    for (int i = 0; i < hangs.size(); i++) {
-      TorqueSpeed.Hang hang = hangs.get(i);
-      g.setColor(Ink.QUIET);
-      g.setStroke(Ink.EDGE);
-      g.draw(
-          new Line2D.Double(frame.x(hang.rpm()) + CIRCLE, frame.y(hang.torque()), x - 3, y[i] - 4));
-      words.left(hang.step() + ": " + TorqueSpeed.rpm(hang), Ink.STRONG, Ink.DEVICE, x, y[i]);
-    }
   }
 
   private static void rated(Graphics2D g, Frame frame, TorqueSpeed chart) {

@@ -8,6 +8,7 @@ import java.util.OptionalDouble;
 import sliprung.protection.ProtectionEvaluator;
 import sliprung.review.PartText;
 import sliprung.review.Review;
+import sliprung.starter.Contactor;
 
 /**
  * How long a part stands a constant current from cold with the rotor at rest.
@@ -20,6 +21,11 @@ import sliprung.review.Review;
 public record Withstand(String label, double[] amps, double[] seconds) {
   private static final double STEPS_PER_DECADE = 60.0;
   private static final double LONGEST_SECONDS = 1e4;
+  private static final int TAG_LETTERS = 30;
+  private static final String CLOSED = ", closed";
+
+  /** Counted only while the rotor stands. */
+  static final String AT_REST = ", at rest";
 
   /** Copies. */
   public Withstand {
@@ -28,8 +34,8 @@ public record Withstand(String label, double[] amps, double[] seconds) {
   }
 
   /**
-   * Of a review: stator winding and cable, slip rings, rotor cable and sections, as far as their
-   * data are there.
+   * Of a review: windings, cables, slip rings, sections and contactors, as far as their data are
+   * there.
    *
    * @param ringPerStator ring amperes for a stator ampere at rest
    */
@@ -43,8 +49,12 @@ public record Withstand(String label, double[] amps, double[] seconds) {
     for (String part : List.of("stator", "stator-conductor")) {
       add(lines, PartText.words(part), amps, seconds(evaluator, part, amps, 1.0));
     }
-    for (String part : List.of("rings", "rotor-conductor")) {
-      add(lines, PartText.words(part), amps, seconds(evaluator, part, amps, ringPerStator));
+    for (String part : List.of("rotor", "rings", "rotor-conductor")) {
+      add(
+          lines,
+          PartText.words(part) + (part.equals("rotor-conductor") ? "" : AT_REST),
+          amps,
+          seconds(evaluator, part, amps, ringPerStator));
     }
     double share = ringPerStator * review.starter().resistors().sectionShare();
     Map<List<Double>, List<Integer>> alike = new LinkedHashMap<>();
@@ -57,7 +67,44 @@ public record Withstand(String label, double[] amps, double[] seconds) {
     alike.forEach(
         (seconds, numbers) ->
             add(lines, TimeCurrentSheet.named("section", numbers), amps, seconds));
+    contactors(review, evaluator, lines, amps, ringPerStator);
     return lines;
+  }
+
+  private static void contactors(
+      Review review,
+      ProtectionEvaluator evaluator,
+      List<Withstand> lines,
+      double[] amps,
+      double ringPerStator) {
+    Map<List<Double>, List<String>> alike = new LinkedHashMap<>();
+    for (Contactor contactor : review.starter().contactors()) {
+      boolean line = contactor.place() == Contactor.Place.LINE;
+      boolean used =
+          line
+              || review.starter().steps().stream()
+                  .anyMatch(s -> s.contactor().equals(contactor.tag()));
+      if (used) {
+        double share = line ? 1.0 : ringPerStator * ProtectionEvaluator.poleShare(contactor);
+        alike
+            .computeIfAbsent(
+                seconds(evaluator, contactor.tag(), amps, share), k -> new ArrayList<>())
+            .add(contactor.tag());
+      }
+    }
+    alike.forEach(
+        (seconds, tags) -> add(lines, Lines.cut(tags(tags), TAG_LETTERS) + CLOSED, amps, seconds));
+  }
+
+  private static String tags(List<String> tags) {
+    return tags.size() > 2
+        ? tags.get(0) + " to " + tags.get(tags.size() - 1)
+        : String.join(", ", tags);
+  }
+
+  /** Whether of contactors, which are drawn apart from what heats up by itself. */
+  boolean isSwitchgear() {
+    return label.endsWith(CLOSED);
   }
 
   /** Times at each current; empty where data are missing. */

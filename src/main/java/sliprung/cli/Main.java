@@ -23,6 +23,7 @@ public final class Main {
   static int run(String[] arguments, PrintWriter out, PrintWriter err, Terminal terminal) {
     CommandLine line = new CommandLine(new SliprungCommand());
     line.addSubcommand(new ReviewCommand(out, err, terminal));
+    line.addSubcommand(new DialsCommand(out, err, terminal));
     line.addSubcommand(new RulesCommand(out, err));
     line.addSubcommand(new CurvesCommand(out));
     line.setOut(out);

@@ -2,6 +2,7 @@ package sliprung.cli;
 
 import java.io.IOException;
 import java.io.PrintWriter;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.util.ArrayList;
@@ -54,16 +55,16 @@ final class ReviewCommand implements Callable<Integer> {
   private LocalDate date;
 
   @Option(
+      names = "--pdf",
+      description = "Write review.pdf too, for signing and filing; it takes a second or two more.")
+  private boolean withPdf;
+
+  @Option(
       names = "--paper",
       paramLabel = "SIZE",
       converter = PaperName.class,
-      description = "Paper of review.pdf: a4 (default) or letter.")
-  private Paper paper = Paper.A4;
-
-  @Option(
-      names = "--no-pdf",
-      description = "Leave review.pdf out, which takes about as long as all the rest.")
-  private boolean withoutPdf;
+      description = "Paper of review.pdf: a4 (default) or letter. Asks for --pdf by itself.")
+  private Paper paper;
 
   @Option(names = "--all", description = "Print every clear finding.")
   private boolean everything;
@@ -92,6 +93,10 @@ final class ReviewCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
+    if (directory == null && paperAsked().isPresent()) {
+      err.println("sliprung: a PDF is part of a record: give --out DIR");
+      return ExitStatus.WRONG_INPUT;
+    }
     List<StarterReading.Described> read = new ArrayList<>();
     if (!readAll(read)) {
       return ExitStatus.WRONG_INPUT;
@@ -110,7 +115,8 @@ final class ReviewCommand implements Callable<Integer> {
     for (Done one : done) {
       summary.print(one.review(), one.seconds());
       if (directory != null && failure.isEmpty()) {
-        summary.written(place(one).resolve("review.html").toString());
+        Path place = place(one);
+        summary.written(place.resolve("review.html").toString(), sheets(place));
       }
       status = ExitStatus.worse(status, one.review().exitStatus());
     }
@@ -134,9 +140,7 @@ final class ReviewCommand implements Callable<Integer> {
   private Optional<String> write(List<Done> done) {
     Map<Path, Map<String, byte[]>> records = new LinkedHashMap<>();
     for (Done one : done) {
-      records.put(
-          place(one),
-          RecordWriter.files(one.dossier(), Optional.of(paper).filter(p -> !withoutPdf)));
+      records.put(place(one), RecordWriter.files(one.dossier(), paperAsked()));
     }
     try {
       RecordWriter.write(records);
@@ -145,6 +149,21 @@ final class ReviewCommand implements Callable<Integer> {
       Path where = done.size() == 1 ? place(done.get(0)) : directory;
       return Optional.of(where + ": " + e.getMessage());
     }
+  }
+
+  /** Paper of the PDF; empty where nobody asked for one. */
+  private Optional<Paper> paperAsked() {
+    return Optional.ofNullable(paper).or(() -> withPdf ? Optional.of(Paper.A4) : Optional.empty());
+  }
+
+  /** What to say of the sheets for paper; an older one must not be taken for this record's. */
+  private String sheets(Path place) {
+    if (paperAsked().isPresent()) {
+      return "and review.pdf beside it";
+    }
+    return Files.exists(place.resolve("review.pdf"))
+        ? "the review.pdf beside it is of an earlier review: --pdf makes it anew"
+        : "--pdf makes it on paper too, to sign and file";
   }
 
   /** Reads every file before anything is computed or written; false after a mistake in any. */

@@ -174,9 +174,14 @@ final class Summary {
     return line.toString().replace('\u00a0', ' ');
   }
 
-  /** Where the record was written. */
-  void written(String place) {
+  /**
+   * Where the record was written.
+   *
+   * @param sheets what there is on paper
+   */
+  void written(String place, String sheets) {
     out.println("Record: " + Printable.of(place));
+    out.println("        (" + sheets + ")");
     out.println();
   }
 }

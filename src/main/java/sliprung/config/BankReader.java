@@ -34,7 +34,8 @@ final class BankReader {
             "leads",
             "tolerance",
             "hot-rise",
-            "enclosure");
+            "enclosure",
+            "fan");
     return new BankReader(bank).read();
   }
 
@@ -68,7 +69,15 @@ final class BankReader {
         bank.numberOr("leads", Dimension.RESISTANCE, Range.NOT_NEGATIVE, 0.0, "0 ohm"),
         bank.numberOr("tolerance", Dimension.SHARE, Range.SPREAD, 0.10, "10 %"),
         bank.numberOr("hot-rise", Dimension.SHARE, Range.NOT_NEGATIVE, 0.20, "20 %"),
-        bank.numberOr("enclosure", Dimension.TIME, Range.POSITIVE, 1200.0, "20 min"));
+        bank.numberOr("enclosure", Dimension.TIME, Range.POSITIVE, 1200.0, "20 min"),
+        bank.optional("fan").map(BankReader::fan));
+  }
+
+  private static ResistorBank.Fan fan(Field field) {
+    Section fan = field.section("continuous-without", "time-constant-without");
+    return new ResistorBank.Fan(
+        fan.optionalNumber("continuous-without", Dimension.SHARE, Range.FRACTION_PERCENT),
+        fan.optionalNumber("time-constant-without", Dimension.SHARE, Range.AT_LEAST_ALL));
   }
 
   private List<ResistorBank.Section> sections(boolean sameLimit) {

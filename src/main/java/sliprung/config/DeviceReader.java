@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.function.BiFunction;
 import java.util.stream.Stream;
 import sliprung.curve.CurveLibrary;
+import sliprung.quantity.Dimension;
 import sliprung.starter.Device;
 
 /** Reads one kind of device after the other of {@code protection}. */
@@ -26,7 +27,13 @@ final class DeviceReader {
   private record Kind(
       String[] keys, Device.Measurement usual, BiFunction<Section, Device.Fitting, Device> read) {}
 
-  DeviceReader(CurveLibrary library, DeviceSettings.PointCurves pointCurves) {
+  /**
+   * A reader.
+   *
+   * @param sectionCount of the bank; 0 where it could not be read
+   */
+  DeviceReader(CurveLibrary library, DeviceSettings.PointCurves pointCurves, int sectionCount) {
+    SupervisionSettings supervision = new SupervisionSettings(sectionCount);
     DeviceSettings settings = new DeviceSettings(library, pointCurves);
     Device.Measurement direct = Device.Measurement.DIRECT;
     Device.Measurement ct = Device.Measurement.CT;
@@ -91,6 +98,56 @@ final class DeviceReader {
         "blocked-above");
     kind("points", ct, settings::points, MEASURING, "curve", "rating");
     kind("standstill", direct, settings::standstill, List.of("kind", "trips"), "time");
+    kind("step-proof", direct, supervision::stepProof, List.of("kind", "trips"), "time");
+    kind(
+        "undervoltage",
+        direct,
+        supervision::undervoltage,
+        List.of("kind", "trips"),
+        "below",
+        "time",
+        "accuracy");
+    kind(
+        "temperature",
+        direct,
+        supervision::temperature,
+        List.of("kind", "trips", "place"),
+        "sections",
+        "limit",
+        "rise",
+        "air",
+        "lag",
+        "accuracy");
+  }
+
+  private static final Map<String, List<DialReader.Dial>> DIALS =
+      Map.ofEntries(
+          dials("overload", new DialReader.Dial("dial", Dimension.CURRENT)),
+          dials(
+              "inverse-time",
+              new DialReader.Dial("pick-up", Dimension.CURRENT),
+              new DialReader.Dial("time-multiplier", Dimension.NUMBER)),
+          dials("instantaneous", new DialReader.Dial("pick-up", Dimension.CURRENT)),
+          dials("sequence-timer", new DialReader.Dial("time", Dimension.TIME)),
+          dials(
+              "thermal",
+              new DialReader.Dial("base", Dimension.CURRENT),
+              new DialReader.Dial("time-constant", Dimension.TIME)),
+          dials(
+              "definite-time",
+              new DialReader.Dial("pick-up", Dimension.CURRENT),
+              new DialReader.Dial("time", Dimension.TIME)),
+          dials("standstill", new DialReader.Dial("time", Dimension.TIME)),
+          dials("step-proof", new DialReader.Dial("time", Dimension.TIME)),
+          dials("undervoltage", new DialReader.Dial("time", Dimension.TIME)),
+          dials(
+              "temperature",
+              new DialReader.Dial("limit", Dimension.TEMPERATURE),
+              new DialReader.Dial("rise", Dimension.TEMPERATURE_RISE)));
+
+  private static Map.Entry<String, List<DialReader.Dial>> dials(
+      String kind, DialReader.Dial... dials) {
+    return Map.entry(kind, List.of(dials));
   }
 
   private void kind(
@@ -99,7 +156,11 @@ final class DeviceReader {
       BiFunction<Section, Device.Fitting, Device> read,
       List<String> common,
       String... own) {
-    String[] keys = Stream.concat(common.stream(), Arrays.stream(own)).toArray(String[]::new);
+    Stream<String> dials =
+        DIALS.containsKey(name) ? Arrays.stream(DialReader.KEYS) : Stream.empty();
+    String[] keys =
+        Stream.concat(Stream.concat(common.stream(), Arrays.stream(own)), dials)
+            .toArray(String[]::new);
     kinds.put(name, new Kind(keys, usual, read));
   }
 
@@ -142,8 +203,10 @@ final class DeviceReader {
       return Optional.empty();
     }
     Section section = field.section(kind.keys());
-    return Optional.ofNullable(
-        kind.read().apply(section, fitting(field.key(), section, kind, switchgear)));
+    Device read = kind.read().apply(section, fitting(field.key(), section, kind, switchgear));
+    DialReader.read(
+        section, "protection." + Wording.clip(field.key()), DIALS.getOrDefault(name, List.of()));
+    return Optional.ofNullable(read);
   }
 
   private static Device.Fitting fitting(
@@ -161,7 +224,11 @@ final class DeviceReader {
     }
     List<String> keys = List.of(kind.keys());
     Device.Place place = Device.Place.STATOR;
-    if (keys.contains("place")) {
+    if (keys.contains("lag")) {
+      // a sensor on elements sits in the bank and nowhere else
+      section.optional("place").ifPresent(f -> f.choice(Map.of("bank", Device.Place.BANK)));
+      place = Device.Place.BANK;
+    } else if (keys.contains("place")) {
       place =
           section.choiceOr(
               "place",

@@ -31,6 +31,12 @@ record Range(double low, boolean lowIncluded, double high, boolean highIncluded,
   static final Range DIFFERENCE =
       new Range(-1.0, false, 10.0, true, "above -100 % and at most 1000 %");
 
+  /** Of what only grows, in per cent. */
+  static final Range AT_LEAST_ALL = new Range(1.0, true, 100.0, true, "from 100 % to 10 000 %");
+
+  /** Of a resistor element. */
+  static final Range ELEMENT = new Range(0.0, false, 1200.0, true, "above 0 °C up to 1200 °C");
+
   static final Range TEMPERATURE = new Range(-90.0, true, 200.0, true, "from -90 °C to 200 °C");
 
   boolean contains(double value) {

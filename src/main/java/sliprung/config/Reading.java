@@ -12,6 +12,7 @@ import java.util.Set;
 import java.util.TreeMap;
 import java.util.TreeSet;
 import sliprung.starter.Assumption;
+import sliprung.starter.DialScale;
 
 /** What one reading of a file gathers: mistakes, places, defaults filled in. */
 final class Reading {
@@ -22,6 +23,7 @@ final class Reading {
   private final Map<String, ReadValue> values = new LinkedHashMap<>();
   private final List<Assumption> assumptions = new ArrayList<>();
   private final List<String> notYetJudged = new ArrayList<>();
+  private final Map<String, DialScale> dialScales = new TreeMap<>();
   private OptionalDouble supplyHertz = OptionalDouble.empty();
   private boolean readsCycles = false;
 
@@ -65,6 +67,20 @@ final class Reading {
 
   void notYetJudged(String path) {
     notYetJudged.add(path);
+  }
+
+  /** The number that was read at a path; empty where there is none or it was a mistake. */
+  OptionalDouble number(String path) {
+    ReadValue read = values.get(path);
+    return read == null ? OptionalDouble.empty() : read.value();
+  }
+
+  void dialScale(String dial, DialScale scale) {
+    dialScales.put(dial, scale);
+  }
+
+  Map<String, DialScale> dialScales() {
+    return dialScales;
   }
 
   /** From now on times may be given in cycles; NaN: the supply frequency was a mistake. */

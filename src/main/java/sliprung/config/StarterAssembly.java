@@ -136,7 +136,9 @@ final class StarterAssembly {
         root.optional("method").flatMap(f -> f.choice(METHODS)).orElse(Starter.Method.AUTO);
     double timerSpread = root.numberOr("timer-spread", Dimension.SHARE, Range.SPREAD, 0.05, "5 %");
     double levelSpread = root.numberOr("level-spread", Dimension.SHARE, Range.SPREAD, 0.10, "10 %");
-    List<Device> devices = new DeviceReader(library, this::pointCurve).read(root, switchgear);
+    List<Device> devices =
+        new DeviceReader(library, this::pointCurve, resistors.sections().size())
+            .read(root, switchgear);
     PlantReader plant = new PlantReader(root);
     Section conductors = plant.conductors();
     Optional<Conductor> stator = PlantReader.conductor(conductors, "stator");
@@ -182,7 +184,8 @@ final class StarterAssembly {
             accepted,
             reading.assumptions(),
             reading.notYetJudged(),
-            method));
+            method,
+            reading.dialScales()));
   }
 
   /** One tag, one thing: findings name their subject by its tag. */

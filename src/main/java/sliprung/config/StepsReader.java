@@ -14,6 +14,14 @@ final class StepsReader {
   private static final List<String> RULES =
       List.of("after", "stator-below", "rotor-below", "rotor-frequency-below");
 
+  private static final List<DialReader.Dial> DIALS =
+      List.of(
+          new DialReader.Dial("after", Dimension.TIME),
+          new DialReader.Dial("stator-below", Dimension.CURRENT),
+          new DialReader.Dial("rotor-below", Dimension.CURRENT),
+          new DialReader.Dial("rotor-frequency-below", Dimension.FREQUENCY),
+          new DialReader.Dial("at-least", Dimension.TIME));
+
   private final Switchgear switchgear;
   private final Map<String, Field> used = new HashMap<>();
 
@@ -56,7 +64,11 @@ final class StepsReader {
             "stator-below",
             "rotor-below",
             "rotor-frequency-below",
-            "at-least");
+            "at-least",
+            "dial-range",
+            "dial-step",
+            "dial-error",
+            "dials");
     String contactor = contactor(step);
     List<String> given = RULES.stream().filter(step::has).toList();
     if (given.size() != 1 && !step.isSilent()) {
@@ -79,6 +91,7 @@ final class StepsReader {
     for (String key : given) {
       rule = rule(step.optional(key).get(), key);
     }
+    DialReader.read(step, "steps." + contactor, DIALS);
     return new Step(contactor, rule, atLeast);
   }
 

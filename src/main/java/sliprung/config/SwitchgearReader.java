@@ -67,7 +67,8 @@ final class SwitchgearReader {
             "closing",
             "opening",
             "coordination",
-            "intermittent-class");
+            "intermittent-class",
+            "breaking");
     Optional<Contactor.Place> place =
         contactor.choice(
             "place", Words.inOrder("line", Contactor.Place.LINE, "rotor", Contactor.Place.ROTOR));
@@ -99,7 +100,8 @@ final class SwitchgearReader {
         contactor.numberOr("closing", Dimension.TIME, Range.NOT_NEGATIVE, 0.060, "60 ms"),
         contactor.numberOr("opening", Dimension.TIME, Range.NOT_NEGATIVE, 0.060, "60 ms"),
         coordination(contactor),
-        contactor.optionalNumber("intermittent-class", Dimension.NUMBER, Range.POSITIVE));
+        contactor.optionalNumber("intermittent-class", Dimension.NUMBER, Range.POSITIVE),
+        contactor.optionalNumber("breaking", Dimension.CURRENT, Range.POSITIVE));
   }
 
   private static Map<String, Double> ratings(Section contactor) {

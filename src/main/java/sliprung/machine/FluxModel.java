@@ -29,6 +29,8 @@ public final class FluxModel {
   /** Index of the speed, rad/s, in a state. */
   public static final int SPEED = 4;
 
+  private static final double ROOT_TWO = Math.sqrt(2.0);
+
   private final double ratio;
   private final double volts;
   private final double electricalSpeed;
@@ -111,14 +113,19 @@ public final class FluxModel {
     return ratio * (ls * state[3] - lm * state[1]) / determinant;
   }
 
+  /** Without the care for extremes that costs more than everything around it. */
+  private static double magnitude(double real, double imaginary) {
+    return Math.sqrt(real * real + imaginary * imaginary);
+  }
+
   /** Magnitude of the stator current over √2, A. */
   public double statorAmps(double[] state) {
-    return Math.hypot(statorReal(state), statorImaginary(state)) / Math.sqrt(2.0);
+    return magnitude(statorReal(state), statorImaginary(state)) / ROOT_TWO;
   }
 
   /** Magnitude of the ring current over √2, A. */
   public double ringAmps(double[] state) {
-    return Math.hypot(ringReal(state), ringImaginary(state)) / Math.sqrt(2.0);
+    return magnitude(ringReal(state), ringImaginary(state)) / ROOT_TWO;
   }
 
   /**
@@ -134,7 +141,7 @@ public final class FluxModel {
     double dqdt = (lr * rate[1] - lm * rate[3]) / determinant;
     double ud = volts - sourceInductance * (didt - electricalSpeed * isq);
     double uq = -sourceInductance * (dqdt + electricalSpeed * isd);
-    return new Terminals(Math.sqrt(1.5) * Math.hypot(ud, uq), 1.5 * (ud * isd + uq * isq));
+    return new Terminals(Math.sqrt(1.5) * magnitude(ud, uq), 1.5 * (ud * isd + uq * isq));
   }
 
   /**
@@ -150,6 +157,41 @@ public final class FluxModel {
     double stator = statorReal(state) * state[0] + statorImaginary(state) * state[1];
     double rotor = (ringReal(state) * state[2] + ringImaginary(state) * state[3]) / ratio;
     return 0.75 * (stator + rotor);
+  }
+
+  /**
+   * Time constant in s with which the rotor's flux dies while the stator is open: {@code Tdo = (X2
+   * + Xm)/(ω·R)}, R of the whole rotor circuit.
+   */
+  public double openCircuitSeconds() {
+    return lr / r;
+  }
+
+  /**
+   * The stator, cut off from a state and left open for a while, the angle to the supply counted
+   * anew from the beginning: the rotor keeps its flux at the cut and lets it die with {@link
+   * #openCircuitSeconds()}; the stator is linked with what of it crosses the gap.
+   *
+   * @param state at the cut
+   * @param seconds open, 0 or more
+   * @param speed at the end of it, rad/s
+   * @param angle by which the flux has turned against the supply, rad
+   */
+  public double[] openedFrom(double[] state, double seconds, double speed, double angle) {
+    double left = Math.exp(-seconds / openCircuitSeconds());
+    double d = left * (state[2] * Math.cos(angle) - state[3] * Math.sin(angle));
+    double q = left * (state[2] * Math.sin(angle) + state[3] * Math.cos(angle));
+    double crosses = lm / lr;
+    return new double[] {crosses * d, crosses * q, d, q, speed};
+  }
+
+  /**
+   * Residual voltage at the open stator, RMS line to line, V: {@code √(3/2)·(Lm/Lr)·|−R/Lr +
+   * jpω|·|ψr|}.
+   */
+  public double residualVolts(double[] opened) {
+    double rate = magnitude(r / lr, polePairs * opened[SPEED]);
+    return Math.sqrt(1.5) * lm / lr * rate * magnitude(opened[2], opened[3]);
   }
 
   /** The settled state at a constant speed, rad/s. */

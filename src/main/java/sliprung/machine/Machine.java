@@ -99,9 +99,21 @@ public final class Machine {
         3.0 * i1Squared * re);
   }
 
-  /** Air-gap torque alone, N·m; the arguments are those of {@link #at}. */
+  /**
+   * Air-gap torque alone, N·m; the arguments are those of {@link #at}. An integrator asks for
+   * nothing else, and often: no root is drawn.
+   */
   public double torque(Source source, double externalOhms, double slip) {
-    return at(source, externalOhms, slip).torque();
+    double s = Math.abs(slip) < 1e-12 ? Math.copySign(1e-12, slip) : slip;
+    double y = referredResistance(externalOhms) / s;
+    double xm = circuit.xm();
+    double x22 = circuit.x2() + xm;
+    double d = y * y + x22 * x22;
+    double re = circuit.r1() + xm * xm * y / d;
+    double im = circuit.x1() + source.reactance() + xm * (y * y + circuit.x2() * x22) / d;
+    double volts = source.volts();
+    // 3 |I2'|² y / ω with |I1|² = U²/3/(re² + im²)
+    return volts * volts / (re * re + im * im) * (xm * xm / d) * y / synchronousSpeed;
   }
 
   /**

@@ -32,6 +32,17 @@ final class DormandPrinceTableau {
       }
       return sum;
     }
+
+    /** Adds the sum times a factor to a vector, stage by stage. */
+    void addTo(double[] into, double factor, double[][] k) {
+      for (int j = 0; j < stages.length; j++) {
+        double weight = factor * weights[j];
+        double[] stage = k[stages[j]];
+        for (int i = 0; i < into.length; i++) {
+          into[i] += weight * stage[i];
+        }
+      }
+    }
   }
 
   private static Row row(int[] stages, double... weights) {

@@ -1,25 +1,43 @@
 package sliprung.numeric;
 
+import java.util.Arrays;
 import java.util.function.DoubleUnaryOperator;
-import org.apache.commons.math3.ode.FirstOrderDifferentialEquations;
-import org.apache.commons.math3.ode.events.EventHandler;
-import org.apache.commons.math3.ode.nonstiff.DormandPrince853Integrator;
-import org.apache.commons.math3.ode.sampling.StepHandler;
-import org.apache.commons.math3.ode.sampling.StepInterpolator;
 
 /**
  * Integration of one autonomous equation {@code dy/dt = f(y)} until a time or until a function of y
- * crosses zero: Dormand and Prince's method of order 8 with dense output (Hairer, Nørsett, Wanner,
- * Solving Ordinary Differential Equations I, section II.5, from memory), from Commons Math.
+ * crosses zero: the method of {@link SystemFlow} for a single number, without its arrays. A review
+ * takes thousands of these, a sampling tens of thousands.
  */
 public final class Flow {
   /** Simpson pieces to each step of the integrator. */
-  private static final int PIECES = 8;
+  private static final int PIECES = 3;
 
-  private static final double RELATIVE = 1e-12;
+  private static final double RELATIVE = 1e-10;
   private static final double LEAST_STEP = 1e-13;
+  private static final double SAFETY = 0.9;
+  private static final double GROWS_MOST = 6.0;
+  private static final double SHRINKS_MOST = 0.333;
+  private static final double ORDER = 8.0;
+  private static final int LAST = DormandPrinceTableau.STAGES;
 
-  private Flow() {}
+  private final DoubleUnaryOperator derivative;
+  private final double scale;
+  private final double[] k = new double[DormandPrinceTableau.ALL];
+  private final double[] terms = new double[7];
+  private double[] times = new double[128];
+  private double[] values = new double[128];
+  private int count;
+  private double time;
+  private double y;
+  private double next;
+
+  private Flow(DoubleUnaryOperator derivative, double scale, double fromTime, double fromValue) {
+    this.derivative = derivative;
+    this.scale = scale;
+    this.time = fromTime;
+    this.y = fromValue;
+    add(fromTime, fromValue);
+  }
 
   /**
    * Samples of a solution: an odd number, each even-numbered pair of neighbours with its midpoint
@@ -50,7 +68,8 @@ public final class Flow {
    * @param fromTime start
    * @param fromValue y there
    * @param toTime latest end, after the start
-   * @param stops functions of y; the first to change its sign ends the integration
+   * @param stops functions of y; the first to change its sign ends the integration; one that begins
+   *     at zero counts from the sign it takes
    */
   public static Samples run(
       DoubleUnaryOperator derivative,
@@ -59,111 +78,157 @@ public final class Flow {
       double fromValue,
       double toTime,
       DoubleUnaryOperator... stops) {
-    double span = toTime - fromTime;
-    DormandPrince853Integrator integrator =
-        new DormandPrince853Integrator(
-            Math.min(LEAST_STEP, span / 2.0), span, RELATIVE * scale, RELATIVE);
-    Recorder recorder = new Recorder(fromTime, fromValue);
-    integrator.addStepHandler(recorder);
-    int[] crossed = {-1};
+    return new Flow(derivative, scale, fromTime, fromValue).run(toTime, stops);
+  }
+
+  private Samples run(double toTime, DoubleUnaryOperator[] stops) {
+    k[0] = derivative.applyAsDouble(y);
+    double[] before = new double[stops.length];
     for (int i = 0; i < stops.length; i++) {
-      integrator.addEventHandler(
-          new Crossing(stops[i], i, crossed), span, Math.max(1e-12, 1e-12 * span), 200);
+      before[i] = stops[i].applyAsDouble(y);
     }
-    double[] y = {fromValue};
-    integrator.integrate(
-        new FirstOrderDifferentialEquations() {
-          @Override
-          public int getDimension() {
-            return 1;
+    double step = Math.min(firstStep(), toTime - time);
+    boolean rejected = false;
+    while (time < toTime) {
+      boolean last = time + 1.01 * step >= toTime;
+      double h = last ? toTime - time : step;
+      double error = attempt(h);
+      double change = Math.pow(error, 1.0 / ORDER) / SAFETY;
+      if (error > 1.0 && h > LEAST_STEP) {
+        step = h / Math.min(1.0 / SHRINKS_MOST, change);
+        rejected = true;
+        continue;
+      }
+      double to = last ? toTime : time + h;
+      prepareDense(h);
+      double end = Double.POSITIVE_INFINITY;
+      int crossed = -1;
+      for (int i = 0; i < stops.length; i++) {
+        double after = stops[i].applyAsDouble(next);
+        if (before[i] != 0.0 && Math.signum(before[i]) != Math.signum(after)) {
+          double at = crossing(stops[i], h, to, before[i]);
+          if (at < end) {
+            end = at;
+            crossed = i;
           }
-
-          @Override
-          public void computeDerivatives(double t, double[] state, double[] rate) {
-            rate[0] = derivative.applyAsDouble(state[0]);
-          }
-        },
-        fromTime,
-        y,
-        toTime,
-        y);
-    return new Samples(recorder.times(), recorder.values(), crossed[0]);
+        }
+        before[i] = after;
+      }
+      sample(h, crossed < 0 ? to : end, crossed < 0);
+      if (crossed >= 0) {
+        return samples(crossed);
+      }
+      time = to;
+      y = next;
+      k[0] = k[LAST];
+      double growth = 1.0 / Math.max(1.0 / GROWS_MOST, Math.min(1.0 / SHRINKS_MOST, change));
+      step = h * (rejected ? Math.min(1.0, growth) : growth);
+      rejected = false;
+    }
+    return samples(-1);
   }
 
-  private static final class Crossing implements EventHandler {
-    private final DoubleUnaryOperator function;
-    private final int index;
-    private final int[] crossed;
+  private double tolerance() {
+    return RELATIVE * Math.max(scale, Math.abs(y));
+  }
 
-    Crossing(DoubleUnaryOperator function, int index, int[] crossed) {
-      this.function = function;
-      this.index = index;
-      this.crossed = crossed;
+  /** Hairer, Nørsett, Wanner, section II.4: by the sizes of y, of f and of its change. */
+  private double firstStep() {
+    double tolerance = tolerance();
+    double d0 = Math.abs(y) / tolerance;
+    double d1 = Math.abs(k[0]) / tolerance;
+    double h0 = d0 < 1e-5 || d1 < 1e-5 ? 1e-6 : 0.01 * d0 / d1;
+    double d2 = Math.abs(derivative.applyAsDouble(y + h0 * k[0]) - k[0]) / tolerance / h0;
+    double most = Math.max(d1, d2);
+    double h1 = most <= 1e-15 ? Math.max(1e-6, h0 * 1e-3) : Math.pow(0.01 / most, 1.0 / ORDER);
+    return Math.max(LEAST_STEP, Math.min(100.0 * h0, h1));
+  }
+
+  private double sum(DormandPrinceTableau.Row row) {
+    int[] stages = row.stages();
+    double[] weights = row.weights();
+    double sum = 0.0;
+    for (int j = 0; j < stages.length; j++) {
+      sum += weights[j] * k[stages[j]];
     }
+    return sum;
+  }
 
-    @Override
-    public void init(double t0, double[] y0, double t) {
-      // nothing to prepare: the function has no memory
+  /** Takes a step into {@code next}; its error over the tolerance. */
+  private double attempt(double h) {
+    for (int stage = 1; stage < LAST; stage++) {
+      k[stage] = derivative.applyAsDouble(y + h * sum(DormandPrinceTableau.A[stage]));
     }
+    next = y + h * sum(DormandPrinceTableau.A[LAST]);
+    k[LAST] = derivative.applyAsDouble(next);
+    double tolerance = tolerance();
+    double e5 = sum(DormandPrinceTableau.E5) / tolerance;
+    double e3 = sum(DormandPrinceTableau.E3) / tolerance;
+    double both = e5 * e5 + 0.01 * e3 * e3;
+    return both <= 0.0 ? 0.0 : h * e5 * e5 / Math.sqrt(both);
+  }
 
-    @Override
-    public double g(double t, double[] y) {
-      return function.applyAsDouble(y[0]);
+  private void prepareDense(double h) {
+    for (int stage = LAST + 1; stage < DormandPrinceTableau.ALL; stage++) {
+      k[stage] = derivative.applyAsDouble(y + h * sum(DormandPrinceTableau.A[stage]));
     }
-
-    @Override
-    public Action eventOccurred(double t, double[] y, boolean increasing) {
-      crossed[0] = index;
-      return Action.STOP;
-    }
-
-    @Override
-    public void resetState(double t, double[] y) {
-      // the state goes on unchanged
+    double change = next - y;
+    double first = h * k[0];
+    terms[0] = change;
+    terms[1] = first - change;
+    terms[2] = 2.0 * change - h * (k[LAST] + k[0]);
+    for (int j = 0; j < DormandPrinceTableau.D.length; j++) {
+      terms[3 + j] = h * sum(DormandPrinceTableau.D[j]);
     }
   }
 
-  private static final class Recorder implements StepHandler {
-    private double[] times = new double[256];
-    private double[] values = new double[256];
-    private int count;
-
-    Recorder(double time, double value) {
-      add(time, value);
+  /** The solution at a share of the step. */
+  private double dense(double x) {
+    double sum = 0.0;
+    for (int j = terms.length - 1; j >= 0; j--) {
+      sum = (sum + terms[j]) * (j % 2 == 0 ? x : 1.0 - x);
     }
+    return y + sum;
+  }
 
-    private void add(double time, double value) {
-      if (count == times.length) {
-        times = java.util.Arrays.copyOf(times, 2 * count);
-        values = java.util.Arrays.copyOf(values, 2 * count);
+  /** Halves until the doubles run out; the later side, where the function has crossed. */
+  private double crossing(DoubleUnaryOperator stop, double h, double to, double before) {
+    double sign = Math.signum(before);
+    double a = time;
+    double b = to;
+    for (int i = 0; i < 100; i++) {
+      double middle = 0.5 * (a + b);
+      if (middle <= a || middle >= b) {
+        break;
       }
-      times[count] = time;
-      values[count++] = value;
-    }
-
-    @Override
-    public void init(double t0, double[] y0, double t) {
-      // the first sample is already there
-    }
-
-    @Override
-    public void handleStep(StepInterpolator interpolator, boolean isLast) {
-      double from = interpolator.getPreviousTime();
-      double to = interpolator.getCurrentTime();
-      int parts = 2 * PIECES;
-      for (int i = 1; i <= parts; i++) {
-        double t = i == parts ? to : from + (to - from) * i / parts;
-        interpolator.setInterpolatedTime(t);
-        add(t, interpolator.getInterpolatedState()[0]);
+      if (Math.signum(stop.applyAsDouble(dense((middle - time) / h))) == sign) {
+        a = middle;
+      } else {
+        b = middle;
       }
     }
+    return b;
+  }
 
-    double[] times() {
-      return java.util.Arrays.copyOf(times, count);
+  private void sample(double h, double end, boolean whole) {
+    int parts = 2 * PIECES;
+    for (int i = 1; i <= parts; i++) {
+      boolean atEnd = i == parts;
+      double t = atEnd ? end : time + (end - time) * i / parts;
+      add(t, atEnd && whole ? next : dense((t - time) / h));
     }
+  }
 
-    double[] values() {
-      return java.util.Arrays.copyOf(values, count);
+  private void add(double at, double value) {
+    if (count == times.length) {
+      times = Arrays.copyOf(times, 2 * count);
+      values = Arrays.copyOf(values, 2 * count);
     }
+    times[count] = at;
+    values[count++] = value;
+  }
+
+  private Samples samples(int crossed) {
+    return new Samples(Arrays.copyOf(times, count), Arrays.copyOf(values, count), crossed);
   }
 }

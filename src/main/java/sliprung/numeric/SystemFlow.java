@@ -53,6 +53,9 @@ public final class SystemFlow {
 
   /** The solution within a step. */
   public interface Dense {
+    /** Writes y at a time of the step. */
+    void at(double time, double[] into);
+
     /** y at a time of the step, in an array of the caller's own. */
     double[] at(double time);
   }
@@ -173,9 +176,8 @@ public final class SystemFlow {
   }
 
   private void take(DormandPrinceTableau.Row row, double h, double[] into) {
-    for (int i = 0; i < n; i++) {
-      into[i] = y[i] + h * row.of(k, i);
-    }
+    System.arraycopy(y, 0, into, 0, n);
+    row.addTo(into, h, k);
   }
 
   private DenseStep dense(double from, double h) {
@@ -190,9 +192,9 @@ public final class SystemFlow {
       terms[0][i] = change;
       terms[1][i] = first - change;
       terms[2][i] = 2.0 * change - h * (k[DormandPrinceTableau.STAGES][i] + k[0][i]);
-      for (int j = 0; j < DormandPrinceTableau.D.length; j++) {
-        terms[3 + j][i] = h * DormandPrinceTableau.D[j].of(k, i);
-      }
+    }
+    for (int j = 0; j < DormandPrinceTableau.D.length; j++) {
+      DormandPrinceTableau.D[j].addTo(terms[3 + j], h, k);
     }
     return new DenseStep(from, h, y.clone(), terms);
   }
@@ -201,16 +203,24 @@ public final class SystemFlow {
       implements Dense {
     @Override
     public double[] at(double time) {
-      double x = (time - from) / length;
       double[] result = new double[state.length];
-      for (int i = 0; i < result.length; i++) {
-        double sum = 0.0;
-        for (int j = terms.length - 1; j >= 0; j--) {
-          sum = (sum + terms[j][i]) * (j % 2 == 0 ? x : 1.0 - x);
-        }
-        result[i] = state[i] + sum;
-      }
+      at(time, result);
       return result;
+    }
+
+    @Override
+    public void at(double time, double[] into) {
+      double x = (time - from) / length;
+      double rest = 1.0 - x;
+      for (int i = 0; i < into.length; i++) {
+        double sum = terms[6][i] * x;
+        sum = (sum + terms[5][i]) * rest;
+        sum = (sum + terms[4][i]) * x;
+        sum = (sum + terms[3][i]) * rest;
+        sum = (sum + terms[2][i]) * x;
+        sum = (sum + terms[1][i]) * rest;
+        into[i] = state[i] + (sum + terms[0][i]) * x;
+      }
     }
   }
 

@@ -42,8 +42,7 @@ public final class Bands {
   }
 
   private static EdgeModel model(Device device, Edge edge, Starter starter) {
-    return device.fold(
-        new EdgeModels(edge, starter.timerSpread(), starter.ambient().panelCelsius()));
+    return device.fold(new EdgeModels(edge, starter));
   }
 
   /** Empty, or why that edge of a device cannot be computed at all. */
@@ -67,13 +66,13 @@ public final class Bands {
 
   /**
    * The least constant current in A that ever operates an edge, to 1e-9; empty where there is none
-   * up to a hundred thousand amperes or it cannot be told. A rotation sensor and a sequence timer
-   * have no level in amperes: they measure rest and time.
+   * up to a hundred thousand amperes or it cannot be told. What measures something else, such as a
+   * rotation sensor or a sequence timer, has no level in amperes.
    */
   public OptionalDouble pickUpAmps(Device device, Edge edge) {
-    boolean seesCurrent =
-        !(device instanceof Device.Standstill) && !(device instanceof Device.SequenceTimer);
-    return seesCurrent ? pickUpAmps(model(device, edge, starter)) : OptionalDouble.empty();
+    return device.measuresCurrent()
+        ? pickUpAmps(model(device, edge, starter))
+        : OptionalDouble.empty();
   }
 
   /** The same of a model. */

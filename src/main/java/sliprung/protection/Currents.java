@@ -96,6 +96,20 @@ final class Currents {
                 (trace, sample) -> true));
   }
 
+  /** Rated over present voltage at the starter, above 1 in a dip; a dead line is not computed. */
+  Waveform reciprocalVoltage(double ratedVolts) {
+    return Waveform.of(
+        history,
+        trace -> {
+          double[] values = new double[trace.size()];
+          for (int i = 0; i < values.length; i++) {
+            values[i] = ratedVolts / trace.terminalVolts()[i];
+          }
+          return values;
+        },
+        (trace, sample) -> true);
+  }
+
   private Waveform masked(Waveform waveform, Channel.Share share) {
     List<Stage> stages = history.everything();
     double[] shares = new double[stages.size()];

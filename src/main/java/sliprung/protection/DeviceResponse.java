@@ -12,9 +12,7 @@ import java.util.OptionalDouble;
  * @param useAtRunUp greatest share up to the end of the run-up; of a fault, of the whole history
  * @param operatesAtSeconds from line closing; infinite: never
  * @param clearsAtSeconds operation and opening of what it trips; infinite: never
- * @param currentMargin factor on the start's current (not the preload) at which it would operate;
- *     permitted starts at the fast edge only; infinite where no factor up to 100 operates it
- * @param stretchMargin factor on the start's time axis at which it would operate; likewise
+ * @param margins how far from operating; permitted starts at the fast edge only
  * @param bound empty, or why an operation found here is only a bound and not proven (a fuse between
  *     its non-fusing current and its first gate)
  * @param notJudged empty, or why this edge cannot be computed; then the figures mean nothing
@@ -26,10 +24,23 @@ public record DeviceResponse(
     double useAtRunUp,
     double operatesAtSeconds,
     double clearsAtSeconds,
-    OptionalDouble currentMargin,
-    OptionalDouble stretchMargin,
+    Optional<StartMargins> margins,
     Optional<String> bound,
     Optional<String> notJudged) {
+
+  /** {@link StartMargins#current}; empty where there is none. */
+  public OptionalDouble currentMargin() {
+    return margins.isPresent()
+        ? OptionalDouble.of(margins.get().current())
+        : OptionalDouble.empty();
+  }
+
+  /** {@link StartMargins#stretch}; empty where there is none. */
+  public OptionalDouble stretchMargin() {
+    return margins.isPresent()
+        ? OptionalDouble.of(margins.get().stretch())
+        : OptionalDouble.empty();
+  }
 
   /** Whether it operates. */
   public boolean operates() {
@@ -45,8 +56,7 @@ public record DeviceResponse(
         Double.NaN,
         Double.POSITIVE_INFINITY,
         Double.POSITIVE_INFINITY,
-        OptionalDouble.empty(),
-        OptionalDouble.empty(),
+        Optional.empty(),
         Optional.empty(),
         Optional.of(why));
   }

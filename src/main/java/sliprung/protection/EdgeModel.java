@@ -40,15 +40,13 @@ interface EdgeModel {
    * What one edge does.
    *
    * @param passage use and operation
-   * @param currentMargin as in {@link DeviceResponse}
-   * @param stretchMargin as in {@link DeviceResponse}
+   * @param margins as in {@link DeviceResponse}
    * @param bound as in {@link DeviceResponse}
    * @param notJudged as in {@link DeviceResponse}
    */
   record EdgeOutcome(
       Passage passage,
-      OptionalDouble currentMargin,
-      OptionalDouble stretchMargin,
+      Optional<StartMargins> margins,
       Optional<String> bound,
       Optional<String> notJudged) {
 
@@ -56,8 +54,7 @@ interface EdgeModel {
     static EdgeOutcome notJudged(String why) {
       return new EdgeOutcome(
           new Passage(Double.NaN, Double.NaN, Double.POSITIVE_INFINITY),
-          OptionalDouble.empty(),
-          OptionalDouble.empty(),
+          Optional.empty(),
           Optional.empty(),
           Optional.of(why));
     }

@@ -1,5 +1,6 @@
 package sliprung.protection;
 
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import java.util.function.Supplier;
@@ -11,6 +12,7 @@ import sliprung.curve.PointEdge;
 import sliprung.curve.TimeCurrentEdge;
 import sliprung.quantity.Show;
 import sliprung.starter.Device;
+import sliprung.starter.Starter;
 
 /** Makes the model of one edge of every kind of device. */
 final class EdgeModels implements Device.Cases<EdgeModel> {
@@ -24,20 +26,17 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
   private static final double SENSOR_SHARE = 0.01;
 
   private final Edge edge;
-  private final double timerSpread;
-  private final double panelCelsius;
+  private final Starter starter;
 
   /**
    * Models of an edge.
    *
    * @param edge which relay of its set
-   * @param timerSpread of every timer, per unit
-   * @param panelCelsius air around the relays
+   * @param starter with its timers' spread, the air around the relays, its bank and supply
    */
-  EdgeModels(Edge edge, double timerSpread, double panelCelsius) {
+  EdgeModels(Edge edge, Starter starter) {
     this.edge = edge;
-    this.timerSpread = timerSpread;
-    this.panelCelsius = panelCelsius;
+    this.starter = starter;
   }
 
   /** A value at this edge: smaller at the fast, larger at the slow. */
@@ -51,6 +50,11 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
 
   @Override
   public EdgeModel fuse(Device.Fuse device) {
+    if (!Device.Fuse.gatesHoldAt(starter.supply().voltage())) {
+      return new UnknownModel(
+          "the gates of a low-voltage fuse end at 1\u00a0000\u00a0V; the fuse that is there needs its"
+              + " own curve as points");
+    }
     if (device.gates().isPresent()) {
       FuseGates gates = device.gates().get();
       return switch (edge) {
@@ -94,7 +98,7 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
 
   @Override
   public EdgeModel overload(Device.Overload device) {
-    OverloadRelays relays = new OverloadRelays(device, panelCelsius);
+    OverloadRelays relays = new OverloadRelays(device, starter.ambient().panelCelsius());
     if (edge != Edge.SLOW && !relays.hasShortestTime()) {
       return new UnknownModel(
           "trip class " + device.tripClass().name() + " has no shortest time: needs a curve");
@@ -139,7 +143,7 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
   @Override
   public EdgeModel definiteTime(Device.DefiniteTime device) {
     double pickUp = spread(device.pickUpAmps(), device.accuracy().pickUp());
-    double seconds = spread(device.seconds(), timerSpread);
+    double seconds = spread(device.seconds(), timer());
     double dropOff = edge == Edge.FAST ? DROP_OFF * pickUp : pickUp;
     return measuring(
         device,
@@ -180,18 +184,58 @@ final class EdgeModels implements Device.Cases<EdgeModel> {
 
   @Override
   public EdgeModel sequenceTimer(Device.SequenceTimer device) {
-    return new SequenceTimerModel(device, spread(1.0, timerSpread));
+    return new SequenceTimerModel(device, spread(1.0, timer()));
   }
 
   @Override
   public EdgeModel standstill(Device.Standstill device) {
-    double seconds = spread(device.seconds(), timerSpread);
+    double seconds = spread(device.seconds(), timer());
     double below = edge == Edge.FAST ? SENSOR_SHARE : 0.0;
     return new MeasuringModel(
         currents -> currents.standing(below),
         preload -> 0.0,
         before -> new TimerMeter(0.5, 0.5, seconds),
         Margin.COARSE);
+  }
+
+  @Override
+  public EdgeModel stepProof(Device.StepProof device) {
+    return new StepProofModel(starter, spread(device.seconds(), timer()));
+  }
+
+  @Override
+  public EdgeModel undervoltage(Device.Undervoltage device) {
+    // reciprocal voltage: a dip is a rise, so that pick-up, delay and margin mean what they do
+    // elsewhere
+    double rated = starter.supply().voltage();
+    double sign = edge == Edge.FAST ? 1.0 : edge == Edge.SLOW ? -1.0 : 0.0;
+    double pickUp = 1.0 / (device.share() * (1.0 + sign * device.accuracy().pickUp()));
+    double seconds = spread(device.seconds(), timer());
+    return new NotByCurrent(
+        new MeasuringModel(
+            currents -> currents.reciprocalVoltage(rated),
+            preload -> 0.0,
+            before -> new TimerMeter(pickUp, pickUp, seconds),
+            Margin.COARSE));
+  }
+
+  @Override
+  public EdgeModel temperature(Device.Temperature device) {
+    double rise =
+        switch (edge) {
+          case FAST -> device.leastRiseKelvin();
+          case MIDDLE -> 0.5 * (device.leastRiseKelvin() + device.greatestRiseKelvin());
+          case SLOW -> device.greatestRiseKelvin();
+        };
+    Optional<String> missing = TemperatureModel.missing(device, starter.resistors());
+    return missing.isPresent()
+        ? new UnknownModel(missing.get())
+        : new TemperatureModel(
+            device, edge, rise, spread(device.lagSeconds(), device.accuracy().time()), starter);
+  }
+
+  private double timer() {
+    return starter.timerSpread();
   }
 
   private Meter blocked(Meter meter, OptionalDouble aboveAmps, Device.Accuracy accuracy) {

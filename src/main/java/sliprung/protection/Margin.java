@@ -5,7 +5,7 @@ import java.util.function.DoubleUnaryOperator;
 /** The factor on a current or on a time axis at which a use reaches 1. */
 final class Margin {
   /** Above it a margin is called infinite. */
-  private static final double GREATEST = 100.0;
+  static final double GREATEST = 100.0;
 
   private static final double LEAST = 1e-3;
   private static final double PRECISION = 1e-5;

@@ -43,15 +43,13 @@ final class MeasuringModel implements EdgeModel {
       return EdgeOutcome.notJudged(doubt.get());
     }
     if (!withMargins) {
-      return new EdgeOutcome(
-          passage, OptionalDouble.empty(), OptionalDouble.empty(), used.bound(), doubt);
+      return new EdgeOutcome(passage, Optional.empty(), used.bound(), doubt);
     }
     DoubleUnaryOperator byCurrent = f -> use(starts, waveform.scaled(f, 1.0));
     DoubleUnaryOperator byTime = f -> use(starts, waveform.scaled(1.0, f));
     return new EdgeOutcome(
         passage,
-        OptionalDouble.of(Margin.of(byCurrent, passage.use(), stride)),
-        OptionalDouble.of(Margin.of(byTime, passage.use(), Margin.COARSE)),
+        Optional.of(new StartMargins(byCurrent, byTime, passage.use(), stride)),
         used.bound(),
         doubt);
   }

@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import sliprung.machine.Machine;
 import sliprung.runup.StartHistory;
+import sliprung.starter.Contactor;
 import sliprung.starter.Device;
 import sliprung.starter.Starter;
 
@@ -95,6 +96,11 @@ public final class ProtectionEvaluator {
     return part(part).withstandSeconds(amps);
   }
 
+  /** Current in a pole of a step contactor over the ring current, by the way its poles join. */
+  public static double poleShare(Contactor contactor) {
+    return ContactorParts.poleShare(contactor);
+  }
+
   /** The model of one edge of the device of a tag. */
   EdgeModel model(String tag, Edge edge) {
     return devices.entrySet().stream()
@@ -144,8 +150,7 @@ public final class ProtectionEvaluator {
         outcome.passage().useAtRunUp(),
         operates,
         clears(device, operates),
-        outcome.currentMargin(),
-        outcome.stretchMargin(),
+        outcome.margins(),
         operates < Double.POSITIVE_INFINITY ? outcome.bound() : Optional.empty(),
         outcome.notJudged());
   }

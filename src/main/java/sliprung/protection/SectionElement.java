@@ -1,6 +1,7 @@
 package sliprung.protection;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 import sliprung.starter.ResistorBank;
 import sliprung.starter.ShortTime;
 
@@ -68,6 +69,16 @@ public record SectionElement(double referenceAmps, double timeConstantSeconds) {
                 || section.continuousRiseKelvin().isPresent()
                     && section.shortTimeRiseKelvin().isPresent());
     return complete ? Optional.of(element(bank, section)) : Optional.empty();
+  }
+
+  /** Rise in K over the air at a section's limit; empty where no rise is given. */
+  public static OptionalDouble limitRiseKelvin(ResistorBank.Section section) {
+    return section.continuousRiseKelvin().isPresent() && section.shortTimeRiseKelvin().isPresent()
+        ? OptionalDouble.of(
+            Math.min(
+                section.continuousRiseKelvin().getAsDouble(),
+                section.shortTimeRiseKelvin().getAsDouble()))
+        : OptionalDouble.empty();
   }
 
   private static SectionElement element(ResistorBank bank, ResistorBank.Section section) {

@@ -33,7 +33,7 @@ final class SectionParts {
     double ohms = bank.sections().get(number - 1).ohms();
     return Part.of(
             name,
-            channel(number),
+            channel(bank, number),
             preload ->
                 new FirstOrderMeter(
                     element.referenceAmps(),
@@ -42,7 +42,8 @@ final class SectionParts {
         .withOhms(history -> 3.0 * ohms * history.conditions().bankFactor());
   }
 
-  private Channel channel(int number) {
+  /** Current in a section's own conductor while it is in circuit. */
+  static Channel channel(ResistorBank bank, int number) {
     double share = bank.sectionShare();
     return Channel.ring(stage -> stage.sectionsIn().contains(number) ? share : 0.0);
   }

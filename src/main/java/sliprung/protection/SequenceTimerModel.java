@@ -42,19 +42,16 @@ final class SequenceTimerModel implements EdgeModel {
             runUp / setSeconds,
             elapsed >= setSeconds ? setSeconds : Double.POSITIVE_INFINITY);
     if (!withMargins) {
-      return new EdgeOutcome(
-          passage,
-          OptionalDouble.empty(),
-          OptionalDouble.empty(),
-          Optional.empty(),
-          Optional.empty());
+      return new EdgeOutcome(passage, Optional.empty(), Optional.empty(), Optional.empty());
     }
     double stretch = elapsed > 0.0 ? setSeconds / elapsed : Double.POSITIVE_INFINITY;
     return new EdgeOutcome(
         passage,
         // no current moves a timer
-        OptionalDouble.of(elapsed >= setSeconds ? 0.0 : Double.POSITIVE_INFINITY),
-        OptionalDouble.of(stretch > 100.0 ? Double.POSITIVE_INFINITY : stretch),
+        Optional.of(
+            StartMargins.known(
+                elapsed >= setSeconds ? 0.0 : Double.POSITIVE_INFINITY,
+                stretch > 100.0 ? Double.POSITIVE_INFINITY : stretch)),
         Optional.empty(),
         Optional.empty());
   }

@@ -18,6 +18,10 @@ public final class StartProtection {
     this.currents = currents;
   }
 
+  Currents currents() {
+    return currents;
+  }
+
   /** The history asked about. */
   public StartHistory history() {
     return currents.history();

@@ -22,14 +22,20 @@ final class TwoBodyMeter implements Meter {
    * @param level both bodies to begin with
    */
   TwoBodyMeter(double referenceAmps, double heaterTau, double stripTau, double level) {
+    this(referenceAmps, heaterTau, stripTau, level, level);
+  }
+
+  /** The same, heater and strip not equally warm to begin with. */
+  TwoBodyMeter(
+      double referenceAmps, double heaterTau, double stripTau, double heater, double strip) {
     this.referenceAmps = referenceAmps;
     this.heaterTau = heaterTau;
     // equal constants have another closed form; a millionth apart serves as well
     this.stripTau =
         Math.abs(stripTau - heaterTau) < 1e-6 * heaterTau ? stripTau * (1.0 + 1e-6) : stripTau;
-    this.heater = level;
-    this.strip = level;
-    this.peak = level;
+    this.heater = heater;
+    this.strip = strip;
+    this.peak = strip;
   }
 
   @Override

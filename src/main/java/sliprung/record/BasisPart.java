@@ -44,13 +44,12 @@ final class BasisPart {
     circuit(page, review);
     List<Assumption> assumptions = review.starter().assumptions();
     if (!assumptions.isEmpty()) {
-      Cells cells =
-          new Cells(page)
-              .open(
-                  "Defaults that were filled in because the file does not say",
-                  List.of("missing key", "taken as"));
-      assumptions.forEach(a -> cells.row(a.path(), a.value()));
-      cells.close();
+      Cells.abreast(
+          page,
+          "Defaults that were filled in because the file does not say",
+          List.of("missing key", "taken as"),
+          assumptions.stream().map(x -> List.of(x.path(), x.value())).toList(),
+          "dense");
     }
     if (!review.starter().margins().isEmpty()) {
       Cells cells =

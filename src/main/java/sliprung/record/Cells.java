@@ -1,5 +1,6 @@
 package sliprung.record;
 
+import java.util.ArrayList;
 import java.util.List;
 
 /** Tables of plain cells. */
@@ -26,6 +27,27 @@ final class Cells {
     page.open("tbody").markup("\n");
     numeric = heads.stream().map(h -> h.startsWith("#")).toList();
     return this;
+  }
+
+  /** A whole table of many short rows, as many of them abreast as the page takes. */
+  static void abreast(
+      Html page, String caption, List<String> heads, List<List<String>> rows, String style) {
+    int columns = Math.min(page.figures().rowsAbreast(), Math.max(1, rows.size()));
+    List<String> allHeads = new ArrayList<>();
+    for (int c = 0; c < columns; c++) {
+      allHeads.addAll(heads);
+    }
+    Cells cells =
+        new Cells(page).open(caption, allHeads, "class", columns > 1 ? style + " abreast" : style);
+    int deep = (rows.size() + columns - 1) / columns;
+    for (int i = 0; i < deep; i++) {
+      List<String> row = new ArrayList<>();
+      for (int k = i; k < columns * deep; k += deep) {
+        row.addAll(k < rows.size() ? rows.get(k) : heads.stream().map(h -> "").toList());
+      }
+      cells.row(row.toArray(String[]::new));
+    }
+    cells.close();
   }
 
   private List<Boolean> numeric = List.of();

@@ -2,6 +2,7 @@ package sliprung.record;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import sliprung.quantity.Show;
 import sliprung.review.Review;
 import sliprung.review.StepReadings;
@@ -176,18 +177,19 @@ final class CheckList {
         + ".";
   }
 
+  /** What a timer that waits for a step does when the step fails. */
+  private static Optional<String> timer(Device device) {
+    String opens = device.tag() + " opens " + device.trips().orElse("nothing") + " ";
+    if (device instanceof Device.SequenceTimer timer) {
+      return Optional.of(opens + "after " + Show.seconds(timer.seconds()));
+    }
+    return device instanceof Device.StepProof proof
+        ? Optional.of(opens + Show.seconds(proof.seconds()) + " after the closing before")
+        : Optional.empty();
+  }
+
   private String held() {
-    List<String> timers =
-        starter.protection().stream()
-            .filter(d -> d instanceof Device.SequenceTimer)
-            .map(
-                d ->
-                    d.tag()
-                        + " opens "
-                        + d.trips().orElse("nothing")
-                        + " after "
-                        + Show.seconds(((Device.SequenceTimer) d).seconds()))
-            .toList();
+    List<String> timers = starter.protection().stream().flatMap(d -> timer(d).stream()).toList();
     String stops =
         starter.sequence() == Starter.Sequence.CHAINED || starter.interlocks().everyStepProven()
             ? "No later contactor closes"

@@ -25,7 +25,7 @@ record DialText(String device, String dial, String setting) {
       step(dials, step);
     }
     for (Device device : starter.protection()) {
-      device.fold(new Dials(dials));
+      device.fold(new Dials(dials, starter.supply().voltage()));
     }
     return dials;
   }
@@ -48,7 +48,7 @@ record DialText(String device, String dial, String setting) {
   }
 
   /** The dials of every kind of device. */
-  private record Dials(List<DialText> into) implements Device.Cases<Void> {
+  private record Dials(List<DialText> into, double rated) implements Device.Cases<Void> {
     private Void put(Device device, String dial, String setting) {
       into.add(new DialText(DeviceText.words(device), dial, setting));
       return null;
@@ -134,6 +134,29 @@ record DialText(String device, String dial, String setting) {
     @Override
     public Void standstill(Device.Standstill device) {
       return put(device, "time at rest", Show.seconds(device.seconds()));
+    }
+
+    @Override
+    public Void stepProof(Device.StepProof device) {
+      return put(device, "time for each step", Show.seconds(device.seconds()));
+    }
+
+    @Override
+    public Void undervoltage(Device.Undervoltage device) {
+      double volts = device.share() * rated;
+      put(
+          device,
+          "drops below",
+          Show.percent(device.share()) + " = " + Show.volts(volts) + " line to line");
+      return put(device, "delay", Show.seconds(device.seconds()));
+    }
+
+    @Override
+    public Void temperature(Device.Temperature device) {
+      return put(
+          device,
+          device.absolute() ? "trips above, element" : "trips above, rise of the element",
+          Show.three(device.limit()) + (device.absolute() ? "\u00a0°C" : "\u00a0K"));
     }
   }
 }

@@ -17,6 +17,9 @@ interface Figures {
    */
   void bar(Html page, double share);
 
+  /** How many rows of a short table may stand beside one another. */
+  int rowsAbreast();
+
   /** A text as it can be set there. */
   String fitted(String text);
 }

@@ -110,25 +110,24 @@ final class FindingPart {
     page.open("div", "class", "wide").open("table", "class", "clears").markup("\n");
     page.element("caption", "Clear, the thinnest margin first");
     page.open("thead").open("tr");
-    for (String head : List.of("subject", "margin", "what happens, and what decided it", "rule")) {
+    for (String head : List.of("subject, rule", "margin", "what happens, and what decided it")) {
       page.element("th", head, "scope", "col");
     }
     page.end().end();
     page.open("tbody").markup("\n");
     for (Finding finding : findings) {
       page.open("tr");
-      page.element("th", finding.subject(), "scope", "row");
+      page.open("th", "scope", "row").text(finding.subject()).empty("br");
+      page.open("code").text(finding.rule()).close().end();
       page.open("td").text(FindingText.marginOfWanted(finding));
       if (finding.margin().isPresent() && finding.wanted().isPresent()) {
         page.empty("br");
         page.figures().bar(page, FindingText.share(finding));
       }
       page.end();
-      page.open("td").text(finding.says());
-      page.empty("br");
-      page.open("span", "class", "quiet").text(evidence(finding)).end();
+      page.open("td").text(finding.says() + " ");
+      page.open("span", "class", "quiet").text(evidence(finding)).close();
       page.end();
-      page.open("td").open("code").text(finding.rule()).close().end();
       page.end();
     }
     page.end().end().end();

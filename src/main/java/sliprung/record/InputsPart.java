@@ -19,18 +19,15 @@ final class InputsPart {
     }
     Starter starter = dossier.review().starter();
     page.section("inputs", "Inputs as read");
-    Cells cells =
-        new Cells(page)
-            .open(
-                "What the file says, what it was taken for, and how well it is known; a grade in"
-                    + " brackets was not stated",
-                List.of("input", "as written", "#taken as", "evidence"),
-                "class",
-                "dense");
-    for (AsRead value : dossier.values()) {
-      cells.row(value.path(), value.text(), taken(value), grade(starter, value.path()));
-    }
-    cells.close();
+    Cells.abreast(
+        page,
+        "What the file says, what it was taken for, and how well it is known; a grade in"
+            + " brackets was not stated",
+        List.of("input", "as written", "#taken as", "evidence"),
+        dossier.values().stream()
+            .map(v -> List.of(v.path(), v.text(), taken(v), grade(starter, v.path())))
+            .toList(),
+        "dense inputs");
     page.end();
   }
 

@@ -3,6 +3,7 @@ package sliprung.record;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import sliprung.chart.FaultRow;
 import sliprung.chart.FirstLimitChart;
 import sliprung.protection.DeviceResponse;
@@ -21,14 +22,17 @@ final class ProtectionPart {
     ReviewLayout.figure(page, pictures.timeCurrent());
     pictures.use().ifPresent(p -> ReviewLayout.figure(page, p));
     pictures.sections().ifPresent(p -> ReviewLayout.figure(page, p));
-    for (String id : List.of("cold", "hot")) {
-      review.start(id).ifPresent(s -> start(page, s));
+    List<ComputedStart> starts =
+        Stream.of("cold", "hot").flatMap(id -> review.start(id).stream()).toList();
+    starts.forEach(s -> devices(page, s));
+    if (!starts.isEmpty()) {
+      parts(page, starts);
     }
     faults(page, firstLimit);
     page.end();
   }
 
-  private static void start(Html page, ComputedStart start) {
+  private static void devices(Html page, ComputedStart start) {
     String words = start.words();
     Cells devices =
         new Cells(page)
@@ -52,22 +56,36 @@ final class ProtectionPart {
       devices.row(cells(device));
     }
     devices.close();
-    Cells parts =
+  }
+
+  /** Every start has the same parts in the same order. */
+  private static void parts(Html page, List<ComputedStart> starts) {
+    List<String> heads = new ArrayList<>(List.of("part"));
+    for (ComputedStart start : starts) {
+      heads.add("#use, " + start.words());
+      heads.add("#limit reached");
+    }
+    heads.add("remark");
+    Cells cells =
         new Cells(page)
             .open(
-                "Parts over the nominal " + words + "; a use of 1.00 or more is past the limit",
-                List.of("part", "#use", "#limit reached", "remark"),
+                "Parts over the nominal starts; a use of 1.00 or more is past the limit",
+                heads,
                 "class",
                 "dense");
-    for (PartResponse part : start.parts()) {
-      boolean known = part.missing().isEmpty();
-      parts.row(
-          PartText.words(part.part()),
-          known ? use(part.use()) : "–",
-          known ? Show.seconds(part.limitAtSeconds()) : "–",
-          part.missing().map(path -> "not judged: give " + path).orElse(""));
+    List<PartResponse> first = starts.get(0).parts();
+    for (int i = 0; i < first.size(); i++) {
+      List<String> row = new ArrayList<>(List.of(PartText.words(first.get(i).part())));
+      for (ComputedStart start : starts) {
+        PartResponse part = start.parts().get(i);
+        boolean known = part.missing().isEmpty();
+        row.add(known ? use(part.use()) : "–");
+        row.add(known ? Show.seconds(part.limitAtSeconds()) : "–");
+      }
+      row.add(first.get(i).missing().map(path -> "not judged: give " + path).orElse(""));
+      cells.row(row.toArray(String[]::new));
     }
-    parts.close();
+    cells.close();
   }
 
   private static String[] cells(DeviceResponse device) {

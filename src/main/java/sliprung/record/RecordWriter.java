@@ -16,22 +16,26 @@ public final class RecordWriter {
   private RecordWriter() {}
 
   /**
-   * Every file of a record by its name, not yet written. The PDF, which takes longest, is made
-   * beside the others.
+   * Every file of a record by its name, not yet written. What takes longest is made beside the
+   * rest.
    *
    * @param paper of the PDF; empty: no PDF
    */
   public static Map<String, byte[]> files(Dossier dossier, Optional<Paper> paper) {
     Review review = dossier.review();
+    CompletableFuture<String> json =
+        CompletableFuture.supplyAsync(
+            () -> ReviewJson.text(review, dossier.inputs(), dossier.program()));
     Contents contents = Contents.of(dossier);
     Optional<CompletableFuture<byte[]>> pdf =
         paper.map(p -> CompletableFuture.supplyAsync(() -> ReviewPdf.bytes(contents, p)));
+    Map<String, String> drawn = contents.pictures().drawn();
     Map<String, String> texts = new LinkedHashMap<>();
-    texts.put("review.html", ReviewHtml.text(contents));
-    texts.put("review.json", ReviewJson.text(review, dossier.inputs(), dossier.program()));
+    texts.put("review.html", ReviewHtml.text(contents, drawn));
+    texts.put("review.json", json.join());
     texts.put("profile.csv", ProfileCsv.text(review));
     for (Picture picture : contents.pictures().all()) {
-      texts.put(picture.name() + ".svg", Svg.file(picture));
+      texts.put(picture.name() + ".svg", Svg.file(picture, drawn.get(picture.name())));
     }
     Map<String, byte[]> files = new LinkedHashMap<>();
     texts.forEach((name, text) -> files.put(name, text.getBytes(StandardCharsets.UTF_8)));

@@ -7,6 +7,7 @@ import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.Base64;
+import java.util.Map;
 import sliprung.review.Review;
 
 /**
@@ -20,11 +21,17 @@ public final class ReviewHtml {
 
   /** The whole page. */
   public static String text(Dossier dossier) {
-    return text(Contents.of(dossier));
+    Contents contents = Contents.of(dossier);
+    return text(contents, contents.pictures().drawn());
   }
 
-  static String text(Contents contents) {
-    Html page = new Html(new ScreenFigures());
+  /**
+   * The whole page.
+   *
+   * @param drawn the {@code svg} element of each picture, by the picture's name
+   */
+  static String text(Contents contents, Map<String, String> drawn) {
+    Html page = new Html(new ScreenFigures(drawn));
     page.markup("<!DOCTYPE html>\n");
     page.open("html", "lang", "en", "xmlns", "http://www.w3.org/1999/xhtml").markup("\n");
     head(page, contents.review());

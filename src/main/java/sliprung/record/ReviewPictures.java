@@ -1,7 +1,9 @@
 package sliprung.record;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import sliprung.chart.Band;
 import sliprung.chart.FirstLimitChart;
@@ -13,6 +15,7 @@ import sliprung.chart.SectionDrawing;
 import sliprung.chart.SectionLevels;
 import sliprung.chart.StartDrawing;
 import sliprung.chart.StartOverTime;
+import sliprung.chart.Svg;
 import sliprung.chart.TimeCurrentDrawing;
 import sliprung.chart.TimeCurrentSheet;
 import sliprung.chart.TorqueSpeed;
@@ -63,5 +66,19 @@ record ReviewPictures(
     use.ifPresent(all::add);
     sections.ifPresent(all::add);
     return all;
+  }
+
+  /**
+   * Every picture as an {@code svg} element, by its name, in the order of the page. Each is painted
+   * on a surface of its own, so they are drawn beside one another.
+   */
+  Map<String, String> drawn() {
+    List<Picture> all = all();
+    List<String> elements = all.parallelStream().map(Svg::inline).toList();
+    Map<String, String> drawn = new LinkedHashMap<>();
+    for (int i = 0; i < all.size(); i++) {
+      drawn.put(all.get(i).name(), elements.get(i));
+    }
+    return drawn;
   }
 }

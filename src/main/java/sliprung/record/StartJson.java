@@ -65,6 +65,17 @@ final class StartJson {
     json.writeStringField("load", corner.load().name().toLowerCase(Locale.ROOT));
     json.writeStringField("bank", corner.bank().name().toLowerCase(Locale.ROOT));
     json.writeStringField("timers", corner.timers().name().toLowerCase(Locale.ROOT));
+    if (!corner.steps().isEmpty()) {
+      json.writeArrayFieldStart("steps");
+      for (Corner.Timers side : corner.steps()) {
+        json.writeString(side.name().toLowerCase(Locale.ROOT));
+      }
+      json.writeEndArray();
+    }
+    if (corner.inside().isPresent()) {
+      fields.number("load_factor", corner.inside().get().loadFactor());
+      fields.number("bank_factor", corner.inside().get().bankFactor());
+    }
     json.writeEndObject();
   }
 

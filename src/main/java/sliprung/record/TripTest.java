@@ -115,5 +115,20 @@ record TripTest(String test, String expect) {
     public Optional<Double> standstill(Device.Standstill device) {
       return Optional.empty();
     }
+
+    @Override
+    public Optional<Double> stepProof(Device.StepProof device) {
+      return Optional.empty();
+    }
+
+    @Override
+    public Optional<Double> undervoltage(Device.Undervoltage device) {
+      return Optional.empty();
+    }
+
+    @Override
+    public Optional<Double> temperature(Device.Temperature device) {
+      return Optional.empty();
+    }
   }
 }

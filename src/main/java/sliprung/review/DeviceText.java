@@ -61,5 +61,20 @@ public final class DeviceText {
     public String standstill(Device.Standstill device) {
       return "rotation sensor";
     }
+
+    @Override
+    public String stepProof(Device.StepProof device) {
+      return "proof of steps";
+    }
+
+    @Override
+    public String undervoltage(Device.Undervoltage device) {
+      return "undervoltage";
+    }
+
+    @Override
+    public String temperature(Device.Temperature device) {
+      return "bank temperature";
+    }
   }
 }

@@ -22,6 +22,7 @@ import sliprung.starter.ResistorBank;
 import sliprung.starter.Starter;
 import sliprung.tolerance.Corner;
 import sliprung.tolerance.Corners;
+import sliprung.tolerance.WorstPoints;
 
 /** Computes every start of a starter at every corner, and what devices and parts make of it. */
 final class StartComputation {
@@ -67,8 +68,10 @@ final class StartComputation {
 
   /** Corners share nothing, so both cores work on them; the order stays that of the corners. */
   Computed compute() {
+    Map<Corner, Conditions> points = new LinkedHashMap<>(Corners.of(starter));
+    points.putAll(WorstPoints.of(starter, simulator));
     List<Both> permitted =
-        Corners.of(starter).entrySet().stream().toList().parallelStream()
+        points.entrySet().stream().toList().parallelStream()
             .map(
                 e ->
                     new Both(
@@ -98,6 +101,9 @@ final class StartComputation {
     if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
       return simulator.run(fault, at.conditions()); // nothing closes: there is no closing peak
     }
+    if (fault.kind() == Scenario.Kind.RECLOSED) {
+      return simulator.runReclosed(fault, at.conditions());
+    }
     StartHistory steady = simulator.run(fault, at.conditions());
     return at.corner().isNominal()
         ? steady.withPeaksOf(simulator.runTransient(fault, at.conditions()))
@@ -124,19 +130,24 @@ final class StartComputation {
     }
     List<Double> sections =
         permitted.sectionLevelsAfter(PartPreload.COLD, Math.max(1, duty.coldStarts()));
-    DevicePreload warm = before.devices();
+    DevicePreload warm = before.devices().onWarmBank(sections);
     PartPreload restarted = before.parts(duty.restartAfterSeconds(), sections);
     for (int n = 1; n <= duty.hotStarts(); n++) {
       starts.add(permitted(corner, permitted, ComputedStart.From.HOT, n, warm, restarted));
     }
 
-    DevicePreload forgotten = before.remembered();
+    DevicePreload forgotten = before.remembered().onWarmBank(sections);
     PartPreload hot = before.parts(0.0, sections);
     for (Scenario fault : faults()) {
       StartProtection history = evaluator.over(fault(fault, both));
       if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
         starts.add(
-            fault(corner, history, ComputedStart.From.HOT, warmFromLightLoad(conditions), hot));
+            fault(
+                corner,
+                history,
+                ComputedStart.From.HOT,
+                warmFromLightLoad(conditions).onWarmBank(sections),
+                hot));
         continue;
       }
       // a reclosed motor was running just before: it has no cold start
@@ -155,13 +166,7 @@ final class StartComputation {
    */
   private DevicePreload warmFromLightLoad(Conditions conditions) {
     double light = Math.min(conditions.loadFactor(), 1.0 + starter.load().spreadLow());
-    Conditions lightly =
-        new Conditions(
-            conditions.source(),
-            light,
-            conditions.bankFactor(),
-            conditions.timerFactor(),
-            conditions.levelFactor());
+    Conditions lightly = conditions.withLoad(light);
     return simulator
         .runningPoint(lightly)
         .map(r -> DevicePreload.running(r.point().statorAmps(), r.point().ringAmps()))

@@ -14,11 +14,20 @@ import sliprung.starter.Contactor;
  */
 public record BreakingCapacity(String tag, double amps, String basis) {
 
+  private static final String OWN = "its own tested breaking current";
+
+  /** Whether the supply's voltage lies above the utilization categories of IEC 60947-4-1. */
+  private static boolean isAboveCategories(Facts facts) {
+    return facts.starter().supply().voltage()
+        > facts.practice().figure("contactor.greatest-voltage").value();
+  }
+
   /**
    * The capacity; of a contactor rated in several categories the greatest proven figure counts.
    *
    * @return empty where nothing proves one: no rating, no breaking capacity, a contactor above 1000
-   *     V (IEC 62271-106 figures are not held), one used above its rated voltage
+   *     V without a tested breaking current of its own (IEC 62271-106 figures are not held), one
+   *     used above its rated voltage
    */
   public static Optional<BreakingCapacity> of(Facts facts, String tag) {
     Optional<Breaker> breaker = facts.starter().breaker(tag);
@@ -32,13 +41,17 @@ public record BreakingCapacity(String tag, double amps, String basis) {
     Optional<Contactor> found = facts.starter().contactor(tag);
     if (found.isEmpty()
         || found.get().place() != Contactor.Place.LINE
-        || facts.starter().supply().voltage()
-            > facts.practice().figure("contactor.greatest-voltage").value()
         || found.get().ratedVoltage().isEmpty()
         || found.get().ratedVoltage().getAsDouble() < facts.starter().supply().voltage()) {
       return Optional.empty();
     }
     BreakingCapacity best = null;
+    if (found.get().breakingAmps().isPresent()) {
+      best = new BreakingCapacity(tag, found.get().breakingAmps().getAsDouble(), OWN);
+    }
+    if (isAboveCategories(facts)) {
+      return Optional.ofNullable(best);
+    }
     for (Map.Entry<String, Double> rating : found.get().ratings().entrySet()) {
       Optional<Practice.Figure> multiple = facts.practice().find(rating.getKey() + ".breaking");
       if (multiple.isEmpty()) {
@@ -69,6 +82,6 @@ public record BreakingCapacity(String tag, double amps, String basis) {
     if (contactor.isPresent() && contactor.get().ratedVoltage().isEmpty()) {
       return "contactors." + tag + ".rated-voltage";
     }
-    return "contactors." + tag + ".ratings";
+    return "contactors." + tag + (isAboveCategories(facts) ? ".breaking" : ".ratings");
   }
 }

@@ -3,9 +3,11 @@ package sliprung.rulebook;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Stream;
 import sliprung.protection.DeviceResponse;
 import sliprung.protection.Edge;
 import sliprung.protection.PartResponse;
+import sliprung.protection.StartMargins;
 import sliprung.runup.Scenario;
 import sliprung.runup.StartHistory;
 import sliprung.tolerance.Corner;
@@ -80,6 +82,24 @@ public record ComputedStart(
       return scenario.words() + ", from " + from.word();
     }
     return (place > 1 ? from.word() + " start " + place + " in a row" : from.word() + " start");
+  }
+
+  /**
+   * Of permitted starts the one in which a device, at its fast edge, is nearest to operating by a
+   * rising current; the first of equals. Empty where it has no such margin in any.
+   */
+  public static Optional<ComputedStart> nearest(Stream<ComputedStart> starts, String tag) {
+    ComputedStart nearest = null;
+    double least = Double.POSITIVE_INFINITY;
+    for (ComputedStart start : starts.toList()) {
+      Optional<StartMargins> margins =
+          start.device(tag, Edge.FAST).flatMap(DeviceResponse::margins);
+      if (margins.isPresent() && (nearest == null || margins.get().currentBelow(least))) {
+        nearest = start;
+        least = margins.get().current();
+      }
+    }
+    return Optional.ofNullable(nearest);
   }
 
   /** The response of a device at an edge, if it has that edge. */

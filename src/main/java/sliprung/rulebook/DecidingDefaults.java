@@ -1,8 +1,11 @@
 package sliprung.rulebook;
 
 import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.IdentityHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import java.util.TreeMap;
 import java.util.TreeSet;
@@ -22,15 +25,28 @@ public final class DecidingDefaults {
   private DecidingDefaults() {}
 
   static List<Finding> findings(Facts facts, List<Rule> rules, List<Finding> findings) {
+    Map<String, List<String>> inputs = new HashMap<>();
+    rules.forEach(rule -> inputs.put(rule.info().name(), rule.info().inputs()));
+    Map<Finding, List<String>> restsOn = new IdentityHashMap<>();
+    for (Finding finding : findings) {
+      if (finding.verdict() != Verdict.NOT_JUDGED) {
+        restsOn.put(
+            finding,
+            inputs.getOrDefault(finding.rule(), List.of()).stream()
+                .map(path -> path.replace("{subject}", finding.subject()))
+                .toList());
+      }
+    }
     TreeMap<String, Group> groups = new TreeMap<>();
     for (Assumption assumption : facts.starter().assumptions()) {
-      for (Finding finding : findings) {
-        if (finding.verdict() != Verdict.NOT_JUDGED && restsOn(rules, finding, assumption)) {
-          groups
-              .computeIfAbsent(subject(assumption.path()), s -> new Group())
-              .add(assumption, finding);
-        }
-      }
+      restsOn.forEach(
+          (finding, roots) -> {
+            if (Facts.underAny(assumption.path(), roots)) {
+              groups
+                  .computeIfAbsent(subject(assumption.path()), s -> new Group())
+                  .add(assumption, finding);
+            }
+          });
     }
     List<Finding> out = new ArrayList<>();
     groups.forEach(
@@ -74,13 +90,4 @@ public final class DecidingDefaults {
   }
 
   private static final Set<String> TAGGED = Set.of("protection", "contactors", "breakers");
-
-  private static boolean restsOn(List<Rule> rules, Finding finding, Assumption assumption) {
-    return rules.stream()
-        .map(Rule::info)
-        .filter(i -> i.name().equals(finding.rule()))
-        .flatMap(i -> i.inputs().stream())
-        .map(path -> path.replace("{subject}", finding.subject()))
-        .anyMatch(root -> Facts.underAny(assumption.path(), List.of(root)));
-  }
 }

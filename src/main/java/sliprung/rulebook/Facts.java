@@ -110,6 +110,12 @@ public record Facts(
 
   /** Whether a path is one of these or lies below one. */
   static boolean underAny(String path, List<String> roots) {
-    return roots.stream().anyMatch(root -> path.equals(root) || path.startsWith(root + "."));
+    for (String root : roots) {
+      if (path.startsWith(root)
+          && (path.length() == root.length() || path.charAt(root.length()) == '.')) {
+        return true;
+      }
+    }
+    return false;
   }
 }

@@ -62,10 +62,16 @@ public record MakingCapacity(String tag, double amps, String basis) {
   }
 
   /** What to give so that it can be judged. */
-  public static List<String> missing(Contactor contactor) {
+  public static List<String> missing(Facts facts, Contactor contactor) {
     String path = "contactors." + contactor.tag() + ".";
     if (contactor.place() == Contactor.Place.ROTOR) {
       return List.of(path + "rotor-rating");
+    }
+    boolean aboveCategories =
+        facts.starter().supply().voltage()
+            > facts.practice().figure("contactor.greatest-voltage").value();
+    if (aboveCategories) {
+      return List.of(); // the figures of IEC 62271-106 are not held: nothing given would tell
     }
     return contactor.ratedVoltage().isEmpty()
         ? List.of(path + "rated-voltage")

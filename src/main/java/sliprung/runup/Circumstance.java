@@ -40,7 +40,8 @@ record Circumstance(
   }
 
   double netTorque(double speed) {
-    return at(speed).torque() - loadTorque.applyAsDouble(speed);
+    return machine.torque(source, externalOhms, machine.slip(speed))
+        - loadTorque.applyAsDouble(speed);
   }
 
   double acceleration(double speed) {

@@ -22,4 +22,39 @@ public record ClosingPeak(
     double torqueAtSeconds,
     double leastTorque,
     double statorRms,
-    double ringRms) {}
+    double ringRms) {
+
+  /** Greatest torque either way, N·m. */
+  public double greatestTorque() {
+    return Math.max(torque, -leastTorque);
+  }
+
+  /** The greater of each value, with its own instant. */
+  ClosingPeak or(ClosingPeak other) {
+    boolean current = other.statorAmps > statorAmps;
+    boolean twist = other.torque > torque;
+    return new ClosingPeak(
+        current ? other.statorAmps : statorAmps,
+        current ? other.statorAtSeconds : statorAtSeconds,
+        Math.max(ringAmps, other.ringAmps),
+        twist ? other.torque : torque,
+        twist ? other.torqueAtSeconds : torqueAtSeconds,
+        Math.min(leastTorque, other.leastTorque),
+        Math.max(statorRms, other.statorRms),
+        Math.max(ringRms, other.ringRms));
+  }
+
+  /** With a torque of the steady circuit in it. */
+  ClosingPeak orTorque(double newtonMetres, double atSeconds) {
+    boolean twist = newtonMetres > torque;
+    return new ClosingPeak(
+        statorAmps,
+        statorAtSeconds,
+        ringAmps,
+        twist ? newtonMetres : torque,
+        twist ? atSeconds : torqueAtSeconds,
+        leastTorque,
+        statorRms,
+        ringRms);
+  }
+}

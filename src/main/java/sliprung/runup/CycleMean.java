@@ -7,10 +7,12 @@ import java.util.Arrays;
  * the fundamental of the last period, without the offset, which turns there and averages out.
  */
 final class CycleMean {
+  private static final int FIRST_SIZE = 128;
+
   private final double period;
-  private double[] seconds = new double[1024];
-  private final double[][] integrals = new double[4][1024];
-  private final double[][] values = new double[4][1024];
+  private double[] seconds = new double[FIRST_SIZE];
+  private final double[][] integrals = new double[4][FIRST_SIZE];
+  private final double[][] values = new double[4][FIRST_SIZE];
   private int count = 1;
   private int behind;
 
@@ -21,6 +23,9 @@ final class CycleMean {
 
   /** Adds a piece of Simpson's rule: its length and each component at its start, middle and end. */
   void add(double length, double[] first, double[] middle, double[] last) {
+    if (count == seconds.length && behind > count / 2) {
+      forgetBehind();
+    }
     if (count == seconds.length) {
       seconds = Arrays.copyOf(seconds, 2 * count);
       for (int k = 0; k < integrals.length; k++) {
@@ -37,6 +42,17 @@ final class CycleMean {
     count++;
   }
 
+  /** Only the last period is ever looked back on. */
+  private void forgetBehind() {
+    count -= behind;
+    System.arraycopy(seconds, behind, seconds, 0, count);
+    for (int k = 0; k < integrals.length; k++) {
+      System.arraycopy(integrals[k], behind, integrals[k], 0, count);
+      System.arraycopy(values[k], behind, values[k], 0, count);
+    }
+    behind = 0;
+  }
+
   /** Magnitude over √2 of the mean of the vector whose components are k and k + 1, up to now. */
   double rms(int k) {
     double from = seconds[count - 1] - period;
@@ -45,7 +61,7 @@ final class CycleMean {
     }
     double real = (integrals[k][count - 1] - at(k, from)) / period;
     double imaginary = (integrals[k + 1][count - 1] - at(k + 1, from)) / period;
-    return Math.hypot(real, imaginary) / Math.sqrt(2.0);
+    return Math.sqrt(0.5 * (real * real + imaginary * imaginary));
   }
 
   private double at(int k, double time) {

@@ -31,7 +31,8 @@ public record Scenario(Kind kind, int step, LoadMode load) {
     WELDED,
     /**
      * The line contactor drops and returns with every step contactor still closed. How long it was
-     * off is not known; the rotor is taken to have coasted to rest, which draws most.
+     * off is not known: the rotor is taken to have coasted to rest, which heats most, and the peaks
+     * are the greatest of any dead time.
      */
     RECLOSED
   }

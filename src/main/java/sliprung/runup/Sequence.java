@@ -107,7 +107,7 @@ final class Sequence {
     double due =
         pending.stream().mapToDouble(Pending::atSeconds).min().orElse(Double.POSITIVE_INFINITY);
     if (waiting() && current().rule() instanceof Step.After after) {
-      due = Math.min(due, reference + after.seconds() * conditions.timerFactor());
+      due = Math.min(due, reference + after.seconds() * conditions.timerFactor(next + 1));
     }
     return due;
   }
@@ -120,7 +120,7 @@ final class Sequence {
   /** From when on the level counts, s. */
   double levelFromSeconds() {
     return Math.max(
-        reference + current().atLeastSeconds() * conditions.timerFactor(),
+        reference + current().atLeastSeconds() * conditions.timerFactor(next + 1),
         lastClosing + CURRENT_BUILDS_UP_SECONDS);
   }
 
@@ -133,12 +133,12 @@ final class Sequence {
   Level aboveLevel(Machine machine) {
     Step.ClosingRule rule = current().rule();
     if (rule instanceof Step.RotorFrequencyBelow below) {
-      double level = below.hertz() * conditions.levelFactor();
+      double level = below.hertz() * conditions.levelFactor(next + 1);
       return Level.ofSpeed(w -> Math.abs(machine.slip(w)) * frequency - level);
     }
     boolean stator = rule instanceof Step.StatorBelow;
     double amps = stator ? ((Step.StatorBelow) rule).amps() : ((Step.RotorBelow) rule).amps();
-    double level = amps * conditions.levelFactor();
+    double level = amps * conditions.levelFactor(next + 1);
     return (speed, statorAmps, ringAmps) -> (stator ? statorAmps : ringAmps) - level;
   }
 
@@ -155,7 +155,7 @@ final class Sequence {
   OptionalInt act(double now) {
     if (waiting()
         && current().rule() instanceof Step.After after
-        && reference + after.seconds() * conditions.timerFactor() <= now) {
+        && reference + after.seconds() * conditions.timerFactor(next + 1) <= now) {
       fire(now);
     }
     pending.sort(Comparator.comparingDouble(Pending::atSeconds).thenComparingInt(Pending::index));

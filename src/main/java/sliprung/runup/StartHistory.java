@@ -59,6 +59,21 @@ public record StartHistory(
         levelNeverReached);
   }
 
+  /** This history with that peak of its first closing. */
+  StartHistory withFirstPeak(ClosingPeak peak) {
+    java.util.ArrayList<Stage> with = new java.util.ArrayList<>(stages);
+    with.set(0, stages.get(0).with(Optional.of(peak)));
+    return new StartHistory(
+        scenario,
+        conditions,
+        outcome,
+        with,
+        running,
+        lastClosingSeconds,
+        runUpSeconds,
+        levelNeverReached);
+  }
+
   /** Every stage with its samples, the running after the start included. */
   public List<Stage> everything() {
     if (running.isEmpty()) {

@@ -41,6 +41,23 @@ public final class StartSimulator {
     return new StartRun(this, scenario, conditions, new TransientDrive()).compute();
   }
 
+  /**
+   * The start after the line was lost and has returned with every step contactor closed: from rest,
+   * with the steady circuit, which heats most; its first closing carries the greatest peaks of a
+   * rotor that still turns or stands, over every dead time and angle of the residual voltage.
+   */
+  public StartHistory runReclosed(Scenario scenario, Conditions conditions) {
+    StartHistory steady = run(scenario, conditions);
+    double torque = runningTorque(conditions);
+    Circumstance closed = circumstance(conditions, List.of(), w -> torque, 0.0);
+    ClosingPeak peak = new Reclosing(closed, torque).greatest();
+    Trace trace = steady.stages().get(0).trace();
+    for (int i = 0; i < trace.size(); i++) {
+      peak = peak.orTorque(trace.torque()[i], trace.seconds()[i]);
+    }
+    return steady.withFirstPeak(peak);
+  }
+
   Starter starter() {
     return starter;
   }
@@ -95,7 +112,7 @@ public final class StartSimulator {
         loadTorque,
         breakaway,
         starter.load().active(),
-        inertia);
+        inertia * conditions.inertiaFactor());
   }
 
   /**

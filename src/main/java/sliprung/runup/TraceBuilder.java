@@ -5,8 +5,11 @@ import sliprung.machine.OperatingPoint;
 
 /** Gathers the samples of one stage into a trace. */
 final class TraceBuilder {
-  private double[] seconds = new double[256];
-  private double[][] rows = new double[7][256];
+  /** Most stages of a failed start are held at one speed: few samples. */
+  private static final int FIRST_SIZE = 16;
+
+  private double[] seconds = new double[FIRST_SIZE];
+  private final double[][] rows = new double[7][FIRST_SIZE];
   private int count;
 
   boolean isEmpty() {

@@ -19,6 +19,9 @@ final class TransientSamples implements SystemFlow.Steps {
   private final FluxModel model;
   private final CycleMean cycles;
   private final TraceBuilder trace = new TraceBuilder();
+  private final double[] early = new double[FluxModel.STATES];
+  private final double[] late = new double[FluxModel.STATES];
+  private final double[] within = new double[FluxModel.STATES];
   private final PeakTracker stator = new PeakTracker();
   private final PeakTracker ring = new PeakTracker();
   private final PeakTracker torque = new PeakTracker();
@@ -70,11 +73,11 @@ final class TransientSamples implements SystemFlow.Steps {
       return;
     }
     double half = 0.5 * (to - from);
-    double[] early = solution.at(from + 0.5 * half);
+    solution.at(from + 0.5 * half, early);
     Sample middle = sample(from + half, solution.at(from + half));
-    double[] late = solution.at(from + 1.5 * half);
+    solution.at(from + 1.5 * half, late);
     Sample end = sample(to, solution.at(to));
-    int pieces = pieces(last, early, middle, late, end);
+    int pieces = pieces(last, middle, end);
     Sample between = null;
     for (int i = 1; i <= 2 * pieces; i++) {
       double at = from + half * i / pieces;
@@ -86,14 +89,19 @@ final class TransientSamples implements SystemFlow.Steps {
       }
     }
     double spacing = half / pieces;
-    stator.refine(from, to, spacing, t -> model.statorAmps(solution.at(t)) * RMS);
-    ring.refine(from, to, spacing, t -> model.ringAmps(solution.at(t)) * RMS);
-    torque.refine(from, to, spacing, t -> model.torque(solution.at(t)));
-    backTorque.refine(from, to, spacing, t -> -model.torque(solution.at(t)));
+    stator.refine(from, to, spacing, t -> model.statorAmps(within(solution, t)) * RMS);
+    ring.refine(from, to, spacing, t -> model.ringAmps(within(solution, t)) * RMS);
+    torque.refine(from, to, spacing, t -> model.torque(within(solution, t)));
+    backTorque.refine(from, to, spacing, t -> -model.torque(within(solution, t)));
+  }
+
+  private double[] within(SystemFlow.Dense solution, double time) {
+    solution.at(time, within);
+    return within;
   }
 
   /** As many as Simpson's rule needs, whose error goes with the fourth power of the length. */
-  private int pieces(Sample first, double[] early, Sample middle, double[] late, Sample end) {
+  private int pieces(Sample first, Sample middle, Sample end) {
     double change =
         Math.max(
             change(

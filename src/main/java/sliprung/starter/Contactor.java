@@ -21,6 +21,7 @@ import java.util.TreeMap;
  * @param coordination declared, tested combination with a short-circuit device
  * @param intermittentClass operating cycles an hour it is declared for (IEC 60947-1, intermittent
  *     duty: class 12 is 12 an hour)
+ * @param breakingAmps its own tested breaking current at its rated voltage, RMS
  */
 public record Contactor(
     String tag,
@@ -34,7 +35,8 @@ public record Contactor(
     double closingSeconds,
     double openingSeconds,
     Optional<Coordination> coordination,
-    OptionalDouble intermittentClass) {
+    OptionalDouble intermittentClass,
+    OptionalDouble breakingAmps) {
 
   /** Where a contactor sits. */
   public enum Place {
@@ -62,6 +64,36 @@ public record Contactor(
     public Coordination(int type, String with) {
       this(type, with, OptionalDouble.empty());
     }
+  }
+
+  /** A contactor without a tested breaking current of its own. */
+  public Contactor(
+      String tag,
+      Place place,
+      Map<String, Double> ratings,
+      OptionalDouble ratedVoltage,
+      Optional<Poles> poles,
+      OptionalDouble thermalAmps,
+      OptionalDouble rotorRatingAmps,
+      Optional<ShortTime> shortTime,
+      double closingSeconds,
+      double openingSeconds,
+      Optional<Coordination> coordination,
+      OptionalDouble intermittentClass) {
+    this(
+        tag,
+        place,
+        ratings,
+        ratedVoltage,
+        poles,
+        thermalAmps,
+        rotorRatingAmps,
+        shortTime,
+        closingSeconds,
+        openingSeconds,
+        coordination,
+        intermittentClass,
+        OptionalDouble.empty());
   }
 
   /** A contactor without a declared class of intermittent duty. */

@@ -1,5 +1,6 @@
 package sliprung.starter;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import sliprung.curve.AmGates;
@@ -20,6 +21,11 @@ public sealed interface Device {
   /** Tag on the drawing. */
   default String tag() {
     return fitting().tag();
+  }
+
+  /** Whether its operating time is a matter of a current: neither a timer nor another quantity. */
+  default boolean measuresCurrent() {
+    return true;
   }
 
   /** Tag of what it opens; empty: it opens the circuit itself (a fuse) or nothing is said. */
@@ -111,6 +117,14 @@ public sealed interface Device {
       Optional<AmGates> amGates,
       OptionalDouble breakingAmps)
       implements Device {
+
+    /** A.c. volts up to which gates and ratings of IEC 60269 hold (its scope, from memory). */
+    public static final double GREATEST_VOLTS = 1000.0;
+
+    /** Whether the gates say anything of a fuse at that line voltage. */
+    public static boolean gatesHoldAt(double volts) {
+      return volts <= GREATEST_VOLTS;
+    }
 
     /** A fuse without a declared breaking capacity. */
     public Fuse(
@@ -210,6 +224,11 @@ public sealed interface Device {
   record SequenceTimer(Fitting fitting, double seconds, OptionalDouble untilSpeedShare)
       implements Device {
     @Override
+    public boolean measuresCurrent() {
+      return false;
+    }
+
+    @Override
     public <R> R fold(Cases<R> cases) {
       return cases.sequenceTimer(this);
     }
@@ -275,8 +294,107 @@ public sealed interface Device {
    */
   record Standstill(Fitting fitting, double seconds) implements Device {
     @Override
+    public boolean measuresCurrent() {
+      return false;
+    }
+
+    @Override
     public <R> R fold(Cases<R> cases) {
       return cases.standstill(this);
+    }
+  }
+
+  /**
+   * Proof of every step: trips when the next step contactor has not reported closed in time. The
+   * time runs anew from each closing.
+   *
+   * @param seconds from the closing before, the line contactor's for the first step
+   */
+  record StepProof(Fitting fitting, double seconds) implements Device {
+    @Override
+    public boolean measuresCurrent() {
+      return false;
+    }
+
+    @Override
+    public <R> R fold(Cases<R> cases) {
+      return cases.stepProof(this);
+    }
+  }
+
+  /**
+   * An undervoltage relay: trips when the voltage at the starter stays below a share of rated.
+   *
+   * @param share of the rated supply voltage, per unit
+   * @param seconds delay
+   */
+  record Undervoltage(Fitting fitting, double share, double seconds, Accuracy accuracy)
+      implements Device {
+    @Override
+    public boolean measuresCurrent() {
+      return false;
+    }
+
+    @Override
+    public <R> R fold(Cases<R> cases) {
+      return cases.undervoltage(this);
+    }
+  }
+
+  /**
+   * Air around a bank.
+   *
+   * @param coldestCelsius °C
+   * @param hottestCelsius °C, no less
+   */
+  record Air(double coldestCelsius, double hottestCelsius) {}
+
+  /**
+   * A temperature sensor on resistor elements, one on each section that it watches: it follows the
+   * element with a lag.
+   *
+   * @param sections numbers from 1, rising; never empty
+   * @param limit where it trips: a rise over the air in K, or a temperature in °C
+   * @param absolute whether the limit is a temperature
+   * @param air what a temperature is above; not used with a rise
+   * @param lagSeconds time constant of the sensor
+   * @param accuracy of the limit (pick-up) and of the lag (time)
+   */
+  record Temperature(
+      Fitting fitting,
+      List<Integer> sections,
+      double limit,
+      boolean absolute,
+      Air air,
+      double lagSeconds,
+      Accuracy accuracy)
+      implements Device {
+
+    /** Copies the list. */
+    public Temperature {
+      sections = List.copyOf(sections);
+    }
+
+    /** Least rise of an element over its air in K at which it may trip. */
+    public double leastRiseKelvin() {
+      double low = limit * (1.0 - accuracy.pickUp());
+      return absolute ? low - air.hottestCelsius() : low;
+    }
+
+    /** Greatest rise of an element over its air in K up to which it may stay. */
+    public double greatestRiseKelvin() {
+      double high = limit * (1.0 + accuracy.pickUp());
+      return absolute ? high - air.coldestCelsius() : high;
+    }
+
+    @Override
+    public boolean measuresCurrent() {
+      return false;
+    }
+
+    @Override
+    public <R> R fold(Cases<R> cases) {
+      return cases.temperature(this);
     }
   }
 
@@ -299,5 +417,11 @@ public sealed interface Device {
     R points(Points device);
 
     R standstill(Standstill device);
+
+    R stepProof(StepProof device);
+
+    R undervoltage(Undervoltage device);
+
+    R temperature(Temperature device);
   }
 }

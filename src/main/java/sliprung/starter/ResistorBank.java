@@ -16,6 +16,7 @@ import java.util.OptionalDouble;
  * @param tolerance of the whole bank, per unit
  * @param hotRise resistance rise when hot, per unit
  * @param enclosureSeconds time constant of the air around the bank
+ * @param fan forced cooling; empty: none is described
  */
 public record ResistorBank(
     Connection connection,
@@ -26,7 +27,8 @@ public record ResistorBank(
     double leadsOhms,
     double tolerance,
     double hotRise,
-    double enclosureSeconds) {
+    double enclosureSeconds,
+    Optional<Fan> fan) {
 
   /** How the three phases of the bank are joined. */
   public enum Connection {
@@ -57,6 +59,55 @@ public record ResistorBank(
       Optional<ShortTime> shortTime,
       OptionalDouble continuousRiseKelvin,
       OptionalDouble shortTimeRiseKelvin) {}
+
+  /**
+   * A fan on which the ratings of the sections rest.
+   *
+   * @param continuousWithout what is left of the continuous current without it, per unit; empty:
+   *     not given
+   * @param timeConstantWithout time constant of a section without it over that with it; empty: that
+   *     of the same heat capacity, 1 over the square of the share of the current
+   */
+  public record Fan(OptionalDouble continuousWithout, OptionalDouble timeConstantWithout) {}
+
+  /** A bank without a fan. */
+  public ResistorBank(
+      Connection connection,
+      CutOut cutOut,
+      List<Section> sections,
+      boolean sameLimit,
+      double permanentOhms,
+      double leadsOhms,
+      double tolerance,
+      double hotRise,
+      double enclosureSeconds) {
+    this(
+        connection,
+        cutOut,
+        sections,
+        sameLimit,
+        permanentOhms,
+        leadsOhms,
+        tolerance,
+        hotRise,
+        enclosureSeconds,
+        Optional.empty());
+  }
+
+  /** The same bank with other ratings of its sections, all of one limit. */
+  public ResistorBank rated(List<Section> others) {
+    return new ResistorBank(
+        connection,
+        cutOut,
+        others,
+        true,
+        permanentOhms,
+        leadsOhms,
+        tolerance,
+        hotRise,
+        enclosureSeconds,
+        fan);
+  }
 
   /** Copies the list. */
   public ResistorBank {

@@ -37,6 +37,7 @@ import java.util.stream.IntStream;
  * @param assumptions defaults that were filled in
  * @param notYetJudged keys that were read and are kept for rules not built yet
  * @param method how starts are computed
+ * @param dialScales scales of real dials, by the dial's name such as {@code protection.F2.dial}
  */
 public record Starter(
     String name,
@@ -64,7 +65,8 @@ public record Starter(
     List<AcceptedDeviation> accepted,
     List<Assumption> assumptions,
     List<String> notYetJudged,
-    Method method) {
+    Method method,
+    Map<String, DialScale> dialScales) {
 
   /** The rule book a starter is held against. */
   public enum Practice {
@@ -151,6 +153,64 @@ public record Starter(
         Method.AUTO);
   }
 
+  /** A starter of whose dials no scale is declared. */
+  public Starter(
+      String name,
+      Practice practice,
+      Supply supply,
+      Motor motor,
+      Load load,
+      ResistorBank resistors,
+      List<Step> steps,
+      Sequence sequence,
+      double timerSpread,
+      double levelSpread,
+      List<Contactor> contactors,
+      List<Breaker> breakers,
+      List<Device> protection,
+      Optional<Conductor> statorConductor,
+      Optional<Conductor> rotorConductor,
+      Duty duty,
+      Limits limits,
+      Map<String, Double> margins,
+      double fuseWear,
+      Interlocks interlocks,
+      Ambient ambient,
+      Map<String, EvidenceGrade> evidence,
+      List<AcceptedDeviation> accepted,
+      List<Assumption> assumptions,
+      List<String> notYetJudged,
+      Method method) {
+    this(
+        name,
+        practice,
+        supply,
+        motor,
+        load,
+        resistors,
+        steps,
+        sequence,
+        timerSpread,
+        levelSpread,
+        contactors,
+        breakers,
+        protection,
+        statorConductor,
+        rotorConductor,
+        duty,
+        limits,
+        margins,
+        fuseWear,
+        interlocks,
+        ambient,
+        evidence,
+        accepted,
+        assumptions,
+        notYetJudged,
+        method,
+        Map.of());
+  }
+
   /** Copies the collections and checks that each section has its step. */
   public Starter {
     steps = List.copyOf(steps);
@@ -162,6 +222,7 @@ public record Starter(
     accepted = List.copyOf(accepted);
     assumptions = List.copyOf(assumptions);
     notYetJudged = List.copyOf(notYetJudged);
+    dialScales = new TreeMap<>(dialScales);
     if (steps.size() != resistors.sections().size()) {
       throw new IllegalArgumentException(
           steps.size() + " steps for " + resistors.sections().size() + " sections");
@@ -252,7 +313,73 @@ public record Starter(
         evidence,
         accepted,
         assumptions,
-        notYetJudged);
+        notYetJudged,
+        method,
+        dialScales);
+  }
+
+  /** The same starter with other steps, as many. */
+  public Starter withSteps(List<Step> others) {
+    return new Starter(
+        name,
+        practice,
+        supply,
+        motor,
+        load,
+        resistors,
+        others,
+        sequence,
+        timerSpread,
+        levelSpread,
+        contactors,
+        breakers,
+        protection,
+        statorConductor,
+        rotorConductor,
+        duty,
+        limits,
+        margins,
+        fuseWear,
+        interlocks,
+        ambient,
+        evidence,
+        accepted,
+        assumptions,
+        notYetJudged,
+        method,
+        dialScales);
+  }
+
+  /** The same starter with another bank of as many sections. */
+  public Starter withResistors(ResistorBank bank) {
+    return new Starter(
+        name,
+        practice,
+        supply,
+        motor,
+        load,
+        bank,
+        steps,
+        sequence,
+        timerSpread,
+        levelSpread,
+        contactors,
+        breakers,
+        protection,
+        statorConductor,
+        rotorConductor,
+        duty,
+        limits,
+        margins,
+        fuseWear,
+        interlocks,
+        ambient,
+        evidence,
+        accepted,
+        assumptions,
+        notYetJudged,
+        method,
+        dialScales);
   }
 
   /** Number of sections of the bank. */

@@ -51,10 +51,9 @@ public sealed interface TorqueCurve {
       if (share >= shares[n - 1]) {
         return torques[n - 1];
       }
-      int found = Arrays.binarySearch(shares, share);
-      int upper = found >= 0 ? found : -found - 1;
-      if (upper == 0) {
-        return torques[0];
+      int upper = 1; // a table has a handful of points and is asked millions of times
+      while (shares[upper] < share) {
+        upper++;
       }
       double w = (share - shares[upper - 1]) / (shares[upper] - shares[upper - 1]);
       return torques[upper - 1] + w * (torques[upper] - torques[upper - 1]);

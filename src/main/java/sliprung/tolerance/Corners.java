@@ -48,32 +48,59 @@ public final class Corners {
 
   /** The conditions that a corner stands for. */
   public static Conditions conditions(Starter starter, Corner corner) {
-    double load =
-        switch (corner.load()) {
-          case LIGHT -> 1.0 + starter.load().spreadLow();
-          case NOMINAL -> 1.0;
-          case HEAVY -> 1.0 + starter.load().spreadHigh();
-        };
+    Conditions common =
+        new Conditions(
+            source(starter.supply(), corner.supplyPu()),
+            corner
+                .inside()
+                .map(Corner.Inside::loadFactor)
+                .orElseGet(() -> load(starter, corner.load())),
+            corner
+                .inside()
+                .map(Corner.Inside::bankFactor)
+                .orElseGet(() -> bank(starter, corner.bank())),
+            timer(starter, corner.timers()),
+            level(starter, corner.timers()));
+    return common.withOwn(
+        corner.steps().stream()
+            .map(side -> new Conditions.StepFactors(timer(starter, side), level(starter, side)))
+            .toList());
+  }
+
+  /** Factor on the load's torques. */
+  static double load(Starter starter, Corner.LoadSide side) {
+    return switch (side) {
+      case LIGHT -> 1.0 + starter.load().spreadLow();
+      case NOMINAL -> 1.0;
+      case HEAVY -> 1.0 + starter.load().spreadHigh();
+    };
+  }
+
+  /** Factor on the bank's resistances. */
+  static double bank(Starter starter, Corner.Bank bank) {
     double tolerance = starter.resistors().tolerance();
-    double bank =
-        switch (corner.bank()) {
-          case NOMINAL -> 1.0;
-          case LOW -> 1.0 - tolerance;
-          case HIGH -> 1.0 + tolerance;
-          case HOT -> (1.0 + tolerance) * (1.0 + starter.resistors().hotRise());
-        };
-    double late =
-        switch (corner.timers()) {
-          case EARLY -> -1.0;
-          case NOMINAL -> 0.0;
-          case LATE -> 1.0;
-        };
-    return new Conditions(
-        source(starter.supply(), corner.supplyPu()),
-        load,
-        bank,
-        1.0 + late * starter.timerSpread(),
-        1.0 - late * starter.levelSpread());
+    return switch (bank) {
+      case NOMINAL -> 1.0;
+      case LOW -> 1.0 - tolerance;
+      case HIGH -> 1.0 + tolerance;
+      case HOT -> (1.0 + tolerance) * (1.0 + starter.resistors().hotRise());
+    };
+  }
+
+  private static double late(Corner.Timers side) {
+    return switch (side) {
+      case EARLY -> -1.0;
+      case NOMINAL, MIXED -> 0.0;
+      case LATE -> 1.0;
+    };
+  }
+
+  private static double timer(Starter starter, Corner.Timers side) {
+    return 1.0 + late(side) * starter.timerSpread();
+  }
+
+  private static double level(Starter starter, Corner.Timers side) {
+    return 1.0 - late(side) * starter.levelSpread();
   }
 
   /**

@@ -67,6 +67,8 @@ class ImportTableTest {
                       "tolerance",
                       RULES)),
               Map.entry(
+                  "dial", List.of("quantity", "numeric", "starter", "tolerance", RULES, "review")),
+              Map.entry(
                   "chart",
                   List.of(
                       "quantity",
@@ -94,6 +96,7 @@ class ImportTableTest {
                       "tolerance",
                       RULES,
                       "review",
+                      "dial",
                       "chart",
                       "com.fasterxml.jackson..",
                       "com.openhtmltopdf..",
@@ -114,6 +117,7 @@ class ImportTableTest {
                       "tolerance",
                       RULES,
                       "review",
+                      "dial",
                       "chart",
                       "record",
                       "picocli.."))));

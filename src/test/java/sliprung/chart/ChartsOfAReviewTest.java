@@ -62,7 +62,7 @@ class ChartsOfAReviewTest {
   @Test
   void should_draw_the_withstand_of_rings_and_sections_at_the_stator_current_that_goes_with_it() {
     double ratio = sheet().scales().ringPerStator();
-    Withstand rings = withstand("slip rings");
+    Withstand rings = withstand("slip rings, at rest");
     Withstand first = withstand("section 1");
     for (int i = 0; i < rings.amps().length; i++) {
       double ring = rings.amps()[i] * ratio;
@@ -72,6 +72,38 @@ class ChartsOfAReviewTest {
       }
     }
     assertThat(sheet().withstand()).extracting(Withstand::label).doesNotContain("rotor cable");
+  }
+
+  @Test
+  void should_draw_the_rotor_through_its_cold_stall_limit_and_contactors_by_their_short_time() {
+    Withstand rotor = withstand("rotor winding, at rest");
+    double shorted = sheet().stall().get(0).amps();
+    int near = 0;
+    while (rotor.amps()[near] < shorted) {
+      near++;
+    }
+    double budget = shorted * shorted * 20.0;
+    double there = rotor.amps()[near];
+    assertThat(rotor.seconds()[near] * there * there).isCloseTo(budget, within(0.02 * budget));
+    assertThat(rotor.isSwitchgear()).isFalse();
+    Withstand line = withstand("K1, closed");
+    int last = line.amps().length - 1;
+    // IEC 60947-4-1, 9.3.5 (from memory): 8 times its greatest rated current for 10 s
+    double rated = REVIEW.starter().contactor("K1").orElseThrow().ratings().get("AC-3");
+    assertThat(line.seconds()[last] * Math.pow(line.amps()[last], 2.0))
+        .isCloseTo(64.0 * rated * rated * 10.0, within(1.0));
+    assertThat(line.isSwitchgear()).isTrue();
+  }
+
+  @Test
+  void should_mark_where_each_step_hangs_at_running_load() {
+    TorqueSpeed chart = TorqueSpeed.of(REVIEW).orElseThrow();
+    assertThat(chart.runningHangs()).isNotEmpty();
+    for (TorqueSpeed.Hang hang : chart.runningHangs()) {
+      assertThat(hang.torque())
+          .isCloseTo(chart.runningTorque(), within(1e-3 * chart.runningTorque()));
+      assertThat(hang.rpm()).isPositive();
+    }
   }
 
   private static Withstand withstand(String label) {

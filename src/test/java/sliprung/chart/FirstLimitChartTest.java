@@ -163,8 +163,7 @@ class FirstLimitChartTest {
         2,
         clears,
         clears,
-        OptionalDouble.empty(),
-        OptionalDouble.empty(),
+        Optional.empty(),
         Optional.empty(),
         Optional.empty());
   }

@@ -31,13 +31,18 @@ class SeriesOfAStartTest {
     double[] low = chart.speedRpm().low().values();
     double[] high = chart.speedRpm().high().values();
     double[] seconds = chart.speedRpm().low().seconds();
+    double[] nominal =
+        Sampling.edges(
+                List.of(REVIEW.start("cold").orElseThrow().history()),
+                Trace::speed,
+                30.0 / Math.PI,
+                chart.endSeconds())
+            .get(0)
+            .values();
     for (int i = 0; i < seconds.length; i++) {
-      double nominal =
-          Sampling.at(REVIEW.start("cold").orElseThrow().history(), Trace::speed, seconds[i])
-              * 30.0
-              / Math.PI;
-      assertThat(nominal).isBetween(low[i] - 1e-6, high[i] + 1e-6);
+      assertThat(nominal[i]).isBetween(low[i] - 1e-6, high[i] + 1e-6);
     }
+    assertThat(nominal[nominal.length - 1]).isGreaterThan(1000.0);
   }
 
   @Test
@@ -107,7 +112,8 @@ class SeriesOfAStartTest {
     TimeCurrentSheet sheet = TimeCurrentSheet.of(REVIEW, List.of());
     assertThat(sheet.stall())
         .extracting(TimeCurrentSheet.Stall::seconds)
-        .containsExactly(20.0, 14.0);
+        .as("the cold one is a point of the winding's own line")
+        .containsExactly(14.0);
     double shorted =
         REVIEW
             .start("rings-shorted")
@@ -117,7 +123,8 @@ class SeriesOfAStartTest {
             .get(0)
             .trace()
             .statorAmps()[0];
-    assertThat(sheet.stall().get(0).amps()).isEqualTo(shorted);
+    // declared at rated voltage; the supply's dip takes some of it
+    assertThat(sheet.stall().get(0).amps()).isBetween(shorted, 1.2 * shorted);
   }
 
   private static Stage triangle() {

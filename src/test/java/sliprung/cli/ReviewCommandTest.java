@@ -50,7 +50,8 @@ class ReviewCommandTest {
 
   private Map<String, byte[]> record(String name) throws IOException {
     Path place = directory.resolve(name);
-    Ran ran = run("review", CRUSHER.toString(), "--out", place.toString(), "--on", "2026-12-01");
+    Ran ran =
+        run("review", CRUSHER.toString(), "--out", place.toString(), "--on", "2026-12-01", "--pdf");
     assertThat(ran.err()).isEmpty();
     Map<String, byte[]> files = new TreeMap<>();
     try (Stream<Path> all = Files.list(place.resolve("crusher"))) {
@@ -79,5 +80,36 @@ class ReviewCommandTest {
     Ran ran = run("review", CRUSHER.toString(), "--paper", "a5");
     assertThat(ran.status()).isEqualTo(ExitStatus.WRONG_INPUT);
     assertThat(ran.err()).contains("expected a4 or letter but found 'a5'");
+  }
+
+  @Test
+  void should_make_a_pdf_only_when_asked_and_say_how_to_ask() throws IOException {
+    Path place = directory.resolve("c").resolve("crusher");
+    Ran plain = run("review", CRUSHER.toString(), "--out", directory.resolve("c").toString());
+    assertThat(place.resolve("review.html")).exists();
+    assertThat(place.resolve("review.pdf")).doesNotExist();
+    assertThat(plain.out()).contains("--pdf makes it on paper too");
+    Files.writeString(place.resolve("review.pdf"), "of another day");
+    Ran again = run("review", CRUSHER.toString(), "--out", directory.resolve("c").toString());
+    assertThat(place.resolve("review.pdf")).hasContent("of another day");
+    assertThat(again.out()).contains("the review.pdf beside it is of an earlier review");
+    Ran letter =
+        run(
+            "review",
+            CRUSHER.toString(),
+            "--out",
+            directory.resolve("c").toString(),
+            "--paper",
+            "letter");
+    assertThat(letter.out()).contains("and review.pdf beside it");
+    assertThat(Files.readAllBytes(place.resolve("review.pdf"))).startsWith("%PDF".getBytes());
+  }
+
+  @Test
+  void should_refuse_a_pdf_without_a_place_for_it() {
+    Ran ran = run("review", CRUSHER.toString(), "--pdf");
+    assertThat(ran.status()).isEqualTo(ExitStatus.WRONG_INPUT);
+    assertThat(ran.err()).contains("give --out DIR");
+    assertThat(ran.out()).isEmpty();
   }
 }

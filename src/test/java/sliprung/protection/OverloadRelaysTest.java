@@ -122,7 +122,7 @@ class OverloadRelaysTest {
 
   @Test
   void a_nema_class_is_judged_at_its_slow_edge_only_and_at_six_times() {
-    EdgeModels fast = new EdgeModels(Edge.FAST, 0.05, 25);
+    EdgeModels fast = new EdgeModels(Edge.FAST, Plants.fan500().starter());
     assertThat(fast.overload(Devices.overload("F2", Devices.NEMA_20, 100)).unknown()).isPresent();
     Meter slow = relays(Devices.NEMA_20, 20).slow().apply(0);
     assertThat(trips(slow, 1e4, 600)).isCloseTo(20, within(1e-6));
@@ -132,11 +132,12 @@ class OverloadRelaysTest {
   void classes_without_a_shortest_time_have_no_fast_edge() {
     for (Edge edge : List.of(Edge.FAST, Edge.MIDDLE)) {
       EdgeModel model =
-          new EdgeModels(edge, 0.05, 25).overload(Devices.overload("F2", Devices.CLASS_2, 100));
+          new EdgeModels(edge, Plants.fan500().starter())
+              .overload(Devices.overload("F2", Devices.CLASS_2, 100));
       assertThat(model.unknown().orElseThrow()).contains("class 2");
     }
     assertThat(
-            new EdgeModels(Edge.SLOW, 0.05, 25)
+            new EdgeModels(Edge.SLOW, Plants.fan500().starter())
                 .overload(Devices.overload("F2", Devices.CLASS_2, 100))
                 .unknown())
         .isEmpty();

@@ -3,6 +3,7 @@ package sliprung.record;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
+import java.util.Map;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.w3c.dom.Element;
@@ -111,7 +112,7 @@ class RecordPartsTest {
   @Test
   void should_break_overlong_words_on_paper_only() {
     String word = "w".repeat(100);
-    assertThat(new ScreenFigures().fitted(word)).isEqualTo(word);
+    assertThat(new ScreenFigures(Map.of()).fitted(word)).isEqualTo(word);
     assertThat(new PaperFigures(Paper.A4).fitted(word)).contains("\u200B");
     assertThat(new PaperFigures(Paper.A4).fitted("ordinary words")).isEqualTo("ordinary words");
   }

@@ -11,6 +11,7 @@ import sliprung.machine.Source;
 import sliprung.protection.DeviceResponse;
 import sliprung.protection.Edge;
 import sliprung.protection.PartResponse;
+import sliprung.protection.StartMargins;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.ComputedStart.From;
 import sliprung.runup.Conditions;
@@ -201,8 +202,7 @@ final class CrusherStarts {
         Math.min(use, 0.99),
         operates,
         operates + opening,
-        fast ? OptionalDouble.of(margin) : OptionalDouble.empty(),
-        fast ? OptionalDouble.of(margin * margin) : OptionalDouble.empty(),
+        fast ? Optional.of(StartMargins.known(margin, margin * margin)) : Optional.empty(),
         Optional.empty(),
         Optional.empty());
   }

@@ -28,6 +28,7 @@ import sliprung.rulebook.locked.LockedWithSequenceRunningIsCleared;
 import sliprung.rulebook.locked.TheRingsStandARotorAtRest;
 import sliprung.rulebook.locked.TheRotorBreaksAway;
 import sliprung.rulebook.overload.OverloadRules;
+import sliprung.rulebook.resistor.EverySectionStandsALostFan;
 import sliprung.rulebook.resistor.EverySectionStandsThePermittedStarts;
 import sliprung.rulebook.resistor.EverySectionStandsTheStartsOfAnHour;
 import sliprung.rulebook.resistor.TheBankHasADutyClass;
@@ -86,6 +87,7 @@ public final class Catalogue {
                 new NoTorquePeakExceedsTheLimit(),
                 new EverySectionStandsThePermittedStarts(),
                 new EverySectionStandsTheStartsOfAnHour(),
+                new EverySectionStandsALostFan(),
                 new TheBankHasADutyClass(),
                 new TheRestartIsKnown()));
     rules.addAll(ContactorRules.ALL);

@@ -89,6 +89,11 @@ public final class TheCablesStandAShortCircuit implements Rule {
     if (devices.isEmpty()) {
       missing.add("protection");
     }
+    if (!devices.isEmpty()
+        && devices.devices().stream()
+            .allMatch(d -> facts.bands().unknown(d, Edge.SLOW).isPresent())) {
+      devices.devices().forEach(d -> missing.add("protection." + d.tag() + ".curve"));
+    }
     if (!missing.isEmpty()) {
       return builder.notJudged(
           missing, "What flows in the stator cable until a short circuit is cleared is not known.");

@@ -154,9 +154,7 @@ final class DeviceOpens {
     List<String> missing = new ArrayList<>();
     StringBuilder why = new StringBuilder();
     Optional<String> unknown =
-        device instanceof Device.SequenceTimer
-            ? Optional.empty()
-            : times.unknown(device, Edge.FAST);
+        device.measuresCurrent() ? times.unknown(device, Edge.FAST) : Optional.empty();
     if (unknown.isPresent()) {
       missing.add("protection." + device.tag() + ".curve");
       why.append(device.tag()).append(": ").append(unknown.get()).append(". ");
@@ -207,7 +205,8 @@ final class DeviceOpens {
         .figures(amps, proven.amps(), "A")
         .says(
             device.tag()
-                + " measures in the rotor circuit and sees no short circuit of the stator. It opens "
+                + (device.measuresCurrent() ? " measures" : " sits")
+                + " in the rotor circuit and sees no short circuit of the stator. It opens "
                 + contactor.tag()
                 + " at up to "
                 + Show.amps(amps)

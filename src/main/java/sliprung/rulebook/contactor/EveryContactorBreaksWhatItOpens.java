@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import sliprung.quantity.Show;
+import sliprung.rulebook.BreakingCapacity;
 import sliprung.rulebook.Facts;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.FindingBuilder;
@@ -80,16 +81,15 @@ public final class EveryContactorBreaksWhatItOpens implements Rule {
   /** A hand stop at any time of any start. */
   private static Finding stops(Facts facts, Contactor contactor) {
     FindingBuilder builder = FindingBuilder.of(facts, INFO, contactor.tag());
-    Ratings ratings = Ratings.of(facts, contactor);
-    Optional<Ratings.Gap> gap = ratings.gap();
-    if (gap.isPresent()) {
-      return builder.notJudged(gap.get().missing(), gap.get().why());
+    Optional<Ratings.Proven> breaks = Ratings.breaking(facts, contactor);
+    if (breaks.isEmpty()) {
+      return withoutCapacity(facts, builder, contactor, "");
     }
     Optional<GreatestStatorCurrent> greatest = GreatestStatorCurrent.of(facts);
     if (greatest.isEmpty()) {
       return builder.notJudged(List.of(), "No start was computed.");
     }
-    Ratings.Proven proven = ratings.breaking();
+    Ratings.Proven proven = breaks.get();
     double amps = greatest.get().amps();
     double margin = proven.amps() / amps;
     return builder
@@ -109,8 +109,11 @@ public final class EveryContactorBreaksWhatItOpens implements Rule {
                 + Show.amps(proven.amps())
                 + " ("
                 + proven.words()
-                + ") at "
-                + Show.ratio(proven.category().powerFactor())
+                + ")"
+                + proven
+                    .category()
+                    .map(c -> " at " + Show.ratio(c.powerFactor()))
+                    .orElse(", at a power factor that is not given")
                 + ".")
         .mend(
             margin < facts.wanted(NAME)
@@ -119,19 +122,27 @@ public final class EveryContactorBreaksWhatItOpens implements Rule {
         .byMargin();
   }
 
+  private static Finding withoutCapacity(
+      Facts facts, FindingBuilder builder, Contactor contactor, String before) {
+    Ratings.Gap gap = Ratings.of(facts, contactor).gap().orElseThrow();
+    return gap.missing().isEmpty()
+        ? builder.notJudged(
+            List.of(BreakingCapacity.missingPath(facts, contactor.tag())),
+            before + gap.why() + " Its own tested breaking current would tell what it breaks.")
+        : builder.notJudged(gap.missing(), before + gap.why());
+  }
+
   private Finding opens(Facts facts, Device device, Contactor contactor) {
     FindingBuilder builder = FindingBuilder.of(facts, INFO, device.tag());
     if (contactor.place() == Contactor.Place.ROTOR) {
       return RotorContactorOpened.finding(facts, builder, device, contactor);
     }
-    Ratings ratings = Ratings.of(facts, contactor);
-    Optional<Ratings.Gap> gap = ratings.gap();
-    if (gap.isPresent()) {
-      return builder.notJudged(
-          gap.get().missing(), device.tag() + " opens " + contactor.tag() + ". " + gap.get().why());
+    Optional<Ratings.Proven> breaks = Ratings.breaking(facts, contactor);
+    if (breaks.isEmpty()) {
+      return withoutCapacity(
+          facts, builder, contactor, device.tag() + " opens " + contactor.tag() + ". ");
     }
-    return new DeviceOpens(
-            facts, builder, device, contactor, times.apply(facts), ratings.breaking())
+    return new DeviceOpens(facts, builder, device, contactor, times.apply(facts), breaks.get())
         .finding();
   }
 }

@@ -1,11 +1,15 @@
 package sliprung.rulebook.contactor;
 
+import java.util.Collections;
+import java.util.IdentityHashMap;
 import java.util.Optional;
+import java.util.Set;
 import sliprung.machine.OperatingPoint;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Exposure;
 import sliprung.rulebook.Facts;
 import sliprung.runup.Stage;
+import sliprung.runup.StartHistory;
 import sliprung.runup.Trace;
 import sliprung.starter.Duty;
 
@@ -24,8 +28,12 @@ record GreatestStatorCurrent(double amps, double powerFactor, ComputedStart star
   /** Over all of it; empty where nothing was computed. */
   static Optional<GreatestStatorCurrent> of(Facts facts) {
     Optional<GreatestStatorCurrent> greatest = Optional.empty();
+    // the starts of a series share one history, and nothing cuts a permitted one short
+    Set<StartHistory> permitted = Collections.newSetFromMap(new IdentityHashMap<>());
     for (ComputedStart start : facts.starts()) {
-      greatest = greater(greatest, in(facts, start));
+      if (start.scenario().isFault() || permitted.add(start.history())) {
+        greatest = greater(greatest, in(facts, start));
+      }
     }
     // A rotor that jams while running meets the last step's circuit at rest, whatever is
     // interlocked.

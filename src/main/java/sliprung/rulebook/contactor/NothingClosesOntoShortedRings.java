@@ -80,7 +80,8 @@ public final class NothingClosesOntoShortedRings implements Rule {
     }
     StandstillCurrent current = shorted.get();
     Ratings.Proven proven = ratings.making();
-    double harder = Asymmetry.against(current.powerFactor(), proven.category().powerFactor());
+    double harder =
+        Asymmetry.against(current.powerFactor(), proven.powerFactor(current.powerFactor()));
     boolean bridging = facts.starter().resistors().cutOut() == ResistorBank.CutOut.BRIDGING;
     return builder
         .at(current.start())

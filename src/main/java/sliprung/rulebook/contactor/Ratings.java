@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
 import sliprung.quantity.Show;
+import sliprung.rulebook.BreakingCapacity;
 import sliprung.rulebook.Facts;
 import sliprung.rulebook.Practice;
 import sliprung.starter.Contactor;
@@ -31,10 +32,16 @@ final class Ratings {
    * A proven current.
    *
    * @param amps RMS
-   * @param category that proves it
+   * @param category that proves it; empty: its own test
    * @param words such as {@code AC-3: 8 × 315 A}
    */
-  record Proven(double amps, Category category, String words) {}
+  record Proven(double amps, Optional<Category> category, String words) {
+
+    /** Power factor of the test; that of its own test is not known and taken as the current's. */
+    double powerFactor(double current) {
+      return category.map(Category::powerFactor).orElse(current);
+    }
+  }
 
   /** The ratings of a contactor in the main circuit of this starter. */
   static Ratings of(Facts facts, Contactor contactor) {
@@ -80,6 +87,19 @@ final class Ratings {
     return new Ratings(categories, Optional.empty());
   }
 
+  /**
+   * What a contactor of the main circuit is proven to break; empty where nothing proves it, see
+   * {@link #gap()}.
+   */
+  static Optional<Proven> breaking(Facts facts, Contactor contactor) {
+    Ratings ratings = of(facts, contactor);
+    if (ratings.gap().isEmpty() && contactor.breakingAmps().isEmpty()) {
+      return Optional.of(ratings.breaking());
+    }
+    return BreakingCapacity.of(facts, contactor.tag())
+        .map(c -> new Proven(c.amps(), Optional.empty(), c.basis()));
+  }
+
   private static Ratings without(List<String> missing, String why) {
     return new Ratings(List.of(), Optional.of(new Gap(missing, why)));
   }
@@ -120,6 +140,6 @@ final class Ratings {
             .max(Comparator.comparingDouble(c -> multiple.applyAsDouble(c) * c.ratedAmps()))
             .orElseThrow();
     double factor = multiple.applyAsDouble(best);
-    return new Proven(factor * best.ratedAmps(), best, best.words(factor));
+    return new Proven(factor * best.ratedAmps(), Optional.of(best), best.words(factor));
   }
 }

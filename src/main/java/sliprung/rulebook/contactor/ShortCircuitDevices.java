@@ -42,15 +42,11 @@ public final class ShortCircuitDevices {
         made.add(member);
       } else if (device instanceof Device.Instantaneous && breaker.isPresent()) {
         made.add(member);
-      } else if (breaker.isPresent() && measuresCurrent(device)) {
+      } else if (breaker.isPresent() && device.measuresCurrent()) {
         delayed.add(member);
       }
     }
     return new ShortCircuitDevices(made.isEmpty() ? delayed : made);
-  }
-
-  private static boolean measuresCurrent(Device device) {
-    return !(device instanceof Device.SequenceTimer) && !(device instanceof Device.Standstill);
   }
 
   /** Whether there is none. */

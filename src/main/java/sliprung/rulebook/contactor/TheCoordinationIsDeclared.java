@@ -13,6 +13,7 @@ import sliprung.rulebook.Practice;
 import sliprung.rulebook.Rule;
 import sliprung.rulebook.Verdict;
 import sliprung.starter.Contactor;
+import sliprung.starter.Device;
 
 /**
  * {@code contactor/short-circuit}: the line contactor and the short-circuit device in series are a
@@ -92,6 +93,20 @@ public final class TheCoordinationIsDeclared implements Rule {
                   + " combination.")
           .mend("Declare the combination that is built in.")
           .build(Verdict.BREACH);
+    }
+    boolean lowVoltageFuse =
+        facts.starter().device(declared.with()).filter(d -> d instanceof Device.Fuse).isPresent();
+    if (lowVoltageFuse && !Device.Fuse.gatesHoldAt(facts.starter().supply().voltage())) {
+      return builder
+          .mend("Describe the fuse that is there: kind points, with its own curve.")
+          .notJudged(
+              List.of("protection." + declared.with() + ".kind"),
+              says
+                  + " "
+                  + declared.with()
+                  + " is described as a low-voltage fuse, and the supply has "
+                  + Show.volts(facts.starter().supply().voltage())
+                  + ": no such combination was ever tested.");
     }
     OptionalDouble fault = facts.starter().supply().faultMaxAmps();
     if (fault.isEmpty()) {

@@ -93,7 +93,8 @@ public final class TheLineContactorMakesWhatItClosesOnto implements Rule {
 
   /** Capacity over current; a current at a lower power factor than tested counts by its peak. */
   private static double margin(StandstillCurrent current, Ratings.Proven proven) {
-    double harder = Asymmetry.against(current.powerFactor(), proven.category().powerFactor());
+    double harder =
+        Asymmetry.against(current.powerFactor(), proven.powerFactor(current.powerFactor()));
     return proven.amps() / (current.amps() * harder);
   }
 
@@ -116,7 +117,7 @@ public final class TheLineContactorMakesWhatItClosesOnto implements Rule {
         + " now and then ("
         + occasional.words()
         + "), at a power factor of "
-        + Show.ratio(occasional.category().powerFactor())
+        + Show.ratio(occasional.powerFactor(closing.powerFactor()))
         + ".";
   }
 
@@ -136,7 +137,7 @@ public final class TheLineContactorMakesWhatItClosesOnto implements Rule {
             + " now and then ("
             + occasional.words()
             + ") at "
-            + Show.ratio(occasional.category().powerFactor())
+            + Show.ratio(occasional.powerFactor(shorted.powerFactor()))
             + "."
         : onto + "; the interlock that proves every step open keeps it from that.";
   }

@@ -95,8 +95,15 @@ final class WinningDevice {
     if (device instanceof Device.SequenceTimer timer) {
       return OptionalDouble.of(timer.seconds());
     }
-    return device instanceof Device.Standstill standstill
-        ? OptionalDouble.of(standstill.seconds())
+    if (device instanceof Device.Standstill standstill) {
+      return OptionalDouble.of(standstill.seconds());
+    }
+    if (device instanceof Device.StepProof proof) {
+      return OptionalDouble.of(proof.seconds());
+    }
+    // a short circuit takes the voltage away: the delay alone stands between
+    return device instanceof Device.Undervoltage undervoltage
+        ? OptionalDouble.of(undervoltage.seconds())
         : OptionalDouble.empty();
   }
 

@@ -11,8 +11,6 @@ import sliprung.starter.Step;
 /** The protective devices' settings against the current of the place where they measure. */
 final class DevicePlausibility implements Device.Cases<Void> {
   /** Greatest a.c. voltage of IEC 60269-1 fuses (from memory). */
-  private static final double LOW_VOLTAGE = 1000.0;
-
   private final Tally tally;
 
   private DevicePlausibility(Tally tally) {
@@ -62,7 +60,7 @@ final class DevicePlausibility implements Device.Cases<Void> {
     tally.ratio(
         "fuse-voltage",
         path(device, "kind"),
-        OptionalDouble.of(starter().supply().voltage() / LOW_VOLTAGE),
+        OptionalDouble.of(starter().supply().voltage() / Device.Fuse.GREATEST_VOLTS),
         "the supply's voltage over the 1 000 V up to which the gates of " + device.tag() + " hold",
         "Above 1000 V a low-voltage fuse has no place; give the real fuse's own curve as points.");
     return null;
@@ -156,6 +154,63 @@ final class DevicePlausibility implements Device.Cases<Void> {
         device.tag() + "'s time",
         Show::seconds,
         "Seconds at rest with the line closed.");
+    return null;
+  }
+
+  @Override
+  public Void stepProof(Device.StepProof device) {
+    OptionalDouble longest =
+        starter().steps().stream()
+            .filter(s -> s.rule() instanceof Step.After)
+            .mapToDouble(s -> ((Step.After) s.rule()).seconds())
+            .max();
+    tally.ratio(
+        "step-proof",
+        path(device, "time"),
+        Tally.over(OptionalDouble.of(device.seconds()), longest),
+        device.tag() + "'s time over the longest step timer",
+        "A proof of steps waits longer than the longest step and runs anew from each closing.");
+    return null;
+  }
+
+  @Override
+  public Void undervoltage(Device.Undervoltage device) {
+    tally.check(
+        "undervoltage",
+        path(device, "below"),
+        OptionalDouble.of(device.share()),
+        device.tag() + "'s voltage",
+        Show::percent,
+        "A share of the rated voltage.");
+    return null;
+  }
+
+  @Override
+  public Void temperature(Device.Temperature device) {
+    if (device.absolute()) {
+      tally.check(
+          "element-temperature",
+          path(device, "limit"),
+          OptionalDouble.of(device.limit()),
+          device.tag() + "'s limit",
+          celsius -> Show.three(celsius) + "\u00a0°C",
+          "Temperature of the element, well above the hottest air.");
+    } else {
+      tally.check(
+          "element-rise",
+          path(device, "rise"),
+          OptionalDouble.of(device.limit()),
+          device.tag() + "'s limit",
+          kelvin -> Show.three(kelvin) + "\u00a0K",
+          "Rise of the element over the air of the bank.");
+    }
+    tally.check(
+        "sensor-lag",
+        path(device, "lag"),
+        OptionalDouble.of(device.lagSeconds()),
+        device.tag() + "'s lag",
+        Show::seconds,
+        "Time constant of the sensor itself, s or min.");
     return null;
   }
 }

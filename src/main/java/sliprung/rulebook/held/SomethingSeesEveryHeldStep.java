@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.Supplier;
 import sliprung.protection.Edge;
 import sliprung.quantity.Show;
 import sliprung.rulebook.ComputedStart;
@@ -16,6 +18,7 @@ import sliprung.rulebook.Rule;
 import sliprung.rulebook.Verdict;
 import sliprung.runup.Scenario;
 import sliprung.runup.Stage;
+import sliprung.runup.Trace;
 import sliprung.starter.Device;
 import sliprung.starter.Starter;
 
@@ -50,14 +53,32 @@ public final class SomethingSeesEveryHeldStep implements Rule {
   @Override
   public Answer judge(Facts facts) {
     List<Finding> findings = new ArrayList<>();
+    Supplier<String> mend = once(() -> mend(facts));
     for (int step = 1; step <= facts.starter().sectionCount(); step++) {
       List<ComputedStart> starts = facts.faultsOnStep(step, k -> k == Scenario.Kind.HELD).toList();
-      findings.add(judge(facts, step, starts));
+      findings.add(judge(facts, step, starts, mend));
     }
     return Answer.of(findings, "the bank has no sections");
   }
 
-  private static Finding judge(Facts facts, int step, List<ComputedStart> starts) {
+  /** One mend serves every step, and trying takes a while: it is sought when first needed. */
+  private static Supplier<String> once(Supplier<String> sought) {
+    AtomicReference<String> kept = new AtomicReference<>();
+    return () -> kept.updateAndGet(found -> found == null ? sought.get() : found);
+  }
+
+  private static String mend(Facts facts) {
+    return HeldStepMend.cheapest(facts)
+        .map(HeldStepMend::sentence)
+        .orElse(
+            "Fit a sequence timer on the last step's auxiliary contact, a proof of every step, an"
+                + " overload in the resistor leads or a temperature sensor on the elements; no"
+                + " setting of one alone was found that clears every held step in time and lets"
+                + " every good start pass.");
+  }
+
+  private static Finding judge(
+      Facts facts, int step, List<ComputedStart> starts, Supplier<String> mend) {
     FindingBuilder builder = FindingBuilder.of(facts, INFO, "step " + step).edge(Edge.SLOW);
     List<String> seeing = new ArrayList<>();
     List<String> blind = new ArrayList<>();
@@ -107,12 +128,24 @@ public final class SomethingSeesEveryHeldStep implements Rule {
             : " No part reaches its limit within 30 min.";
     return builder
         .says(where + ": no fitted device sees it at every corner." + heats + code(facts))
-        .mend(
-            harms
-                ? "Fit a sequence timer on the last step's auxiliary contact; an overload or"
-                    + " temperature sensor in the bank, or a rotation sensor, would see it too."
-                : "Fit a sequence timer.")
+        .mend(harms ? mend.get() + turns(facts, least) : "Fit a sequence timer.")
         .build(harms ? Verdict.BREACH : Verdict.TIGHT);
+  }
+
+  /** A rotation sensor is what people think of first. */
+  private static String turns(Facts facts, ComputedStart least) {
+    List<Stage> stages = least.history().stages();
+    Trace trace = stages.get(stages.size() - 1).trace();
+    double speed = trace.speed()[trace.last()];
+    String rotation =
+        speed > 0.0
+            ? " A rotation sensor sees nothing: the rotor turns at " + Show.rpm(speed) + "."
+            : "";
+    return facts.starter().interlocks().everyStepProven()
+        ? rotation
+            + " interlocks.every-step-proven names no time and opens nothing: give it as kind"
+            + " step-proof to have it credited."
+        : rotation;
   }
 
   private static String code(Facts facts) {

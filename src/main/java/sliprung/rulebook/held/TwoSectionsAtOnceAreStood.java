@@ -12,6 +12,7 @@ import sliprung.rulebook.Finding;
 import sliprung.rulebook.FindingBuilder;
 import sliprung.rulebook.MakingCapacity;
 import sliprung.rulebook.Rule;
+import sliprung.runup.ClosingPeak;
 import sliprung.runup.Scenario;
 import sliprung.runup.Stage;
 import sliprung.starter.Contactor;
@@ -65,11 +66,7 @@ public final class TwoSectionsAtOnceAreStood implements Rule {
 
     /** This and one more closing. */
     static Made worse(Made before, ComputedStart start, Stage stage, double poleAmps) {
-      double torque =
-          stage
-              .peak()
-              .map(p -> Math.max(p.torque(), -p.leastTorque()))
-              .orElse(stage.entry().torque());
+      double torque = stage.peak().map(ClosingPeak::greatestTorque).orElse(stage.entry().torque());
       double greatest = before == null ? torque : Math.max(before.greatestTorque(), torque);
       return before == null || poleAmps > before.poleAmps()
           ? new Made(start, poleAmps, stage.entry().statorAmps(), stage.entry().torque(), greatest)
@@ -188,7 +185,8 @@ public final class TwoSectionsAtOnceAreStood implements Rule {
                   + Show.torque(worst.torque())
                   + " at rest; "
                   + line.tag()
-                  + " makes it. Nothing proves the steps open before the line contactor closes.",
+                  + " makes it. Nothing proves the steps open before the line contactor closes."
+                  + residual(scenario, starts),
               "Prove every step contactor open before the line contactor closes"
                   + " (interlocks.steps-open-before-line)."));
     }
@@ -198,13 +196,33 @@ public final class TwoSectionsAtOnceAreStood implements Rule {
     return findings;
   }
 
+  /** What a rotor that still turns adds; how long the line was off is not an input. */
+  private static String residual(Scenario scenario, List<ComputedStart> starts) {
+    if (scenario.kind() != Scenario.Kind.RECLOSED) {
+      return "";
+    }
+    double amps = 0.0;
+    double torque = 0.0;
+    for (ComputedStart start : starts) {
+      Optional<ClosingPeak> peak = start.history().stages().get(0).peak();
+      amps = Math.max(amps, peak.map(ClosingPeak::statorAmps).orElse(0.0));
+      torque = Math.max(torque, peak.map(ClosingPeak::greatestTorque).orElse(0.0));
+    }
+    return " While the rotor still turns, it closes onto the residual voltage: up to "
+        + Show.amps(amps)
+        + " peak and "
+        + Show.torque(torque)
+        + " either way. How long the line is off is not an input: the worst of any dead time"
+        + " counts, at the worst angle. No making capacity is proven against such a peak.";
+  }
+
   private static Finding making(
       Facts facts, String subject, Contactor contactor, Made made, String sentence, String mend) {
     FindingBuilder builder = FindingBuilder.of(facts, INFO, subject).at(made.start());
     Optional<MakingCapacity> capacity = MakingCapacity.of(facts, contactor);
     if (capacity.isEmpty()) {
       return builder.notJudged(
-          MakingCapacity.missing(contactor),
+          MakingCapacity.missing(facts, contactor),
           sentence + " Nothing proves what " + contactor.tag() + " makes.");
     }
     OptionalDouble torqueLimit = facts.starter().limits().torquePeak();
@@ -240,8 +258,12 @@ public final class TwoSectionsAtOnceAreStood implements Rule {
     if (margin < facts.wanted(INFO.name())) {
       builder.mend(mend);
     }
-    // peaks of failed starts are not computed at every corner
-    return torqueLimit.isPresent() ? builder.mend(mend).byMarginAtBestTight() : builder.byMargin();
+    // Peaks of failed starts are not computed at every corner; those of reclosing are, but a making
+    // capacity says nothing of a closing onto a residual voltage.
+    boolean reclosed = made.start().scenario().kind() == Scenario.Kind.RECLOSED;
+    return torqueLimit.isPresent() || reclosed
+        ? builder.mend(mend).byMarginAtBestTight()
+        : builder.byMargin();
   }
 
   /** Pole current over ring current; a delta is never even. */

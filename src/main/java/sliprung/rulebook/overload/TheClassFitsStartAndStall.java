@@ -76,11 +76,7 @@ public final class TheClassFitsStartAndStall implements Rule {
               + ", which has no shortest time: nothing says that it rides through a start. Its own"
               + " curve, as kind points, would.");
     }
-    Optional<ComputedStart> nearest =
-        facts
-            .permitted()
-            .filter(s -> margin(s, relay.tag()).isPresent())
-            .min(Comparator.comparingDouble(s -> margin(s, relay.tag()).getAsDouble()));
+    Optional<ComputedStart> nearest = ComputedStart.nearest(facts.permitted(), relay.tag());
     if (nearest.isEmpty()) {
       return builder.notJudged(List.of(), "No permitted start was computed.");
     }
@@ -259,30 +255,28 @@ public final class TheClassFitsStartAndStall implements Rule {
                 .starter()
                 .withProtection(classes.stream().<Device>map(c -> of(relay, c, c.name())).toList()),
             facts.machine());
-    Map<String, Double> margins = new LinkedHashMap<>();
+    Map<String, Boolean> rides = new LinkedHashMap<>();
     for (ComputedStart start : nearestOfEachSeries(facts, relay.tag())) {
       for (DeviceResponse response :
           evaluator.devices(start.history(), preload(facts, start), start.place())) {
-        if (response.currentMargin().isPresent()) {
-          margins.merge(response.device(), response.currentMargin().getAsDouble(), Math::min);
-        }
+        response
+            .margins()
+            .ifPresent(
+                m -> rides.merge(response.device(), !m.currentBelow(wanted), Boolean::logicalAnd));
       }
     }
-    return classes.stream().filter(c -> margins.getOrDefault(c.name(), 0.0) >= wanted).findFirst();
+    return classes.stream().filter(c -> rides.getOrDefault(c.name(), false)).findFirst();
   }
 
   private static List<ComputedStart> nearestOfEachSeries(Facts facts, String tag) {
     return facts
         .permitted()
-        .filter(s -> margin(s, tag).isPresent())
         .collect(
             Collectors.groupingBy(
-                s -> s.from().word() + s.place(),
-                java.util.TreeMap::new,
-                Collectors.minBy(Comparator.comparingDouble(s -> margin(s, tag).getAsDouble()))))
+                s -> s.from().word() + s.place(), java.util.TreeMap::new, Collectors.toList()))
         .values()
         .stream()
-        .flatMap(Optional::stream)
+        .flatMap(series -> ComputedStart.nearest(series.stream(), tag).stream())
         .toList();
   }
 
@@ -301,7 +295,7 @@ public final class TheClassFitsStartAndStall implements Rule {
   }
 
   /** The classes with a shortest time that the practice has figures for, least first. */
-  static List<TripClass> classes(Facts facts) {
+  public static List<TripClass> classes(Facts facts) {
     return facts.practice().figures().keySet().stream()
         .filter(k -> k.startsWith(KEY) && k.endsWith(".shortest"))
         .map(k -> k.substring(KEY.length(), k.length() - ".shortest".length()))

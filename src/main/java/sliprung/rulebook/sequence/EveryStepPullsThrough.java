@@ -119,7 +119,7 @@ public final class EveryStepPullsThrough implements Rule {
         continue;
       }
       double settled = measured(facts, rule, last.trace());
-      double level = levelOf(rule) * start.history().conditions().levelFactor();
+      double level = levelOf(rule) * start.history().conditions().levelFactor(step);
       double margin = settled <= 0.0 ? Double.POSITIVE_INFINITY : level / settled;
       if (worst == null || margin < least) {
         least = margin;

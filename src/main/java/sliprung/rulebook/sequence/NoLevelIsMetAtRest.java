@@ -69,7 +69,7 @@ public final class NoLevelIsMetAtRest implements Rule {
               ? standing(facts, start, step, stator)
               : stator ? stage.entry().statorAmps() : stage.entry().ringAmps();
       double level =
-          EveryStepPullsThrough.levelOf(rule) * start.history().conditions().levelFactor();
+          EveryStepPullsThrough.levelOf(rule) * start.history().conditions().levelFactor(step);
       if (amps / level < least) {
         least = amps / level;
         worst = start;

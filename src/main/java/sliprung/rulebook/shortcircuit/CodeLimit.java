@@ -28,7 +28,7 @@ record CodeLimit(String kind, double share, double allowedAmps, double exception
       return Optional.of(
           new CodeLimit("instantaneous breaker", share, share * fullLoadAmps, most * fullLoadAmps));
     }
-    if (device instanceof Device.SequenceTimer || device instanceof Device.Standstill) {
+    if (!device.measuresCurrent()) {
       return Optional.empty();
     }
     boolean small = fullLoadAmps <= practice.figure("430.52.breaker.small-up-to").value();

@@ -2,7 +2,10 @@ package sliprung.rulebook.shortcircuit;
 
 import sliprung.starter.Device;
 
-/** Rated current of a fuse or breaker, pick-up or dial of a relay, A; infinite of a timer. */
+/**
+ * Rated current of a fuse or breaker, pick-up or dial of a relay, A; infinite of what measures no
+ * current.
+ */
 final class SettingAmps implements Device.Cases<Double> {
   @Override
   public Double fuse(Device.Fuse device) {
@@ -46,6 +49,21 @@ final class SettingAmps implements Device.Cases<Double> {
 
   @Override
   public Double standstill(Device.Standstill device) {
+    return Double.POSITIVE_INFINITY;
+  }
+
+  @Override
+  public Double stepProof(Device.StepProof device) {
+    return Double.POSITIVE_INFINITY;
+  }
+
+  @Override
+  public Double undervoltage(Device.Undervoltage device) {
+    return Double.POSITIVE_INFINITY;
+  }
+
+  @Override
+  public Double temperature(Device.Temperature device) {
     return Double.POSITIVE_INFINITY;
   }
 }

@@ -44,11 +44,30 @@ public final class TheGreatestFaultCurrentIsBroken implements Rule {
     for (Device device : facts.starter().protection()) {
       if (device instanceof Device.Fuse fuse && fuse.fitting().place() == Device.Place.STATOR) {
         findings.add(
-            judge(
-                facts, fuse.tag(), fuse.breakingAmps(), "protection." + fuse.tag() + ".breaking"));
+            Device.Fuse.gatesHoldAt(facts.starter().supply().voltage())
+                ? judge(
+                    facts,
+                    fuse.tag(),
+                    fuse.breakingAmps(),
+                    "protection." + fuse.tag() + ".breaking")
+                : lowVoltageFuse(facts, fuse));
       }
     }
     return Answer.of(findings, "no breaker and no fuse is described");
+  }
+
+  /** What a low-voltage fuse breaks it breaks at low voltage. */
+  private static Finding lowVoltageFuse(Facts facts, Device.Fuse fuse) {
+    return FindingBuilder.of(facts, INFO, fuse.tag())
+        .mend("Describe the fuse that is there: kind points, with its own curve.")
+        .notJudged(
+            List.of("protection." + fuse.tag() + ".kind"),
+            fuse.tag()
+                + " is described as a low-voltage fuse, whose breaking capacity ends at "
+                + Show.volts(Device.Fuse.GREATEST_VOLTS)
+                + "; the supply has "
+                + Show.volts(facts.starter().supply().voltage())
+                + ".");
   }
 
   private static Finding judge(Facts facts, String tag, OptionalDouble breaks, String path) {

@@ -12,6 +12,7 @@ import sliprung.rulebook.contactor.BandTimes;
 import sliprung.rulebook.contactor.Crossing;
 import sliprung.rulebook.contactor.OperatingTimes;
 import sliprung.rulebook.contactor.ShortCircuitDevices;
+import sliprung.starter.Device;
 
 /**
  * {@code short-circuit/minimum}: the least fault current at the starter is cleared within five
@@ -65,6 +66,21 @@ public final class TheLeastFaultCurrentIsCleared implements Rule {
           "The least fault current is not given: whether "
               + devices.tags()
               + " would see it is open.");
+    }
+    List<Device> unknown =
+        devices.devices().stream()
+            .filter(d -> facts.bands().unknown(d, sliprung.protection.Edge.SLOW).isPresent())
+            .toList();
+    if (!unknown.isEmpty() && unknown.size() == devices.devices().size()) {
+      return builder
+          .mend("Give the device's own curve as points.")
+          .notJudged(
+              unknown.stream().map(d -> "protection." + d.tag() + ".curve").toList(),
+              "Whether "
+                  + devices.tags()
+                  + " sees the least fault current is open: "
+                  + facts.bands().unknown(unknown.get(0), sliprung.protection.Edge.SLOW).get()
+                  + ".");
     }
     double seconds = facts.practice().figure("short-circuit.seconds").value();
     double amps =

@@ -1,7 +1,6 @@
 package sliprung.rulebook.shortcircuit;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -110,11 +109,7 @@ public final class TheShortCircuitDeviceIsRatedAsAllowed implements Rule {
   }
 
   private static Finding iec(Facts facts, FindingBuilder builder, Device device) {
-    Optional<ComputedStart> nearest =
-        facts
-            .permitted()
-            .filter(s -> margin(s, device.tag()).isPresent())
-            .min(Comparator.comparingDouble(s -> margin(s, device.tag()).getAsDouble()));
+    Optional<ComputedStart> nearest = ComputedStart.nearest(facts.permitted(), device.tag());
     if (nearest.isEmpty()) {
       return builder.notJudged(
           List.of(), "How near a permitted start comes to operating it is not known.");

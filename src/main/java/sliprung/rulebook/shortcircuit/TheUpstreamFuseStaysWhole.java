@@ -60,6 +60,11 @@ public final class TheUpstreamFuseStaysWhole implements Rule {
             + Show.amps(smaller.ratingAmps());
     int low = position(facts, smaller);
     int high = position(facts, greater);
+    if (!Device.Fuse.gatesHoldAt(facts.starter().supply().voltage())) {
+      return builder.notJudged(
+          List.of("protection." + greater.tag() + ".kind"),
+          pair + ": the ratio of 1.6 holds for low-voltage fuses alone.");
+    }
     if (low < 0 || high < 0) {
       return builder.notJudged(
           List.of(),

@@ -10,19 +10,22 @@ import sliprung.rulebook.Facts;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.FindingBuilder;
 import sliprung.rulebook.Rule;
+import sliprung.rulebook.Verdict;
 import sliprung.runup.Stage;
 import sliprung.starter.Contactor;
 import sliprung.starter.Step;
 
 /**
  * {@code trip/voltage-dip}: with the control circuit on the motor's own supply, the voltage just
- * after each closing still closes the contactor that closes, and never lets one drop that is in.
+ * after each closing still closes the contactor that closes, and never lets one drop that is in; no
+ * undervoltage relay is touched; and after a dip from outside nothing closes with steps still in.
  */
 public final class EveryContactorStandsTheDip implements Rule {
   private static final Info INFO =
       new Info(
           "trip/voltage-dip",
-          "Do step and line contactors stand the dip at each closing?",
+          "Do contactors and undervoltage relays stand the dip at each closing, and what closes when"
+              + " a voltage that was lost returns?",
           "IEC 60947-4-1, 8.2.1.2 limits of operation",
           List.of(
               "supply",
@@ -37,7 +40,9 @@ public final class EveryContactorStandsTheDip implements Rule {
               "resistors.hot-rise",
               "steps",
               "timer-spread",
-              "level-spread"));
+              "level-spread",
+              "interlocks",
+              "protection.{subject}"));
 
   private record Dip(ComputedStart start, double volts, double amps, double limit) {
     double margin() {
@@ -54,12 +59,10 @@ public final class EveryContactorStandsTheDip implements Rule {
   public Answer judge(Facts facts) {
     double rated = facts.starter().supply().voltage();
     if (facts.starter().supply().faultMinAmps().isEmpty()) {
-      return new Answer.Findings(
-          List.of(
-              FindingBuilder.of(facts, INFO, "contactors")
-                  .notJudged(
-                      List.of("supply.fault-current.min"),
-                      "The source is taken as ideal, and an ideal source does not dip.")));
+      List<Finding> open = new ArrayList<>();
+      open.add(ideal(facts, "contactors"));
+      UndervoltageInStarts.devices(facts).forEach(d -> open.add(ideal(facts, d.tag())));
+      return new Answer.Findings(open);
     }
     double closes = facts.practice().figure("coil.closes").value() * rated;
     double holds = facts.practice().figure("coil.holds").value() * rated;
@@ -71,6 +74,7 @@ public final class EveryContactorStandsTheDip implements Rule {
       worst.put(step.contactor(), null);
     }
     for (ComputedStart start : facts.permitted().filter(s -> s.place() == 1).toList()) {
+      List<String> in = new ArrayList<>();
       for (Stage stage : start.history().stages()) {
         double volts = stage.entry().terminalVolts();
         double amps = stage.entry().statorAmps();
@@ -78,6 +82,8 @@ public final class EveryContactorStandsTheDip implements Rule {
         for (Contactor line : facts.starter().lineContactors()) {
           put(worst, line.tag(), new Dip(start, volts, amps, holds));
         }
+        in.forEach(tag -> put(worst, tag, new Dip(start, volts, amps, holds)));
+        in.add(stage.closedBy());
       }
     }
     List<Finding> findings = new ArrayList<>();
@@ -87,7 +93,59 @@ public final class EveryContactorStandsTheDip implements Rule {
             findings.add(finding(facts, tag, dip, closes));
           }
         });
+    UndervoltageInStarts.devices(facts)
+        .forEach(d -> findings.add(UndervoltageInStarts.finding(facts, INFO, d)));
+    findings.add(onReturn(facts));
     return Answer.of(findings, "nothing closes");
+  }
+
+  private static Finding ideal(Facts facts, String subject) {
+    return FindingBuilder.of(facts, INFO, subject)
+        .notJudged(
+            List.of("supply.fault-current.min"),
+            "The source is taken as ideal, and an ideal source does not dip.");
+  }
+
+  /**
+   * What closes again when the voltage comes back after a dip from outside: between the voltage
+   * that surely drops a coil and the one that surely holds it, anything may have dropped.
+   */
+  private static Finding onReturn(Facts facts) {
+    double drops = facts.practice().figure("coil.drops").value();
+    double holds = facts.practice().figure("coil.holds").value();
+    String line =
+        facts.starter().lineContactors().stream()
+            .map(Contactor::tag)
+            .reduce((a, b) -> a + " and " + b)
+            .orElse("the line contactor");
+    FindingBuilder builder = FindingBuilder.of(facts, INFO, "return of the voltage");
+    String says =
+        "A dip of the supply to between "
+            + Show.percent(drops)
+            + " and "
+            + Show.percent(holds)
+            + " may drop "
+            + line
+            + ", step contactors, or some of them. ";
+    if (facts.starter().interlocks().stepsOpenBeforeLine()) {
+      return builder
+          .says(
+              says
+                  + "The interlock proves every step contactor open before "
+                  + line
+                  + " closes again.")
+          .build(Verdict.CLEAR);
+    }
+    return builder
+        .says(
+            says
+                + "When the voltage returns, nothing keeps "
+                + line
+                + " from closing with steps still in; held/skipped judges that start.")
+        .mend(
+            "Prove every step contactor open before the line contactor closes, and let a start"
+                + " begin by hand after a dip.")
+        .build(Verdict.TIGHT);
   }
 
   private static void put(Map<String, Dip> worst, String tag, Dip dip) {

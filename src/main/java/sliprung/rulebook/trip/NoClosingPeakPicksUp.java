@@ -11,6 +11,7 @@ import sliprung.rulebook.Finding;
 import sliprung.rulebook.FindingBuilder;
 import sliprung.rulebook.Rule;
 import sliprung.runup.ClosingPeak;
+import sliprung.runup.Scenario;
 import sliprung.runup.Stage;
 import sliprung.runup.Trace;
 import sliprung.starter.Device;
@@ -107,7 +108,8 @@ public final class NoClosingPeakPicksUp implements Rule {
                 + Show.amps(element.pickUpAmps())
                 + " RMS, overreach "
                 + Show.percent(element.overreach())
-                + ").")
+                + ")."
+                + reclosed(facts, element, pickUp))
         .mend(
             margin < facts.wanted(INFO.name())
                 ? "Raise its pick-up, or give it a short delay; check that it still sees the least"
@@ -149,6 +151,27 @@ public final class NoClosingPeakPicksUp implements Rule {
     }
     boolean dead = element.fitting().place() == Device.Place.BANK && !stage.bankIn();
     return new Met(dead ? 0.0 : amps, start, when);
+  }
+
+  /**
+   * A reclosing is a fault: that the element picks up then is no defect, but whoever looks for the
+   * cause should know of it.
+   */
+  private static String reclosed(Facts facts, Device.Instantaneous element, double pickUp) {
+    double amps = 0.0;
+    for (ComputedStart start : facts.faults(Scenario.Kind.RECLOSED).toList()) {
+      Stage stage = start.history().stages().get(0);
+      if (stage.peak().isPresent()) {
+        amps = Math.max(amps, closing(element, start, stage, stage.peak().get()).amps());
+      }
+    }
+    if (amps < pickUp) {
+      return "";
+    }
+    return " Should the line return while the rotor turns with every step contactor closed, it may"
+        + " measure "
+        + Show.amps(amps)
+        + " and pick up.";
   }
 
   private static Met running(Device.Instantaneous element, ComputedStart start, Stage stage) {

@@ -69,21 +69,25 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
         unknown = unknown == null ? start : unknown;
         continue;
       }
-      Nearest here = new Nearest(start, found, margin(device, found));
-      nearest = nearer(nearest, here);
-      if (found.bound().isEmpty()) {
-        certain = nearer(certain, here);
+      boolean thinner = nearest == null || isBelow(device, found, nearest.margin());
+      boolean sure = found.bound().isEmpty();
+      boolean surelyThinner = sure && (certain == null || isBelow(device, found, certain.margin()));
+      if (thinner || surelyThinner) {
+        Nearest here = new Nearest(start, found, margin(device, found));
+        nearest = thinner ? here : nearest;
+        certain = surelyThinner ? here : certain;
       }
     }
     if (certain != null && certain.margin() < 1.0) {
       return byMargin(facts, builder, device, certain);
     }
     if (unknown != null) {
+      boolean current = device.measuresCurrent();
       return builder
           .at(unknown)
-          .mend("Give the device's own curve as points.")
+          .mend(current ? "Give the device's own curve as points." : "Give what it needs.")
           .notJudged(
-              List.of("protection." + device.tag() + ".curve"),
+              List.of(current ? "protection." + device.tag() + ".curve" : "resistors.sections"),
               unknown.device(device.tag(), Edge.FAST).orElseThrow().notJudged().orElseThrow());
     }
     if (nearest.margin() < 1.0) {
@@ -102,11 +106,6 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
   /** The start that comes nearest to operating the device, of those looked at. */
   private record Nearest(ComputedStart start, DeviceResponse response, double margin) {}
 
-  /** The first of the thinnest: the nominal corner comes first. */
-  private static Nearest nearer(Nearest so, Nearest here) {
-    return so == null || here.margin() < so.margin() ? here : so;
-  }
-
   private static Finding byMargin(
       Facts facts, FindingBuilder builder, Device device, Nearest nearest) {
     builder
@@ -124,8 +123,22 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
 
   /** Timers have no current margin: how much longer the start may take. */
   private static double margin(Device device, DeviceResponse response) {
-    boolean timer = device instanceof Device.SequenceTimer || device instanceof Device.Standstill;
-    return timer ? response.stretchMargin().orElseThrow() : response.currentMargin().orElseThrow();
+    return isTimer(device)
+        ? response.stretchMargin().orElseThrow()
+        : response.currentMargin().orElseThrow();
+  }
+
+  private static boolean isTimer(Device device) {
+    return device instanceof Device.SequenceTimer
+        || device instanceof Device.Standstill
+        || device instanceof Device.StepProof;
+  }
+
+  /** Whether the margin is below another: asked first, since it costs less than the margin. */
+  private static boolean isBelow(Device device, DeviceResponse response, double least) {
+    return isTimer(device)
+        ? response.stretchMargin().orElseThrow() < least
+        : response.margins().orElseThrow().currentBelow(least);
   }
 
   /** The margin under which a trip class alone proves nothing more than tight. */
@@ -161,11 +174,11 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
     String room =
         Double.isInfinite(margin)
             ? ": nothing near it"
-            : device instanceof Device.SequenceTimer || device instanceof Device.Standstill
+            : isTimer(device)
                 ? "; the start may take " + Show.ratio(margin) + " times as long"
-                : "; the current may be "
-                    + Show.ratio(margin)
-                    + " times as high"
+                : (device instanceof Device.Undervoltage
+                        ? "; the voltage may be " + Show.ratio(margin) + " times lower"
+                        : "; the current may be " + Show.ratio(margin) + " times as high")
                     + response.stretchMargin().stream()
                         .filter(Double::isFinite)
                         .mapToObj(s -> ", or the start " + Show.ratio(s) + " times as long")
@@ -191,6 +204,12 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
                 + " a hot restart.",
             Device.SequenceTimer.class,
             "Set it longer.",
+            Device.StepProof.class,
+            "Set it longer.",
+            Device.Undervoltage.class,
+            "Lower its voltage, lengthen its delay, or stiffen the supply.",
+            Device.Temperature.class,
+            "Raise its limit as far as the sections allow, or shorten the series of starts.",
             Device.Fuse.class,
             "Take a higher rating under the declared coordination.");
     return cures.getOrDefault(device.getClass(), "Raise its pick-up or its time.");

@@ -51,8 +51,7 @@ public final class NothingCreepsToATripInService implements Rule {
       }
     }
     for (Device device : facts.starter().protection()) {
-      boolean timer = device instanceof Device.SequenceTimer || device instanceof Device.Standstill;
-      if (timer || device.fitting().place() == Device.Place.BANK) {
+      if (!device.measuresCurrent() || device.fitting().place() == Device.Place.BANK) {
         continue;
       }
       Double pickUp = facts.fastPickUps().get(device.tag());

@@ -67,6 +67,7 @@ class CatalogueTest {
           "conductor/withstand",
           "resistor/start",
           "resistor/duty",
+          "resistor/fan",
           "resistor/class",
           "resistor/restart",
           "data/nameplate",

@@ -4,7 +4,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import sliprung.fixture.CrusherFacts;
 import sliprung.protection.DeviceResponse;
@@ -28,8 +27,7 @@ class ExtrapolatedTest {
         1.2,
         9.0,
         9.0,
-        OptionalDouble.empty(),
-        OptionalDouble.empty(),
+        Optional.empty(),
         Optional.of("below its first gate"),
         Optional.empty());
   }

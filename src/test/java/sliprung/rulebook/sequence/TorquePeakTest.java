@@ -11,6 +11,7 @@ import sliprung.rulebook.Facts;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.Rule;
 import sliprung.rulebook.Verdict;
+import sliprung.runup.Scenario;
 
 class TorquePeakTest {
   private static final Rule RULE = new NoTorquePeakExceedsTheLimit();
@@ -62,6 +63,38 @@ class TorquePeakTest {
   void without_peaks_nothing_is_clear() {
     Finding finding = CrusherFacts.finding(RULE, WithoutPeaks.of(facts(1e6)), "gear or belt");
     assertThat(finding.verdict()).isEqualTo(Verdict.NOT_JUDGED);
+  }
+
+  private static Facts open(double limit) {
+    return CrusherFacts.of(
+        DUTY,
+        String.format(Locale.ROOT, "limits: {torque-peak: %.9f N·m}\n", limit) + DUTY,
+        "steps-open-before-line: true",
+        "steps-open-before-line: false");
+  }
+
+  private static double reclosed() {
+    return open(1e6)
+        .faults(Scenario.Kind.RECLOSED)
+        .mapToDouble(s -> s.history().stages().get(0).peak().orElseThrow().greatestTorque())
+        .max()
+        .orElseThrow();
+  }
+
+  @Test
+  void a_reclosing_that_no_interlock_rules_out_is_held_against_the_limit() {
+    assertThat(reclosed()).isGreaterThan(2.0 * greatest());
+    Finding breach = CrusherFacts.finding(RULE, open(0.999 * reclosed()), "gear or belt, reclosed");
+    assertThat(breach.verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(CrusherFacts.says(breach)).contains("the worst of any dead time counts");
+    Finding clear = CrusherFacts.finding(RULE, open(1.001 * reclosed()), "gear or belt, reclosed");
+    assertThat(clear.verdict()).isEqualTo(Verdict.CLEAR);
+  }
+
+  @Test
+  void an_interlock_that_proves_the_steps_open_leaves_only_permitted_starts() {
+    Rule.Answer answer = RULE.judge(facts(1e6));
+    assertThat(((Rule.Answer.Findings) answer).findings()).hasSize(1);
   }
 
   @Test

@@ -5,7 +5,6 @@ import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -15,6 +14,7 @@ import sliprung.fixture.Judged;
 import sliprung.fixture.StarterText;
 import sliprung.protection.DeviceResponse;
 import sliprung.protection.Edge;
+import sliprung.protection.StartMargins;
 import sliprung.quantity.Show;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Facts;
@@ -197,8 +197,7 @@ class PermittedStartTest {
         1.0 / currentMargin,
         currentMargin < 1.0 ? 3.0 : Double.POSITIVE_INFINITY,
         currentMargin < 1.0 ? 3.0 : Double.POSITIVE_INFINITY,
-        OptionalDouble.of(currentMargin),
-        OptionalDouble.empty(),
+        Optional.of(StartMargins.known(currentMargin, 1.0)),
         bound,
         Optional.empty());
   }

@@ -99,4 +99,58 @@ class VoltageDipTest {
     assertThat(finding.verdict()).isEqualTo(Verdict.NOT_JUDGED);
     assertThat(finding.missing()).containsExactly("supply.fault-current.min");
   }
+
+  private static String[] undervoltage(double share, String time) {
+    return new String[] {
+      "F1: {kind: fuse",
+      String.format(
+          java.util.Locale.ROOT,
+          "F7: {kind: undervoltage, below: %.4f %%, time: %s, accuracy: {pick-up: 5 %%}, trips: K1}"
+              + "%n  F1: {kind: fuse",
+          100.0 * share,
+          time)
+    };
+  }
+
+  /** The least voltage of the start, as a share of rated: the relay's 5 % come on top. */
+  @Test
+  void should_turn_where_the_highest_setting_meets_the_least_voltage() {
+    double least = judged("F7", undervoltage(0.5, "0 s")).value().getAsDouble() / 690.0;
+    assertThat(least).isBetween(0.8, 1.0);
+
+    Finding inside = judged("F7", undervoltage(0.999 * least / 1.05, "0 s"));
+    Finding outside = judged("F7", undervoltage(1.001 * least / 1.05, "0 s"));
+    assertThat(inside.verdict()).isEqualTo(Verdict.CLEAR);
+    assertThat(outside.verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(says(outside)).contains("opens K1");
+  }
+
+  @Test
+  void should_call_it_tight_where_the_delay_alone_rides_through() {
+    double least = judged("F7", undervoltage(0.5, "0 s")).value().getAsDouble() / 690.0;
+    Finding delayed = judged("F7", undervoltage(1.001 * least / 1.05, "20 s"));
+
+    assertThat(delayed.verdict()).isEqualTo(Verdict.TIGHT);
+    assertThat(says(delayed)).contains("on its delay of 20 s alone");
+  }
+
+  @Test
+  void should_not_judge_an_undervoltage_relay_on_an_ideal_source() {
+    String[] relay = undervoltage(0.7, "1 s");
+    Finding finding = judged("F7", relay[0], relay[1], "  " + FAULT + "\n", "");
+
+    assertThat(finding.verdict()).isEqualTo(Verdict.NOT_JUDGED);
+  }
+
+  @Test
+  void should_say_what_keeps_steps_from_being_in_when_the_voltage_returns() {
+    assertThat(judged("return of the voltage").verdict()).isEqualTo(Verdict.CLEAR);
+    Finding unproven =
+        judged(
+            "return of the voltage",
+            "steps-open-before-line: true",
+            "steps-open-before-line: false");
+    assertThat(unproven.verdict()).isEqualTo(Verdict.TIGHT);
+    assertThat(says(unproven)).contains("with steps still in");
+  }
 }
