@@ -7,7 +7,9 @@ import java.nio.file.Path;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.Callable;
@@ -108,26 +110,46 @@ final class ReviewCommand implements Callable<Integer> {
       double seconds = (System.nanoTime() - from) / 1e9;
       done.add(new Done(files.get(i), review, read.get(i), seconds));
     }
+    Optional<String> failure = directory == null ? Optional.empty() : write(done);
     Summary summary = new Summary(out, terminal, everything);
     int status = ExitStatus.CLEAR;
     for (Done one : done) {
       summary.print(one.review(), one.seconds());
-      if (directory != null) {
-        Path place = directory.resolve(stem(one.file()));
-        try {
-          RecordWriter.write(place, RecordWriter.files(one.dossier(), paperAsked()));
-        } catch (IOException e) {
-          out.flush();
-          err.println(
-              "sliprung: the record cannot be written to "
-                  + Printable.of(place + ": " + e.getMessage()));
-          return ExitStatus.WRONG_INPUT;
-        }
+      if (directory != null && failure.isEmpty()) {
+        Path place = place(one);
         summary.written(place.resolve("review.html").toString(), sheets(place));
       }
       status = ExitStatus.worse(status, one.review().exitStatus());
     }
+    if (failure.isPresent()) {
+      out.flush();
+      err.println(
+          "sliprung: "
+              + (done.size() == 1 ? "the record cannot" : "the records cannot, none of them,")
+              + " be written to "
+              + Printable.of(failure.get()));
+      return ExitStatus.WRONG_INPUT;
+    }
     return status;
+  }
+
+  private Path place(Done one) {
+    return directory.resolve(stem(one.file()));
+  }
+
+  /** Writes every record or none; where and why it failed, if it did. */
+  private Optional<String> write(List<Done> done) {
+    Map<Path, Map<String, byte[]>> records = new LinkedHashMap<>();
+    for (Done one : done) {
+      records.put(place(one), RecordWriter.files(one.dossier(), paperAsked()));
+    }
+    try {
+      RecordWriter.write(records);
+      return Optional.empty();
+    } catch (IOException e) {
+      Path where = done.size() == 1 ? place(done.get(0)) : directory;
+      return Optional.of(where + ": " + e.getMessage());
+    }
   }
 
   /** Paper of the PDF; empty where nobody asked for one. */

@@ -109,17 +109,6 @@ final class BankReader {
     OptionalDouble continuous =
         section.optionalNumber("continuous", Dimension.CURRENT, Range.POSITIVE);
     Optional<ShortTime> shortTime = MotorReader.shortTime(section, "short-time");
-    if (continuous.isPresent()
-        && shortTime.isPresent()
-        && shortTime.get().amps() <= continuous.getAsDouble()) {
-      section
-          .optional("short-time")
-          .get()
-          .mistake(
-              "expected a short-time current above the continuous one, "
-                  + section.optional("continuous").get().value().found()
-                  + ", but found one that is not");
-    }
     OptionalDouble continuousRise = OptionalDouble.empty();
     OptionalDouble shortTimeRise = OptionalDouble.empty();
     Optional<Field> rises = section.optional("rise");

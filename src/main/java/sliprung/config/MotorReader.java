@@ -52,14 +52,6 @@ final class MotorReader {
       cold = OptionalDouble.of(stall.number("cold", Dimension.TIME, Range.POSITIVE));
     }
     OptionalDouble hot = stall.optionalNumber("hot", Dimension.TIME, Range.POSITIVE);
-    if (hot.isPresent() && cold.isPresent() && hot.getAsDouble() > cold.getAsDouble()) {
-      Field field = stall.optional("hot").get();
-      field.mistake(
-          "expected a hot stall limit of no more than the cold one, "
-              + stall.optional("cold").get().value().found()
-              + ", but found "
-              + field.value().found());
-    }
     return new Motor(
         motor.number("voltage", Dimension.VOLTAGE, Range.POSITIVE),
         frequency,

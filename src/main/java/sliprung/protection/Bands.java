@@ -66,10 +66,13 @@ public final class Bands {
 
   /**
    * The least constant current in A that ever operates an edge, to 1e-9; empty where there is none
-   * up to a hundred thousand amperes or it cannot be told.
+   * up to a hundred thousand amperes or it cannot be told. What measures something else, such as a
+   * rotation sensor or a sequence timer, has no level in amperes.
    */
   public OptionalDouble pickUpAmps(Device device, Edge edge) {
-    return pickUpAmps(model(device, edge, starter));
+    return device.measuresCurrent()
+        ? pickUpAmps(model(device, edge, starter))
+        : OptionalDouble.empty();
   }
 
   /** The same of a model. */

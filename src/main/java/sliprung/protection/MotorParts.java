@@ -72,6 +72,10 @@ final class MotorParts {
     if (motor.stallHotSeconds().isEmpty()) {
       return Optional.of("motor.stall-limit.hot");
     }
+    if (motor.stallHotSeconds().getAsDouble() > motor.stallColdSeconds().getAsDouble()) {
+      // a winding that stands more when hot: the two contradict each other, neither is a limit
+      return Optional.of("motor.stall-limit");
+    }
     if (motor.heatingSeconds().isEmpty()) {
       return Optional.of("motor.heating");
     }

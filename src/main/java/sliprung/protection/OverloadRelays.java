@@ -11,10 +11,12 @@ import sliprung.starter.Device;
  * The relays that an overload's trip class, dial and ambient allow.
  *
  * <p>Ultimate trip currents as multiples of the setting (IEC 60947-4-1, table 3, from memory):
- * compensated 1.05 to 1.20, from 1.00 at a panel of 40 °C or more, up to 1.30 at −5 °C or less. Not
- * compensated 1.0 to 1.2 at 40 °C; elsewhere the strip has the difference of temperature to make up
- * by current, with a rise of {@value #STRIP_RISE_KELVIN} K at its ultimate current (assumed on the
- * low side: a smaller rise widens the band). NEMA classes trip ultimately at 1.00 to 1.25.
+ * compensated 1.05 to 1.20 at 20 °C, from 1.00 at 40 °C, up to 1.30 at −5 °C. The table gives these
+ * points and nothing between them: above 20 °C the earliest relay counts as at 40 °C, below 20 °C
+ * the latest as at −5 °C, each on its safe side. Not compensated 1.0 to 1.2 at 40 °C; elsewhere the
+ * strip has the difference of temperature to make up by current, with a rise of {@value
+ * #STRIP_RISE_KELVIN} K at its ultimate current (assumed on the low side: a smaller rise widens the
+ * band). NEMA classes trip ultimately at 1.00 to 1.25.
  *
  * <p>A dial that gives the ultimate trip current itself stands for a setting 1.125 times smaller,
  * the middle of the compensated band: an ultimate trip from 0.93 to 1.07 of the dial.
@@ -22,6 +24,9 @@ import sliprung.starter.Device;
 final class OverloadRelays {
   static final double STRIP_RISE_KELVIN = 60.0;
   private static final double MIDDLE_PICK_UP = 1.125;
+
+  /** Air at which the ultimate trip currents of a compensated relay are stated, °C. */
+  private static final double REFERENCE_CELSIUS = 20.0;
 
   private final TripClass tripClass;
   private final double settingAmps;
@@ -41,8 +46,8 @@ final class OverloadRelays {
       this.least = Math.min(1.0, shift);
       this.greatest = (nema ? 1.25 : 1.20) * Math.max(1.0, shift);
     } else {
-      this.least = nema || panelCelsius >= 40.0 ? 1.00 : 1.05;
-      this.greatest = panelCelsius <= -5.0 ? 1.30 : nema ? 1.25 : 1.20;
+      this.least = nema || panelCelsius > REFERENCE_CELSIUS ? 1.00 : 1.05;
+      this.greatest = panelCelsius < REFERENCE_CELSIUS ? 1.30 : nema ? 1.25 : 1.20;
     }
   }
 

@@ -48,6 +48,15 @@ public final class RecordWriter {
    * are replaced; if anything fails, everything is as it was.
    */
   public static void write(Path directory, Map<String, byte[]> files) throws IOException {
-    WholeOrNothing.write(directory, files);
+    write(Map.of(directory, files));
+  }
+
+  /**
+   * Writes the records of several reviews: every file of every record, or none.
+   *
+   * @param records the files of each record by the directory that it goes into
+   */
+  public static void write(Map<Path, Map<String, byte[]>> records) throws IOException {
+    WholeOrNothing.write(records);
   }
 }

@@ -17,6 +17,7 @@ import sliprung.review.Review;
 import sliprung.review.RunUpMethod;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Finding;
+import sliprung.rulebook.resistor.Restart;
 import sliprung.runup.RunUpFigures;
 import sliprung.starter.Motor;
 import sliprung.tolerance.Corner;
@@ -59,6 +60,11 @@ public final class ReviewJson {
       json.writeArrayFieldStart("starts");
       for (ComputedStart start : RecordedStarts.of(review)) {
         StartJson.write(fields, start);
+      }
+      json.writeEndArray();
+      json.writeArrayFieldStart("restarts");
+      for (Restart restart : review.restarts()) {
+        restart(fields, restart);
       }
       json.writeEndArray();
       json.writeArrayFieldStart("findings");
@@ -131,6 +137,19 @@ public final class ReviewJson {
     StartJson.corner(fields, method.worstCorner());
     fields.number("worst", method.worst().greatest());
     json.writeStringField("says", method.says());
+    json.writeEndObject();
+  }
+
+  private static void restart(JsonFields fields, Restart restart) throws IOException {
+    JsonGenerator json = fields.json();
+    json.writeStartObject();
+    json.writeStringField("after", restart.after().word());
+    fields.number("pause_s", restart.pastLimit() ? Double.NaN : restart.seconds());
+    json.writeStringField("limited_by", restart.limitedBy());
+    json.writeBooleanField("past_limit", restart.pastLimit());
+    json.writeStringField("start", restart.start().id());
+    json.writeFieldName("corner");
+    StartJson.corner(fields, restart.start().corner());
     json.writeEndObject();
   }
 

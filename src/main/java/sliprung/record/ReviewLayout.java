@@ -34,6 +34,7 @@ final class ReviewLayout {
     BlindSpotPart.write(page, contents.blindSpots());
     StartPart.write(page, review, pictures);
     StepTablePart.write(page, contents.readings());
+    RestartPart.write(page, review);
     ProtectionPart.write(page, review, firstLimit, pictures);
     DoorSheetPart.write(page, dossier);
     Cautions.write(page);

@@ -8,6 +8,7 @@ import sliprung.machine.Machine;
 import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.Verdict;
+import sliprung.rulebook.resistor.Restart;
 import sliprung.starter.Starter;
 
 /**
@@ -23,6 +24,8 @@ import sliprung.starter.Starter;
  * @param notBuilt rules of the rule book that this version does not hold
  * @param mustJudgeMissing must-judge rules that could not be judged
  * @param method how the starts were computed; empty where none was
+ * @param restarts the earliest restart after a stop, a trip, a held and a locked start; empty where
+ *     inputs are missing
  */
 public record Review(
     Starter starter,
@@ -34,7 +37,8 @@ public record Review(
     List<NotApplicable> notApplicable,
     List<String> notBuilt,
     List<String> mustJudgeMissing,
-    Optional<RunUpMethod> method) {
+    Optional<RunUpMethod> method,
+    List<Restart> restarts) {
 
   /**
    * A rule without a subject in this starter.
@@ -43,6 +47,32 @@ public record Review(
    * @param because why
    */
   public record NotApplicable(String rule, String because) {}
+
+  /** A review without restarts. */
+  public Review(
+      Starter starter,
+      LocalDate date,
+      Machine machine,
+      Identification identification,
+      List<ComputedStart> starts,
+      List<Finding> findings,
+      List<NotApplicable> notApplicable,
+      List<String> notBuilt,
+      List<String> mustJudgeMissing,
+      Optional<RunUpMethod> method) {
+    this(
+        starter,
+        date,
+        machine,
+        identification,
+        starts,
+        findings,
+        notApplicable,
+        notBuilt,
+        mustJudgeMissing,
+        method,
+        List.of());
+  }
 
   /** A review without the model error. */
   public Review(
@@ -75,6 +105,7 @@ public record Review(
     notApplicable = List.copyOf(notApplicable);
     notBuilt = List.copyOf(notBuilt);
     mustJudgeMissing = List.copyOf(mustJudgeMissing);
+    restarts = List.copyOf(restarts);
   }
 
   /** Exit status: 1 a breach that nobody accepted; 4 a must-judge rule not judged; else 0. */

@@ -22,6 +22,8 @@ import sliprung.rulebook.Finding;
 import sliprung.rulebook.Practice;
 import sliprung.rulebook.RuleBook;
 import sliprung.rulebook.catalogue.Catalogue;
+import sliprung.rulebook.resistor.Restart;
+import sliprung.rulebook.resistor.Restarts;
 import sliprung.starter.Device;
 import sliprung.starter.Motor;
 import sliprung.starter.Motor.CircuitData;
@@ -44,6 +46,7 @@ public final class Reviewer {
     List<Identification> identifications = NameplateIdentification.identify(starter.motor());
     List<RuleBook.Answers> answers = new ArrayList<>();
     List<ComputedStart> starts = new ArrayList<>();
+    List<Restart> restarts = new ArrayList<>();
     Machine first = null;
     RunUpMethod method = null;
     for (int i = 0; i < identifications.size(); i++) {
@@ -55,6 +58,7 @@ public final class Reviewer {
       method = method == null ? computed.method() : method;
       Facts facts = facts(starter, machine, identifications.get(i), computed);
       starts.addAll(facts.starts());
+      restarts.addAll(Restarts.of(facts));
       answers.add(new RuleBook(Catalogue.rules()).ask(facts, date));
     }
     return new Review(
@@ -68,7 +72,8 @@ public final class Reviewer {
         List.copyOf(Catalogue.notBuilt().keySet()),
         List.copyOf(
             new TreeSet<>(answers.stream().flatMap(a -> a.mustJudgeMissing().stream()).toList())),
-        Optional.ofNullable(method));
+        Optional.ofNullable(method),
+        Restarts.latest(restarts));
   }
 
   /** Computes everything that rules may look at. */

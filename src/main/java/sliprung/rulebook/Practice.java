@@ -85,6 +85,20 @@ public final class Practice {
     return Optional.ofNullable(figures.get(key));
   }
 
+  /**
+   * The same practice with another value of one of its figures, as a user's own judgement of a
+   * limit would have it.
+   *
+   * @param key of a figure that is there
+   * @param value in place of its own
+   */
+  public Practice with(String key, double value) {
+    Figure own = figure(key);
+    Map<String, Figure> changed = new TreeMap<>(figures);
+    changed.put(key, new Figure(key, value, own.clause(), own.mark()));
+    return new Practice(name, changed);
+  }
+
   /** Every figure by key. */
   public Map<String, Figure> figures() {
     return new TreeMap<>(figures);

@@ -74,7 +74,11 @@ class OverloadRelaysTest {
   @Test
   void a_warm_panel_lowers_and_a_cold_one_raises_the_ultimate_trip() {
     assertThat(relays(Devices.CLASS_10, 40).leastPickUpAmps()).isEqualTo(100);
-    assertThat(relays(Devices.CLASS_10, 39).leastPickUpAmps()).isEqualTo(105);
+    assertThat(relays(Devices.CLASS_10, 20).leastPickUpAmps()).isEqualTo(105);
+    // nothing is promised between the points of the table: each edge on its safe side
+    assertThat(relays(Devices.CLASS_10, 21).leastPickUpAmps()).isEqualTo(100);
+    assertThat(relays(Devices.CLASS_10, 19).greatestPickUpAmps()).isEqualTo(130);
+    assertThat(relays(Devices.CLASS_10, 39).greatestPickUpAmps()).isEqualTo(120);
     assertThat(relays(Devices.CLASS_10, -5).greatestPickUpAmps()).isEqualTo(130);
     assertThat(relays(Devices.CLASS_10, 20).greatestPickUpAmps()).isEqualTo(120);
   }

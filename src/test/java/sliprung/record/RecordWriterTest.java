@@ -90,4 +90,34 @@ class RecordWriterTest {
       return all.map(p -> p.getFileName().toString()).toList();
     }
   }
+
+  @Test
+  void should_put_every_directory_back_when_the_second_record_cannot_be_written()
+      throws IOException {
+    Path one = Files.createDirectory(parent.resolve("one"));
+    Files.writeString(one.resolve("first.txt"), "old");
+    Path two = parent.resolve("two");
+    Files.createDirectories(two.resolve("second.txt"));
+    Map<Path, Map<String, byte[]>> records = new LinkedHashMap<>();
+    records.put(one, files("new", "new"));
+    records.put(parent.resolve("made"), files("new", "new"));
+    records.put(two, files("new", "new"));
+
+    assertThatThrownBy(() -> RecordWriter.write(records)).isInstanceOf(IOException.class);
+    assertThat(names(parent)).containsExactlyInAnyOrder("one", "two");
+    assertThat(names(one)).containsExactly("first.txt");
+    assertThat(one.resolve("first.txt")).hasContent("old");
+    assertThat(names(two)).containsExactly("second.txt");
+  }
+
+  @Test
+  void should_write_the_records_of_several_reviews() throws IOException {
+    Map<Path, Map<String, byte[]>> records = new LinkedHashMap<>();
+    records.put(parent.resolve("a"), files("one", "two"));
+    records.put(parent.resolve("b"), files("three", "four"));
+    RecordWriter.write(records);
+
+    assertThat(parent.resolve("a").resolve("first.txt")).hasContent("one");
+    assertThat(parent.resolve("b").resolve("second.txt")).hasContent("four");
+  }
 }

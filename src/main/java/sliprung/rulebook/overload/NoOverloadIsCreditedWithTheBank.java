@@ -94,7 +94,7 @@ public final class NoOverloadIsCreditedWithTheBank implements Rule {
     if (ratio >= 1.0) {
       builder.margin(ratio); // a margin below 1 is a breach, and that is held/exposure's
     }
-    if (ratio >= facts.wanted(INFO.name())) {
+    if (ratio >= Math.max(1.0, facts.wanted(INFO.name()))) {
       return builder
           .says(
               sees

@@ -175,6 +175,7 @@ public final class TheClassFitsStartAndStall implements Rule {
             + trips(seconds(facts, relay, relay.tripClass(), amps))
             + " at "
             + Show.amps(amps)
+            + why(facts, relay, amps)
             + "; the motor stands "
             + Show.seconds(facts.starter().motor().stallHotSeconds().getAsDouble())
             + " from hot at rated voltage.";
@@ -191,6 +192,20 @@ public final class TheClassFitsStartAndStall implements Rule {
                         + Show.seconds(d.clearsAtSeconds())
                         + ".")
             .orElse("");
+  }
+
+  /**
+   * Why a relay need never trip: the current lies under what the slowest of its class begins at.
+   */
+  private static String why(Facts facts, Device.Overload relay, double amps) {
+    if (Double.isFinite(seconds(facts, relay, relay.tripClass(), amps))) {
+      return "";
+    }
+    OptionalDouble from = facts.bands().pickUpAmps(relay, Edge.SLOW);
+    return from.isPresent()
+        ? ", since the slowest relay that the standard allows begins at "
+            + Show.amps(from.getAsDouble())
+        : "";
   }
 
   private static boolean clearedInTime(Facts facts) {

@@ -4,11 +4,13 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.Predicate;
 import sliprung.machine.OperatingPoint;
 import sliprung.quantity.Show;
 import sliprung.rulebook.Facts;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.FindingBuilder;
+import sliprung.rulebook.Practice;
 import sliprung.rulebook.Rule;
 import sliprung.starter.Device;
 import sliprung.starter.Motor;
@@ -18,11 +20,12 @@ import sliprung.starter.Starter;
  * {@code overload/dial}: the current at which an overload relay trips in the end, held against the
  * motor.
  *
- * <p>Under {@code iec} the ultimate trip is at most 1.20 times rated current times service factor.
- * Margin: that limit over the ultimate trip; a dial at rated current has exactly 1. Under {@code
- * nec} the ultimate trip is at most the share of nameplate current of NFPA 70 430.32(A)(1), and
- * where the motor will not start or carry its load that of 430.32(C). Margin: the share of (C) over
- * the ultimate trip, wanted the share of (C) over that of (A)(1): in between it is tight.
+ * <p>Under {@code iec} the ultimate trip is at most 1.20 times rated current times service factor,
+ * which a dial at rated current gives; up to 5 % above that it is tight. Margin: 1.05 times that
+ * limit over the ultimate trip, wanted 1.05. Under {@code nec} the ultimate trip is at most the
+ * share of nameplate current of NFPA 70 430.32(A)(1), and where the motor will not start or carry
+ * its load that of 430.32(C). Margin: the share of (C) over the ultimate trip, wanted the share of
+ * (C) over that of (A)(1): in between it is tight.
  *
  * <p>A relay whose least trip lies under the current that the drive really needs is tight: it trips
  * in service. What is needed: rated current, or the greatest running current if that is less.
@@ -58,7 +61,52 @@ public final class TheDialFitsTheMotor implements Rule {
         findings.add(judge(facts, overload));
       }
     }
-    return Answer.of(findings, "no overload relay is described");
+    Optional<Device> guard = facts.starter().protection().stream().filter(IS_GUARD).findFirst();
+    if (findings.stream().noneMatch(f -> isInStator(facts, f)) && guard.isEmpty()) {
+      findings.add(unprotected(facts));
+    }
+    return Answer.of(
+        findings,
+        "no overload relay is described; "
+            + guard.map(Device::tag).orElse("nothing")
+            + " follows the motor's current in the stator line instead");
+  }
+
+  /** Devices in the stator line, besides overload relays, that follow an overload of the motor. */
+  private static final Predicate<Device> IS_GUARD =
+      d ->
+          d.fitting().place() == Device.Place.STATOR
+              && (d instanceof Device.Thermal
+                  || d instanceof Device.InverseTime
+                  || d instanceof Device.Points);
+
+  private static boolean isInStator(Facts facts, Finding finding) {
+    return facts
+        .starter()
+        .device(finding.subject())
+        .filter(d -> d.fitting().place() == Device.Place.STATOR)
+        .isPresent();
+  }
+
+  /** Fuses and elements set for short circuits see no overload; timers see no current at all. */
+  private static Finding unprotected(Facts facts) {
+    boolean nec = facts.starter().practice() == Starter.Practice.NEC;
+    double rated = facts.starter().motor().current();
+    return FindingBuilder.of(facts, INFO, "motor")
+        .margin(0.0)
+        .reference(
+            nec
+                ? "NFPA 70 430.32(A)(1)"
+                : "IEC 60204-1 7.3, motors above 0.5 kW (number of the clause from memory)")
+        .says(
+            "Nothing in the stator line protects the motor against overload: no overload relay, no"
+                + " thermal or inverse-time relay measures its "
+                + Show.amps(rated)
+                + ". A fuse or a short-circuit element lets a winding carry half as much again for"
+                + " good.")
+        .mend(
+            "Fit an overload relay set to " + Show.amps(rated) + " that opens the line contactor.")
+        .byMargin();
   }
 
   private static Finding judge(Facts facts, Device.Overload overload) {
@@ -106,10 +154,14 @@ public final class TheDialFitsTheMotor implements Rule {
                 .value()
             * serviceFactor;
     double limit = share * rated;
-    double margin = snapped(limit / trip.mostAmps());
+    double above =
+        facts.practice().find("overload.dial-above").map(Practice.Figure::value).orElse(1.0);
+    double margin = above * snapped(limit / trip.mostAmps());
+    double wanted = above * facts.wanted(INFO.name());
     builder
         .margin(margin)
-        .figures(trip.mostAmps(), limit, "A")
+        .wanted(wanted)
+        .figures(trip.mostAmps(), margin < 1.0 ? above * limit : limit, "A")
         .reference("IEC 60947-4-1 table 3 (from memory)");
     String says =
         trip.sentence(rated)
@@ -119,8 +171,9 @@ public final class TheDialFitsTheMotor implements Rule {
             + Show.ratio(share)
             + " times, for service factor "
             + Show.ratio(serviceFactor)
-            + ").";
-    if (margin < facts.wanted(INFO.name())) {
+            + ")"
+            + (above > 1.0 ? ", and " + Show.percent(above - 1.0) + " above it is the most." : ".");
+    if (margin < wanted) {
       return builder
           .says(says)
           .mend("Turn it down to " + Show.amps(trip.dialFor(limit)) + ".")

@@ -26,7 +26,7 @@ record UltimateTrip(
     double trips = practice.figure(kind + ".trips-by").value();
     boolean warmPanel =
         facts.starter().ambient().panelCelsius()
-            >= practice.figure("overload.warm-panel-celsius").value();
+            > practice.figure("overload.reference-celsius").value();
     double carries = practice.figure(kind + (warmPanel ? ".carries-warm" : ".carries")).value();
     boolean fullLoad = overload.dialMeans() == Device.DialMeans.FULL_LOAD;
     double most = fullLoad ? trips * overload.dialAmps() : overload.dialAmps();

@@ -107,7 +107,7 @@ public final class EverySectionStandsTheStartsOfAnHour implements Rule {
                 + " of its limit with "
                 + Show.three(perHour)
                 + " starts an hour"
-                + counted(duty)
+                + counted(facts)
                 + (bunched
                     ? ", " + inARow + " in a row every " + Show.seconds(inARow * 3600.0 / perHour)
                     : ", evenly apart")
@@ -131,8 +131,26 @@ public final class EverySectionStandsTheStartsOfAnHour implements Rule {
         + plug * duty.plugging().map(Duty.Repeated::perHour).orElse(0.0);
   }
 
-  private static String counted(Duty duty) {
-    boolean more = duty.inching().isPresent() || duty.plugging().isPresent();
-    return more ? " (inching and plugging counted as starts)" : "";
+  private static String counted(Facts facts) {
+    Duty duty = facts.starter().duty();
+    List<String> counted = new ArrayList<>();
+    counted.add(Show.three(duty.startsPerHour().orElseThrow()) + " as such");
+    duty.inching().ifPresent(i -> counted.add(each(facts, i, "inching", "duty.inch-in-starts")));
+    duty.plugging().ifPresent(p -> counted.add(each(facts, p, "plugging", "duty.plug-in-starts")));
+    return counted.size() == 1 ? "" : " (" + String.join(", ", counted) + ")";
+  }
+
+  /** {@code 20 from 5 pluggings counted as 4 starts each}. */
+  private static String each(Facts facts, Duty.Repeated repeated, String what, String key) {
+    double starts = facts.practice().figure(key).value();
+    return Show.three(starts * repeated.perHour())
+        + " from "
+        + Show.three(repeated.perHour())
+        + " times "
+        + what
+        + ", which counts as "
+        + Show.three(starts)
+        + (starts == 1.0 ? " start" : " starts")
+        + " each";
   }
 }

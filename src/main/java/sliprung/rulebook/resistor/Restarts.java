@@ -77,11 +77,18 @@ public final class Restarts {
       return List.of();
     }
     Restarts restarts = new Restarts(facts);
+    return latest(
+        facts
+            .permitted()
+            .filter(s -> s.place() == 1 && s.from() == ComputedStart.From.COLD)
+            .flatMap(s -> restarts.at(s).stream())
+            .toList());
+  }
+
+  /** Of several restarts after the same the latest, in the order of what came before. */
+  public static List<Restart> latest(List<Restart> of) {
     Map<Restart.After, Restart> worst = new EnumMap<>(Restart.After.class);
-    facts
-        .permitted()
-        .filter(s -> s.place() == 1 && s.from() == ComputedStart.From.COLD)
-        .forEach(s -> restarts.at(s).forEach(r -> worst.merge(r.after(), r, Restarts::later)));
+    of.forEach(r -> worst.merge(r.after(), r, Restarts::later));
     return List.copyOf(worst.values());
   }
 

@@ -1,6 +1,7 @@
 package sliprung.rulebook.sequence;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
@@ -130,6 +131,11 @@ public final class TheSequenceIsSupervised implements Rule {
 
   private static Finding judge(Facts facts, Device.SequenceTimer timer) {
     FindingBuilder builder = FindingBuilder.of(facts, INFO, timer.tag());
+    Optional<ComputedStart> hangs =
+        facts.permitted().filter(s -> !stops(facts, s, timer)).findFirst();
+    if (hangs.isPresent()) {
+      return neverStopped(builder, timer, hangs.get());
+    }
     double spread = facts.starter().timerSpread();
     ComputedStart slowest =
         facts.permitted().max(Comparator.comparingDouble(s -> share(s, timer))).orElseThrow();
@@ -243,16 +249,51 @@ public final class TheSequenceIsSupervised implements Rule {
         .byMargin();
   }
 
+  /** A permitted start that never meets what the timer waits for: no time is long enough. */
+  private static Finding neverStopped(
+      FindingBuilder builder, Device.SequenceTimer timer, ComputedStart start) {
+    return builder
+        .at(start)
+        .edge(Edge.FAST)
+        .margin(0.0)
+        .says(
+            "The stop event of "
+                + timer.tag()
+                + " never comes in a "
+                + start.words()
+                + ": "
+                + (timer.untilSpeedShare().isPresent()
+                    ? "the motor does not reach "
+                        + Show.percent(timer.untilSpeedShare().getAsDouble())
+                        + " of synchronous speed"
+                    : "the last step never closes")
+                + ". "
+                + timer.tag()
+                + " trips after its "
+                + Show.seconds(timer.seconds())
+                + ", and no longer time helps.")
+        .mend("Mend the start first: sequence/pull-through says where it hangs.")
+        .byMargin();
+  }
+
+  /** Whether a permitted start ever meets what a timer waits for. */
+  private static boolean stops(Facts facts, ComputedStart start, Device.SequenceTimer timer) {
+    if (timer.untilSpeedShare().isEmpty()) {
+      return start.history().lastClosingSeconds().isPresent();
+    }
+    double speed = timer.untilSpeedShare().getAsDouble() * facts.machine().synchronousSpeed();
+    return start.history().everything().stream()
+        .anyMatch(s -> Arrays.stream(s.trace().speed()).anyMatch(w -> w >= speed));
+  }
+
   private static String stopSentence(Device.SequenceTimer timer, double stop) {
-    return Double.isInfinite(stop)
-        ? "In the slowest permitted start its stop event never comes."
-        : "The slowest permitted start stops "
-            + timer.tag()
-            + " after "
-            + Show.seconds(stop)
-            + "; it is set to "
-            + Show.seconds(timer.seconds())
-            + ".";
+    return "The slowest permitted start stops "
+        + timer.tag()
+        + " after "
+        + Show.seconds(stop)
+        + "; it is set to "
+        + Show.seconds(timer.seconds())
+        + ".";
   }
 
   /** Elapsed over set, shortest time, in a permitted start. */

@@ -60,33 +60,60 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
 
   private static Finding judge(Facts facts, Device device) {
     FindingBuilder builder = FindingBuilder.of(facts, INFO, device.tag()).edge(Edge.FAST);
-    ComputedStart worst = null;
-    DeviceResponse response = null;
-    double least = Double.POSITIVE_INFINITY;
+    Nearest nearest = null;
+    Nearest certain = null;
+    ComputedStart unknown = null;
     for (ComputedStart start : facts.permitted().toList()) {
       DeviceResponse found = start.device(device.tag(), Edge.FAST).orElseThrow();
       if (found.notJudged().isPresent()) {
-        boolean current = device.measuresCurrent();
-        return builder
-            .at(start)
-            .mend(current ? "Give the device's own curve as points." : "Give what it needs.")
-            .notJudged(
-                List.of(current ? "protection." + device.tag() + ".curve" : "resistors.sections"),
-                found.notJudged().get());
+        unknown = unknown == null ? start : unknown;
+        continue;
       }
-      if (worst == null || isBelow(device, found, least)) {
-        least = margin(device, found);
-        worst = start;
-        response = found;
+      boolean thinner = nearest == null || isBelow(device, found, nearest.margin());
+      boolean sure = found.bound().isEmpty();
+      boolean surelyThinner = sure && (certain == null || isBelow(device, found, certain.margin()));
+      if (thinner || surelyThinner) {
+        Nearest here = new Nearest(start, found, margin(device, found));
+        nearest = thinner ? here : nearest;
+        certain = surelyThinner ? here : certain;
       }
     }
-    builder.at(worst).figures(response.use(), 1.0, "share of operation");
-    if (least < 1.0 && response.bound().isPresent()) {
-      return builder.notJudged(
-          List.of("protection." + device.tag() + ".curve"),
-          says(device, worst, response, least) + " " + response.bound().get());
+    if (certain != null && certain.margin() < 1.0) {
+      return byMargin(facts, builder, device, certain);
     }
-    builder.margin(least).says(says(device, worst, response, least)).mend(mend(device, least));
+    if (unknown != null) {
+      boolean current = device.measuresCurrent();
+      return builder
+          .at(unknown)
+          .mend(current ? "Give the device's own curve as points." : "Give what it needs.")
+          .notJudged(
+              List.of(current ? "protection." + device.tag() + ".curve" : "resistors.sections"),
+              unknown.device(device.tag(), Edge.FAST).orElseThrow().notJudged().orElseThrow());
+    }
+    if (nearest.margin() < 1.0) {
+      return builder
+          .at(nearest.start())
+          .figures(nearest.response().use(), 1.0, "share of operation")
+          .notJudged(
+              List.of("protection." + device.tag() + ".curve"),
+              says(device, nearest.start(), nearest.response(), nearest.margin())
+                  + " "
+                  + nearest.response().bound().orElseThrow());
+    }
+    return byMargin(facts, builder, device, nearest);
+  }
+
+  /** The start that comes nearest to operating the device, of those looked at. */
+  private record Nearest(ComputedStart start, DeviceResponse response, double margin) {}
+
+  private static Finding byMargin(
+      Facts facts, FindingBuilder builder, Device device, Nearest nearest) {
+    builder
+        .at(nearest.start())
+        .figures(nearest.response().use(), 1.0, "share of operation")
+        .margin(nearest.margin())
+        .says(says(device, nearest.start(), nearest.response(), nearest.margin()))
+        .mend(mend(device, nearest.margin()));
     Optional<Double> classAlone = classAlone(facts, device);
     if (classAlone.isPresent() && classAlone.get() > facts.wanted(INFO.name())) {
       builder.wanted(classAlone.get());
@@ -109,8 +136,7 @@ public final class NoDeviceOperatesInAPermittedStart implements Rule {
 
   /** Whether the margin is below another: asked first, since it costs less than the margin. */
   private static boolean isBelow(Device device, DeviceResponse response, double least) {
-    boolean timer = device instanceof Device.SequenceTimer || device instanceof Device.Standstill;
-    return timer
+    return isTimer(device)
         ? response.stretchMargin().orElseThrow() < least
         : response.margins().orElseThrow().currentBelow(least);
   }

@@ -41,6 +41,8 @@ class PlausibleTest {
           efficiency: 94.5 %             | efficiency: 30 %               | motor.efficiency
           service-factor: 1.0            | service-factor: 1.5            | motor.service-factor
           breakdown-torque: 2.8          | breakdown-torque: 5.8          | motor.breakdown-torque
+          hot: 14 s}                     | hot: 24 s}                     | motor.stall-limit
+          {current: 600 A, time: 15 s}   | {current: 60 A, time: 15 s}    | resistors.sections[1].short-time
           cooling: 90 min                | cooling: 20 min                | motor.cooling
           heating: 30 min                | heating: 30 s                  | motor.heating
           inertia: 70 kg·m²              | inertia: 700 kg·m²             | load.inertia
@@ -156,5 +158,24 @@ class PlausibleTest {
     assertThat(odd(f2, f2 + "\n  F6: {kind: standstill, time: 300 s, trips: K1}"))
         .extracting(Finding::subject)
         .containsExactly("protection.F6.time");
+  }
+
+  /** Data that contradict each other break nothing further on: what rests on them is not judged. */
+  @Test
+  void a_contradiction_leaves_what_rests_on_it_not_judged() {
+    for (String[] edit :
+        List.of(
+            new String[] {"hot: 14 s}", "hot: 24 s}"},
+            new String[] {"{current: 600 A, time: 15 s}", "{current: 60 A, time: 15 s}"},
+            new String[] {"{current: 600 A, time: 15 s}", "{current: 130 A, time: 15 s}"})) {
+      sliprung.review.Review review =
+          sliprung.review.Reviewer.review(
+              CrusherFacts.starter(edit), java.time.LocalDate.of(2026, 12, 1));
+
+      assertThat(review.findings())
+          .anyMatch(f -> f.rule().equals("data/plausible") && f.verdict() == Verdict.BREACH)
+          .anyMatch(f -> f.rule().equals("held/exposure") && f.verdict() == Verdict.NOT_JUDGED);
+      assertThat(review.exitStatus()).isNotZero();
+    }
   }
 }

@@ -106,4 +106,15 @@ class ClassTest {
       assertThat(own.multiple()).isEqualTo(library.multiple());
     }
   }
+
+  @Test
+  void a_relay_that_need_never_see_the_current_at_rest_says_why() {
+    // with a weak supply and a dial far above rated current nothing makes the slowest relay move
+    Facts facts = facts("class: 10, dial: 1500 A", "");
+    String says = CrusherFacts.says(CrusherFacts.finding(RULE, facts, "F2"));
+
+    assertThat(says)
+        .contains("F2 need never trip at ")
+        .contains(", since the slowest relay that the standard allows begins at 1 800 A;");
+  }
 }

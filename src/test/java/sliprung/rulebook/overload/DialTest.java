@@ -20,22 +20,28 @@ class DialTest {
   }
 
   @Test
-  void a_dial_at_rated_current_is_clear_with_a_margin_of_one() {
+  void a_dial_at_rated_current_is_clear_with_exactly_the_margin_wanted() {
     Finding finding = judge();
 
     assertThat(finding.verdict()).isEqualTo(Verdict.CLEAR);
-    assertThat(finding.margin()).hasValue(1.0);
+    assertThat(finding.margin()).hasValue(1.05);
+    assertThat(finding.wanted()).hasValue(1.05);
     assertThat(CrusherFacts.says(finding))
         .startsWith("F2 is set to 208 A of full-load current and trips in the end at 250 A, 1.20");
   }
 
   @Test
-  void one_per_cent_above_is_a_breach_that_names_the_dial() {
+  void up_to_five_per_cent_above_it_is_tight_and_names_the_dial() {
     Finding finding = judge(DIAL, "class: 10, dial: " + 208 * 1.01 + " A");
 
-    assertThat(finding.verdict()).isEqualTo(Verdict.BREACH);
-    assertThat(finding.margin()).hasValueCloseTo(1 / 1.01, within(1e-9));
+    assertThat(finding.verdict()).isEqualTo(Verdict.TIGHT);
+    assertThat(finding.margin()).hasValueCloseTo(1.05 / 1.01, within(1e-9));
     assertThat(CrusherFacts.mend(finding)).contains("208 A");
+    assertThat(judge(DIAL, "class: 10, dial: " + 208 * 1.049 + " A").verdict())
+        .isEqualTo(Verdict.TIGHT);
+    Finding beyond = judge(DIAL, "class: 10, dial: " + 208 * 1.051 + " A");
+    assertThat(beyond.verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(beyond.limit()).hasValueCloseTo(1.05 * 1.2 * 208, within(1e-9));
   }
 
   @Test
@@ -51,7 +57,8 @@ class DialTest {
     String dial = "class: 10, dial-means: ultimate-trip, dial: ";
 
     assertThat(judge(DIAL, dial + 249 + " A").verdict()).isEqualTo(Verdict.CLEAR);
-    assertThat(judge(DIAL, dial + 252 + " A").verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(judge(DIAL, dial + 252 + " A").verdict()).isEqualTo(Verdict.TIGHT);
+    assertThat(judge(DIAL, dial + 263 + " A").verdict()).isEqualTo(Verdict.BREACH);
     assertThat(judge(DIAL, dial + 249 + " A").value()).hasValue(249.0);
   }
 
@@ -70,6 +77,9 @@ class DialTest {
     String dial = "class: 10, dial: " + 208 / 1.05 * 1.01 + " A";
 
     assertThat(judge(DIAL, dial, "panel: 20 °C", "panel: 40 °C").verdict())
+        .isEqualTo(Verdict.TIGHT);
+    // between its points the standard promises nothing
+    assertThat(judge(DIAL, dial, "panel: 20 °C", "panel: 21 °C").verdict())
         .isEqualTo(Verdict.TIGHT);
   }
 
@@ -145,21 +155,47 @@ class DialTest {
   @Test
   void in_the_rotor_the_rated_rotor_current_counts_and_in_bank_leads_none() {
     Finding rotor = judge(DIAL, "class: 10, dial: 285 A, place: rotor");
+    // a relay in the rings leaves the stator line without one
+    assertThat(
+            CrusherFacts.findings(
+                RULE, CrusherFacts.bare(DIAL, "class: 10, dial: 285 A, place: rotor")))
+        .extracting(Finding::subject)
+        .containsExactly("F2", "motor");
     Finding bank = judge(DIAL, "class: 10, dial: 130 A, place: bank");
 
     assertThat(rotor.verdict()).isEqualTo(Verdict.CLEAR);
     assertThat(rotor.limit()).hasValueCloseTo(1.2 * 285, within(1e-9));
-    assertThat(judge(DIAL, "class: 10, dial: 289 A, place: rotor").verdict())
+    assertThat(judge(DIAL, "class: 10, dial: 302 A, place: rotor").verdict())
         .isEqualTo(Verdict.BREACH);
     assertThat(bank.verdict()).isEqualTo(Verdict.NOT_JUDGED);
   }
 
+  private static final String F2 = "F2: {kind: overload, class: 10, dial: 208 A, trips: K1}";
+
   @Test
-  void without_an_overload_it_is_not_applicable() {
-    assertThat(
-            RULE.judge(
-                CrusherFacts.bare(
-                    "  F2: {kind: overload, class: 10, dial: 208 A, trips: K1}\n", "")))
+  void a_motor_without_any_overload_protection_is_a_breach_of_its_own() {
+    Finding iec = CrusherFacts.finding(RULE, CrusherFacts.bare("  " + F2 + "\n", ""), "motor");
+
+    assertThat(iec.verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(CrusherFacts.says(iec)).startsWith("Nothing in the stator line protects the motor");
+    assertThat(iec.reference()).startsWith("IEC 60204-1");
+    Finding nec =
+        CrusherFacts.finding(RULE, CrusherFacts.bare(IEC, NEC, "  " + F2 + "\n", ""), "motor");
+    assertThat(nec.reference()).startsWith("NFPA 70 430.32");
+  }
+
+  @Test
+  void another_relay_that_follows_the_motor_leaves_no_dial_to_ask_about() {
+    String thermal =
+        "F2: {kind: thermal, base: 208 A, factor: 1.05, time-constant: 20 min, trips: K1}";
+    assertThat(RULE.judge(CrusherFacts.bare(F2, thermal)))
         .isInstanceOf(Rule.Answer.NotApplicable.class);
+    assertThat(
+            CrusherFacts.finding(
+                    RULE,
+                    CrusherFacts.bare(F2, "F2: {kind: instantaneous, pick-up: 3000 A, trips: Q1}"),
+                    "motor")
+                .verdict())
+        .isEqualTo(Verdict.BREACH);
   }
 }

@@ -80,4 +80,18 @@ class RotorTest {
                     "  F2: {kind: overload, class: 10, dial: 208 A, trips: K1}\n", "")))
         .isInstanceOf(Rule.Answer.NotApplicable.class);
   }
+
+  /** A plant may want less than the book: what is past a limit is still told without a margin. */
+  @Test
+  void a_wanted_margin_below_one_never_makes_a_limit_that_is_passed_clear() {
+    double limit = judge().limit().getAsDouble();
+    Finding finding =
+        judge(
+            "time: 15 s, until",
+            "time: " + limit / 0.95 + " s, until",
+            "interlocks:",
+            "margins: {overload/rotor: 0.9}\ninterlocks:");
+
+    assertThat(finding.verdict()).isEqualTo(Verdict.TIGHT);
+  }
 }

@@ -123,4 +123,13 @@ class DutyTest {
     assertThat(finding.verdict()).isEqualTo(Verdict.NOT_JUDGED);
     assertThat(finding.missing()).containsExactly("resistors.sections[1].continuous");
   }
+
+  @Test
+  void should_say_how_many_starts_a_plugging_counts_as() {
+    Finding finding = judged("plugging: none", "plugging: {per-hour: 20, step: 1}");
+
+    assertThat(says(finding))
+        .contains("84 starts an hour (4 as such, 80 from 20 times plugging, which counts as 4")
+        .contains("starts each)");
+  }
 }

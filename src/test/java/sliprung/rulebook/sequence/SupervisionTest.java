@@ -91,7 +91,25 @@ class SupervisionTest {
     StarterText hangs =
         STRONG.with("{contactor: K12, after: 2 s}", "{contactor: K12, rotor-below: 10 A}");
 
-    assertThat(hangs.finding(RULE, "F5").verdict()).isEqualTo(Verdict.BREACH);
+    Finding finding = hangs.finding(RULE, "F5");
+    assertThat(finding.verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(finding.margin()).hasValue(0.0);
+    assertThat(finding.says())
+        .contains("never comes in a cold start")
+        .contains("the last step never closes")
+        .doesNotContain("1 800")
+        .doesNotContain("30\u00a0min");
+  }
+
+  @Test
+  void a_speed_that_is_never_reached_stops_no_timer_either() {
+    Finding finding =
+        STRONG
+            .line("F5:", "F5: {kind: sequence-timer, time: 9 s, until: {speed: 99.9 %}, trips: K1}")
+            .finding(RULE, "F5");
+
+    assertThat(finding.verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(finding.says()).contains("does not reach 99.9");
   }
 
   @Test

@@ -4,15 +4,20 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
+import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import sliprung.fixture.CrusherFacts;
 import sliprung.fixture.Judged;
 import sliprung.fixture.StarterText;
 import sliprung.protection.DeviceResponse;
 import sliprung.protection.Edge;
+import sliprung.protection.StartMargins;
 import sliprung.quantity.Show;
+import sliprung.rulebook.ComputedStart;
+import sliprung.rulebook.Facts;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.Verdict;
 
@@ -182,5 +187,89 @@ class PermittedStartTest {
     assertThat(text.review().notApplicable()).anyMatch(n -> n.rule().equals(RULE));
     assertThat(text.review().mustJudgeMissing()).contains(RULE);
     assertThat(text.review().exitStatus()).isNotZero();
+  }
+
+  private static DeviceResponse fuse(double currentMargin, Optional<String> bound) {
+    return new DeviceResponse(
+        "F1",
+        Edge.FAST,
+        1.0 / currentMargin,
+        1.0 / currentMargin,
+        currentMargin < 1.0 ? 3.0 : Double.POSITIVE_INFINITY,
+        currentMargin < 1.0 ? 3.0 : Double.POSITIVE_INFINITY,
+        Optional.of(StartMargins.known(currentMargin, 1.0)),
+        bound,
+        Optional.empty());
+  }
+
+  /** The facts of a starter with the fuse's answer replaced, cold starts and hot ones apart. */
+  private static Facts answering(DeviceResponse cold, DeviceResponse hot) {
+    Facts facts = CrusherFacts.of();
+    return new Facts(
+        facts.starter(),
+        facts.practice(),
+        facts.machine(),
+        facts.identification(),
+        facts.starts().stream()
+            .map(
+                s ->
+                    new ComputedStart(
+                        s.scenario(),
+                        s.from(),
+                        s.place(),
+                        s.corner(),
+                        s.history(),
+                        List.of(s.from() == ComputedStart.From.COLD ? cold : hot),
+                        s.parts()))
+            .toList(),
+        facts.running(),
+        facts.fastPickUps(),
+        facts.bands());
+  }
+
+  private static Finding judged(DeviceResponse cold, DeviceResponse hot) {
+    return CrusherFacts.findings(
+            new NoDeviceOperatesInAPermittedStart(), answeringFuseAlone(cold, hot))
+        .get(0);
+  }
+
+  private static Facts answeringFuseAlone(DeviceResponse cold, DeviceResponse hot) {
+    Facts facts = answering(cold, hot);
+    return new Facts(
+        facts
+            .starter()
+            .withProtection(
+                facts.starter().protection().stream().filter(d -> d.tag().equals("F1")).toList()),
+        facts.practice(),
+        facts.machine(),
+        facts.identification(),
+        facts.starts(),
+        facts.running(),
+        facts.fastPickUps(),
+        facts.bands());
+  }
+
+  @Test
+  void a_certain_breach_stands_beside_a_thinner_margin_that_is_only_a_bound() {
+    Optional<String> bound = Optional.of("Below its first gate this is a bound.");
+    DeviceResponse thin = fuse(0.5, bound);
+
+    Finding certain = judged(thin, fuse(0.9, Optional.empty()));
+    assertThat(certain.verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(certain.margin()).hasValue(0.9);
+    assertThat(certain.start().orElseThrow().from()).isEqualTo(ComputedStart.From.HOT);
+
+    Finding open = judged(thin, fuse(1.01, Optional.empty()));
+    assertThat(open.verdict()).isEqualTo(Verdict.NOT_JUDGED);
+    assertThat(open.says()).contains("this is a bound");
+  }
+
+  @Test
+  void a_certain_breach_stands_beside_a_start_that_is_not_judged() {
+    DeviceResponse unknown = DeviceResponse.notJudged("F1", Edge.FAST, "no shortest time");
+
+    assertThat(judged(unknown, fuse(0.9, Optional.empty())).verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(judged(unknown, fuse(1.9, Optional.empty())).verdict())
+        .isEqualTo(Verdict.NOT_JUDGED);
   }
 }

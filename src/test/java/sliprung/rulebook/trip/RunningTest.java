@@ -19,7 +19,7 @@ class RunningTest {
         "F2:", StarterText.text("F2: {kind: overload, class: 10, dial: %s A, trips: K1}", amps));
   }
 
-  /** The earliest compliant relay holds 1.05 times its dial (panel at 25 °C). */
+  /** The earliest compliant relay holds 1.05 times its dial (panel at 20 °C). */
   @Test
   void an_overload_holds_the_running_current_from_a_dial_of_it_over_1_05() {
     double running = SMALL.finding(RULE, "F2").value().orElseThrow();
@@ -34,7 +34,7 @@ class RunningTest {
   @Test
   void a_hot_panel_takes_the_five_per_cent_away() {
     Finding cool = SMALL.finding(RULE, "F2");
-    Finding hot = SMALL.with("panel: 25 °C", "panel: 45 °C").finding(RULE, "F2");
+    Finding hot = SMALL.with("panel: 20 °C", "panel: 45 °C").finding(RULE, "F2");
 
     assertThat(hot.margin().orElseThrow() * 1.05)
         .isCloseTo(cool.margin().orElseThrow(), within(1e-6));
