@@ -24,6 +24,7 @@ public final class Main {
     CommandLine line = new CommandLine(new SliprungCommand());
     line.addSubcommand(new ReviewCommand(out, err, terminal));
     line.addSubcommand(new DialsCommand(out, err, terminal));
+    line.addSubcommand(new ProposeCommand(out, err, terminal));
     line.addSubcommand(new SampleCommand(out, err));
     line.addSubcommand(new RulesCommand(out, err));
     line.addSubcommand(new CurvesCommand(out));

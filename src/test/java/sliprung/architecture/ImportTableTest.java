@@ -77,7 +77,16 @@ class ImportTableTest {
                       "review",
                       "org.apache.commons.math3..")),
               Map.entry(
-                  "dial", List.of("quantity", "numeric", "starter", "tolerance", RULES, "review")),
+                  "dial",
+                  List.of(
+                      "quantity",
+                      "numeric",
+                      "starter",
+                      "machine",
+                      "runup",
+                      "tolerance",
+                      RULES,
+                      "review")),
               Map.entry(
                   "chart",
                   List.of(
