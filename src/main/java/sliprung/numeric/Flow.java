@@ -12,7 +12,7 @@ public final class Flow {
   /** Simpson pieces to each step of the integrator. */
   private static final int PIECES = 2;
 
-  private static final double RELATIVE = 1e-12;
+  private static final double RELATIVE = 3e-13;
   private static final double LEAST_STEP = 1e-13;
   private static final double SAFETY = 0.9;
   private static final double GROWS_MOST = 6.0;

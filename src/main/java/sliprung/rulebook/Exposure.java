@@ -104,7 +104,7 @@ public record Exposure(
     return amps <= capacity.get().amps() ? Ability.PROVEN : Ability.UNABLE;
   }
 
-  /** Stator current in A at a time in s, between samples linear. */
+  /** Stator current in A at a time in s. */
   public static double statorAmpsAt(StartHistory history, double seconds) {
     List<Stage> stages = history.everything();
     Stage stage = stages.get(0);
@@ -114,16 +114,7 @@ public record Exposure(
       }
     }
     Trace trace = stage.trace();
-    double[] t = trace.seconds();
-    int i = 0;
-    while (i < trace.last() && t[i + 1] < seconds) {
-      i++;
-    }
-    if (i >= trace.last()) {
-      return trace.statorAmps()[trace.last()];
-    }
-    double w = Math.max(0.0, Math.min(1.0, (seconds - t[i]) / (t[i + 1] - t[i])));
-    return trace.statorAmps()[i] * (1.0 - w) + trace.statorAmps()[i + 1] * w;
+    return trace.at(trace.statorAmps(), seconds);
   }
 
   /** When the circuit is opened, s; infinite: never. */

@@ -44,6 +44,19 @@ public record ClosingPeak(
         Math.max(ringRms, other.ringRms));
   }
 
+  /** Every value times a factor: what a search among samples may have missed. */
+  ClosingPeak raised(double factor) {
+    return new ClosingPeak(
+        factor * statorAmps,
+        statorAtSeconds,
+        factor * ringAmps,
+        factor * torque,
+        torqueAtSeconds,
+        factor * leastTorque,
+        factor * statorRms,
+        factor * ringRms);
+  }
+
   /** With a torque of the steady circuit in it. */
   ClosingPeak orTorque(double newtonMetres, double atSeconds) {
     boolean twist = newtonMetres > torque;

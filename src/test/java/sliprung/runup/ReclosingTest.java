@@ -109,8 +109,10 @@ class ReclosingTest {
     assertThat(most).isBetween(0.9 * 1.5 * Math.sqrt(3.0), 1.5 * Math.sqrt(3.0));
     double expected = most * 3.0 * PHASE * PHASE / (TRANSIENT_REACTANCE * SYNCHRONOUS);
     ClosingPeak peak = new Reclosing(circumstance(lossless()), 0.0).greatest();
-    assertThat(peak.torque()).isCloseTo(expected, within(1e-3 * expected));
-    assertThat(-peak.leastTorque()).isCloseTo(expected, within(1e-3 * expected));
+    // the 24 angles meet 120 degrees: here the raise for what lies between them is all margin
+    double raised = expected / Math.cos(Math.PI / 24.0);
+    assertThat(peak.torque()).isCloseTo(raised, within(1e-3 * raised));
+    assertThat(-peak.leastTorque()).isCloseTo(raised, within(1e-3 * raised));
   }
 
   @Test

@@ -95,6 +95,21 @@ public final class NoStepLingers implements Rule {
             : builder.margin(margin).byMargin());
   }
 
+  /** When, between two samples, the speed comes within the gain; to a millionth of the piece. */
+  private static double crossing(Trace trace, int later, double speed, double gain) {
+    double beyond = trace.seconds()[later - 1];
+    double within = trace.seconds()[later];
+    for (int halving = 0; halving < 20; halving++) {
+      double middle = 0.5 * (beyond + within);
+      if (Math.abs(speed - trace.at(trace.speed(), middle)) < gain) {
+        within = middle;
+      } else {
+        beyond = middle;
+      }
+    }
+    return within;
+  }
+
   /** How long before the closing the speed came within that gain of the speed at the closing. */
   private static Wait wait(Closing closing, double gain) {
     Trace trace = closing.before().trace();
@@ -105,7 +120,7 @@ public final class NoStepLingers implements Rule {
       i--;
     }
     double length = end - trace.seconds()[0];
-    double seconds = end - trace.seconds()[i];
+    double seconds = end - (i == 0 ? trace.seconds()[0] : crossing(trace, i, speed, gain));
     return new Wait(closing, seconds, length > 0.0 ? seconds / length : 0.0);
   }
 }
