@@ -84,7 +84,7 @@ public final class FirstLimitDrawing {
       g.setStroke(Ink.EDGE);
       g.draw(new Line2D.Double(4, top + ROW, WIDTH - 4, top + ROW));
       boolean loud = row.state().isLost();
-      String fault = Lines.cut(row.start().scenario().words(), LABEL_LETTERS);
+      String fault = Lines.cut(shortened(row.start().scenario().words()), LABEL_LETTERS);
       words.left(fault, loud ? Ink.STRONG : Ink.LABEL, Ink.TEXT, 4, top + 15);
       words.left(row.circumstances(), Ink.FINE, Ink.QUIET, 4, top + 30);
       row.limit().ifPresent(this::wall);
@@ -174,5 +174,12 @@ public final class FirstLimitDrawing {
       return Math.min(
           frame.area().getMaxX(), Math.max(frame.area().getX(), frame.x(clearing.seconds())));
     }
+  }
+
+  /** Words that would be cut lose what the row says anyway. */
+  private static String shortened(String words) {
+    return words.length() <= LABEL_LETTERS
+        ? words
+        : words.replace("step contactor", "contactor").replace(" at running load", ", running");
   }
 }

@@ -150,7 +150,8 @@ public final class StartDrawing {
       Graphics2D g, Frame frame, StartOverTime.Banded quantity, String name, Color colour) {
     Marks.series(g, name);
     g.setColor(colour);
-    g.setStroke(Ink.COMPUTED);
+    // ring and stator currents cross: told apart in grey as well
+    g.setStroke(colour.equals(Ink.RING) ? Ink.DASHED : Ink.COMPUTED);
     g.draw(Shapes.line(frame, quantity.nominal().seconds(), quantity.nominal().values()));
     Marks.none(g);
   }

@@ -56,7 +56,8 @@ final class ReviewCommand implements Callable<Integer> {
 
   @Option(
       names = "--pdf",
-      description = "Write review.pdf too, for signing and filing; it takes a second or two more.")
+      description =
+          "Write review.pdf too, for signing and filing; it takes longer than all the rest.")
   private boolean withPdf;
 
   @Option(

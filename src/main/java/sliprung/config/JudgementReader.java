@@ -3,6 +3,7 @@ package sliprung.config;
 import java.time.LocalDate;
 import java.time.format.DateTimeParseException;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -11,7 +12,9 @@ import java.util.Set;
 import java.util.TreeMap;
 import sliprung.quantity.Dimension;
 import sliprung.starter.AcceptedDeviation;
+import sliprung.starter.Distribution;
 import sliprung.starter.EvidenceGrade;
+import sliprung.starter.Varying;
 
 /** Reads what bears on the judgement: wanted margins, evidence, accepted deviations. */
 final class JudgementReader {
@@ -72,6 +75,27 @@ final class JudgementReader {
       input.choice(grades).ifPresent(g -> evidence.put(input.key(), g));
     }
     return evidence;
+  }
+
+  Map<Varying, Distribution> distributions() {
+    Map<Varying, Distribution> distributions = new TreeMap<>();
+    Optional<Field> field = root.optional("distributions");
+    if (field.isEmpty()) {
+      return distributions;
+    }
+    Map<String, Distribution> kinds = new LinkedHashMap<>();
+    for (Distribution kind : Distribution.values()) {
+      kinds.put(kind.word(), kind);
+    }
+    String[] keys = Arrays.stream(Varying.values()).map(Varying::word).toArray(String[]::new);
+    Section section = field.get().section(keys);
+    for (Varying varying : Varying.values()) {
+      section
+          .optional(varying.word())
+          .flatMap(f -> f.choice(kinds))
+          .ifPresent(kind -> distributions.put(varying, kind));
+    }
+    return distributions;
   }
 
   List<AcceptedDeviation> accepted() {

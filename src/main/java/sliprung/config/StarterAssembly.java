@@ -16,6 +16,7 @@ import sliprung.starter.Ambient;
 import sliprung.starter.Conductor;
 import sliprung.starter.Contactor;
 import sliprung.starter.Device;
+import sliprung.starter.Distribution;
 import sliprung.starter.Duty;
 import sliprung.starter.EvidenceGrade;
 import sliprung.starter.Interlocks;
@@ -26,6 +27,7 @@ import sliprung.starter.ResistorBank;
 import sliprung.starter.Starter;
 import sliprung.starter.Step;
 import sliprung.starter.Supply;
+import sliprung.starter.Varying;
 
 /** Puts one starter together from its parts, each of which has a reader of its own. */
 final class StarterAssembly {
@@ -53,6 +55,7 @@ final class StarterAssembly {
     "interlocks",
     "ambient",
     "evidence",
+    "distributions",
     "accepted"
   };
 
@@ -151,6 +154,7 @@ final class StarterAssembly {
     JudgementReader judgement = new JudgementReader(root, knownRules);
     Map<String, Double> margins = judgement.margins();
     List<AcceptedDeviation> accepted = judgement.accepted();
+    Map<Varying, Distribution> distributions = judgement.distributions();
     tags(root);
     coordination(root, switchgear);
     Map<String, EvidenceGrade> evidence = judgement.evidence();
@@ -185,7 +189,8 @@ final class StarterAssembly {
             reading.assumptions(),
             reading.notYetJudged(),
             method,
-            reading.dialScales()));
+            reading.dialScales(),
+            distributions));
   }
 
   /** One tag, one thing: findings name their subject by its tag. */

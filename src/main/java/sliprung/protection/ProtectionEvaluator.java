@@ -128,6 +128,17 @@ public final class ProtectionEvaluator {
     return responses;
   }
 
+  List<DeviceResponse> devices(Edge edge, Starts row) {
+    return devices.entrySet().stream()
+        .map(entry -> respond(entry.getKey(), edge, entry.getValue().get(edge), row))
+        .toList();
+  }
+
+  /** Names of the parts, in the order of every list of responses. */
+  public List<String> partNames() {
+    return parts.stream().map(Part::name).toList();
+  }
+
   List<PartResponse> parts(Currents currents, PartPreload preload, int starts) {
     return parts.stream().map(part -> part.over(currents, preload, starts)).toList();
   }

@@ -28,13 +28,19 @@ public final class StartProtection {
   }
 
   /**
-   * Every device at every edge, in the file's order, over the last of some starts in a row. Margins
+   * Every device at one edge, in the file's order, over the last of some starts in a row. Margins
    * come with the fast edge of a permitted start: their factor applies to every start of the row,
    * never to the preload nor to the running after the last.
    *
+   * @param edge which relay of each set
    * @param preload before the first
    * @param starts 1 or more
    */
+  public List<DeviceResponse> devices(Edge edge, DevicePreload preload, int starts) {
+    return evaluator.devices(edge, new Starts(currents, starts, preload));
+  }
+
+  /** Every device at every edge; otherwise as with one. */
   public List<DeviceResponse> devices(DevicePreload preload, int starts) {
     return evaluator.devices(new Starts(currents, starts, preload));
   }

@@ -38,6 +38,8 @@ import java.util.stream.IntStream;
  * @param notYetJudged keys that were read and are kept for rules not built yet
  * @param method how starts are computed
  * @param dialScales scales of real dials, by the dial's name such as {@code protection.F2.dial}
+ * @param distributions how what varies from start to start is spread; one that is not named lies
+ *     anywhere in its spread with the same chance
  */
 public record Starter(
     String name,
@@ -66,7 +68,8 @@ public record Starter(
     List<Assumption> assumptions,
     List<String> notYetJudged,
     Method method,
-    Map<String, DialScale> dialScales) {
+    Map<String, DialScale> dialScales,
+    Map<Varying, Distribution> distributions) {
 
   /** The rule book a starter is held against. */
   public enum Practice {
@@ -208,6 +211,7 @@ public record Starter(
         assumptions,
         notYetJudged,
         method,
+        Map.of(),
         Map.of());
   }
 
@@ -223,6 +227,7 @@ public record Starter(
     assumptions = List.copyOf(assumptions);
     notYetJudged = List.copyOf(notYetJudged);
     dialScales = new TreeMap<>(dialScales);
+    distributions = new TreeMap<>(distributions);
     if (steps.size() != resistors.sections().size()) {
       throw new IllegalArgumentException(
           steps.size() + " steps for " + resistors.sections().size() + " sections");
@@ -286,16 +291,51 @@ public record Starter(
     return cutsOut.contains(starPoint);
   }
 
-  /** The same starter with other protective devices. */
+  /** Number of sections of the bank. */
+  public int sectionCount() {
+    return resistors.sections().size();
+  }
+
+  /** The same starter with other devices. */
   public Starter withProtection(List<Device> devices) {
+    return with(supply, motor, load, resistors, steps, devices);
+  }
+
+  /** The same starter with other steps, as many. */
+  public Starter withSteps(List<Step> others) {
+    return with(supply, motor, load, resistors, others, protection);
+  }
+
+  /** The same starter with another bank of as many sections. */
+  public Starter withResistors(ResistorBank bank) {
+    return with(supply, motor, load, bank, steps, protection);
+  }
+
+  /** The same starter with another motor. */
+  public Starter withMotor(Motor other) {
+    return with(supply, other, load, resistors, steps, protection);
+  }
+
+  /** The same starter with another load. */
+  public Starter withLoad(Load other) {
+    return with(supply, motor, other, resistors, steps, protection);
+  }
+
+  private Starter with(
+      Supply source,
+      Motor machine,
+      Load driven,
+      ResistorBank bank,
+      List<Step> ofSteps,
+      List<Device> devices) {
     return new Starter(
         name,
         practice,
-        supply,
-        motor,
-        load,
-        resistors,
-        steps,
+        source,
+        machine,
+        driven,
+        bank,
+        ofSteps,
         sequence,
         timerSpread,
         levelSpread,
@@ -315,75 +355,7 @@ public record Starter(
         assumptions,
         notYetJudged,
         method,
-        dialScales);
-  }
-
-  /** The same starter with other steps, as many. */
-  public Starter withSteps(List<Step> others) {
-    return new Starter(
-        name,
-        practice,
-        supply,
-        motor,
-        load,
-        resistors,
-        others,
-        sequence,
-        timerSpread,
-        levelSpread,
-        contactors,
-        breakers,
-        protection,
-        statorConductor,
-        rotorConductor,
-        duty,
-        limits,
-        margins,
-        fuseWear,
-        interlocks,
-        ambient,
-        evidence,
-        accepted,
-        assumptions,
-        notYetJudged,
-        method,
-        dialScales);
-  }
-
-  /** The same starter with another bank of as many sections. */
-  public Starter withResistors(ResistorBank bank) {
-    return new Starter(
-        name,
-        practice,
-        supply,
-        motor,
-        load,
-        bank,
-        steps,
-        sequence,
-        timerSpread,
-        levelSpread,
-        contactors,
-        breakers,
-        protection,
-        statorConductor,
-        rotorConductor,
-        duty,
-        limits,
-        margins,
-        fuseWear,
-        interlocks,
-        ambient,
-        evidence,
-        accepted,
-        assumptions,
-        notYetJudged,
-        method,
-        dialScales);
-  }
-
-  /** Number of sections of the bank. */
-  public int sectionCount() {
-    return resistors.sections().size();
+        dialScales,
+        distributions);
   }
 }

@@ -107,7 +107,7 @@ public final class Corners {
    * The source at a voltage: reactance from the least fault current at and below rated voltage,
    * from the greatest above it, where the greatest currents decide. Ideal without the least.
    */
-  private static Source source(Supply supply, double supplyPu) {
+  public static Source source(Supply supply, double supplyPu) {
     double volts = supply.voltage() * supplyPu;
     if (supply.faultMinAmps().isEmpty()) {
       return new Source(volts, 0.0);

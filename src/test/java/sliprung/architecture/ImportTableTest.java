@@ -67,6 +67,16 @@ class ImportTableTest {
                       "tolerance",
                       RULES)),
               Map.entry(
+                  "sampling",
+                  List.of(
+                      "starter",
+                      "machine",
+                      "runup",
+                      "protection",
+                      "tolerance",
+                      "review",
+                      "org.apache.commons.math3..")),
+              Map.entry(
                   "dial", List.of("quantity", "numeric", "starter", "tolerance", RULES, "review")),
               Map.entry(
                   "chart",
@@ -97,6 +107,7 @@ class ImportTableTest {
                       RULES,
                       "review",
                       "dial",
+                      "sampling",
                       "chart",
                       "com.fasterxml.jackson..",
                       "com.openhtmltopdf..",
@@ -118,6 +129,7 @@ class ImportTableTest {
                       RULES,
                       "review",
                       "dial",
+                      "sampling",
                       "chart",
                       "record",
                       "picocli.."))));
