@@ -32,6 +32,7 @@ class ReviewJsonTest {
             "inputs",
             "motor",
             "starts",
+            "restarts",
             "findings");
     assertThat(keys(JSON.get("inputs").get(0))).containsExactly("file", "sha256", "text");
     assertThat(keys(JSON.get("motor")))

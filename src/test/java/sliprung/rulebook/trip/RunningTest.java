@@ -45,7 +45,8 @@ class RunningTest {
     Finding finding = StarterText.crusher().finding(RULE, "F2");
 
     assertThat(finding.start().orElseThrow().corner().id()).startsWith("90v-heavy");
-    assertThat(finding.verdict()).isEqualTo(Verdict.CLEAR);
+    // its panel is at 35 °C, where nothing promises the 1.05 of 20 °C
+    assertThat(finding.verdict()).isEqualTo(Verdict.TIGHT);
   }
 
   @Test
