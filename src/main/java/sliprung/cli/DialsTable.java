@@ -1,10 +1,12 @@
 package sliprung.cli;
 
 import java.io.PrintWriter;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.SortedSet;
-import java.util.TreeSet;
 import java.util.stream.Collectors;
 import sliprung.dial.Dial;
 import sliprung.dial.DialReport;
@@ -46,12 +48,7 @@ final class DialsTable {
         terminal.strong(
             String.format(ROW, "device", "dial", "set to", "window", "recommended").strip()));
     survey.reports().forEach(this::report);
-    SortedSet<Question> everywhere = everywhere(survey.reports());
-    if (!everywhere.isEmpty()) {
-      out.println();
-      wrapped("", "Broken today, and no dial alone moves it:");
-      everywhere.forEach(q -> wrapped("   ", Printable.of(DialText.words(q))));
-    }
+    apart(survey.reports());
     if (survey.reports().stream().anyMatch(r -> !r.dial().scale().hasRange())) {
       out.println();
       wrapped(
@@ -61,11 +58,30 @@ final class DialsTable {
     }
   }
 
-  private static SortedSet<Question> everywhere(List<DialReport> reports) {
-    SortedSet<Question> all = new TreeSet<>();
-    reports.stream().filter(r -> r.looked() > 0).findFirst().ifPresent(r -> all.addAll(r.apart()));
-    reports.stream().filter(r -> r.looked() > 0).forEach(r -> all.retainAll(r.apart()));
-    return all;
+  /** Breaches that were not counted, once for all dials that cannot move the same ones. */
+  private void apart(List<DialReport> reports) {
+    Map<SortedSet<Question>, List<String>> dials = new LinkedHashMap<>();
+    reports.stream()
+        .filter(r -> !r.apart().isEmpty())
+        .forEach(
+            r ->
+                dials
+                    .computeIfAbsent(r.apart(), a -> new ArrayList<>())
+                    .add(r.dial().device() + " " + r.dial().setting()));
+    dials.forEach(
+        (questions, names) -> {
+          out.println();
+          boolean every = names.size() == reports.size();
+          wrapped(
+              "",
+              "Broken today, not moved by "
+                  + (every ? "any of these dials" : Printable.of(String.join(", ", names)))
+                  + " and not counted there:");
+          wrapped(
+              "   ",
+              Printable.of(
+                  questions.stream().map(DialText::words).collect(Collectors.joining("; "))));
+        });
   }
 
   private void report(DialReport report) {

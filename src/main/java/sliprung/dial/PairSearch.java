@@ -80,8 +80,8 @@ final class PairSearch {
       profile.lookAt(profile.grid());
       second.recommended().ifPresent(profile::at);
       for (Window window : second.noFurther()) {
-        profile.at(window.low());
-        profile.at(window.high());
+        profile.at(inward(second.dial(), window.low(), window));
+        profile.at(inward(second.dial(), window.high(), window));
       }
       Yardstick yardstick = new Yardstick(today, second.apart());
       Yardstick further = new Yardstick(today, breaches(today));
@@ -90,7 +90,7 @@ final class PairSearch {
               e ->
                   new Trial(
                       second.dial(),
-                      e.getKey(),
+                      second.dial().onScale(e.getKey()), // it is searched there in full
                       !further.broken(e.getValue()).isEmpty(),
                       depth(yardstick, e.getValue(), toMend) - depth(yardstick, today, toMend)))
           .filter(t -> t.gain() > LEAST_GAIN)
@@ -99,6 +99,16 @@ final class PairSearch {
           .forEach(trials::add);
     }
     return trials.stream().sorted(ORDER).limit(MOST_TRIALS).toList();
+  }
+
+  /** The setting of a dial at an end of a window, within the window where there is one. */
+  private static double inward(Dial dial, double end, Window window) {
+    double setting = dial.onScale(end);
+    if (window.contains(setting)) {
+      return setting;
+    }
+    double next = dial.neighbour(setting, setting > window.high() ? -1 : 1);
+    return window.contains(next) ? next : setting;
   }
 
   private static final Comparator<Trial> ORDER =

@@ -56,6 +56,18 @@ class DialsCommandTest {
   }
 
   @Test
+  void should_list_apart_what_is_broken_and_not_counted() throws IOException {
+    StarterText unseen = StarterText.sound().without("F5:");
+
+    Ran ran = run("dials", file(unseen).toString(), "--on", "2026-12-01");
+
+    assertThat(ran.status()).isEqualTo(1);
+    assertThat(ran.out().replaceAll("\\s+", " "))
+        .contains("window")
+        .containsPattern("not counted there:[^.]*sequence/supervision, sequence timer");
+  }
+
+  @Test
   void a_broken_file_is_told_and_nothing_computed() throws IOException {
     Ran ran = run("dials", file(StarterText.sound().with("power: 55 kW", "power: 55")).toString());
 

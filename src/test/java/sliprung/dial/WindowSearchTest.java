@@ -220,7 +220,7 @@ class WindowSearchTest {
       double other = pair.value();
       assertThat(pair.window().low() * other).isGreaterThanOrEqualTo(8.0);
       assertThat(pair.window().high()).isLessThanOrEqualTo(3.0);
-      assertThat(other).isLessThanOrEqualTo(3.0);
+      assertThat(other).isLessThanOrEqualTo(3.0).isEqualTo(Dial.threeFigures(other));
     }
   }
 
