@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.Predicate;
 import sliprung.machine.Machine;
 import sliprung.runup.StartHistory;
 import sliprung.starter.Contactor;
@@ -140,7 +141,15 @@ public final class ProtectionEvaluator {
   }
 
   List<PartResponse> parts(Currents currents, PartPreload preload, int starts) {
-    return parts.stream().map(part -> part.over(currents, preload, starts)).toList();
+    return parts(currents, preload, starts, name -> true);
+  }
+
+  List<PartResponse> parts(
+      Currents currents, PartPreload preload, int starts, Predicate<String> which) {
+    return parts.stream()
+        .filter(part -> which.test(part.name()))
+        .map(part -> part.over(currents, preload, starts))
+        .toList();
   }
 
   List<Double> sectionLevelsAfter(Currents currents, PartPreload preload, int starts) {

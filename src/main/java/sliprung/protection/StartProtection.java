@@ -3,6 +3,7 @@ package sliprung.protection;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.Predicate;
 import sliprung.runup.StartHistory;
 
 /**
@@ -94,6 +95,11 @@ public final class StartProtection {
    */
   public List<PartResponse> parts(PartPreload preload, int starts) {
     return evaluator.parts(currents, preload, starts);
+  }
+
+  /** Some of the parts, by name; otherwise as all of them. */
+  public List<PartResponse> parts(PartPreload preload, int starts, Predicate<String> which) {
+    return evaluator.parts(currents, preload, starts, which);
   }
 
   /**

@@ -71,7 +71,7 @@ final class BlindSpotPart {
       case NOT_JUDGED -> "not judged";
       case LATE -> "late: " + at + in;
       case LIMIT_UNKNOWN -> at + ", limit not known";
-      case SEES -> "sees in " + at;
+      case SEES -> "sees in\u00a0" + at.replace(" ", "\u00a0");
     };
   }
 

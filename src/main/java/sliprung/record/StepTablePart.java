@@ -7,6 +7,9 @@ import sliprung.runup.Scenario;
 
 /** What meters show step by step, and with one step left out. */
 final class StepTablePart {
+  /** What a clamp meter and the supply's voltage leave open together, per unit. */
+  private static final double METER_ERROR = 0.05;
+
   private static final String ARROW = " → ";
 
   private StepTablePart() {}
@@ -108,6 +111,26 @@ final class StepTablePart {
               .orElse("nothing"));
     }
     cells.close();
+    if (!skipped && ammeterCannotTell(rows)) {
+      page.element(
+          "p",
+          "The stator current hardly differs between these cases: an ammeter cannot tell which"
+              + " contactor stayed open. Go by the speed or the ring volts.");
+    }
+  }
+
+  /** Whether two neighbours among the cases at one load draw stator currents alike to a meter. */
+  private static boolean ammeterCannotTell(List<StepReadings.LeftOut> rows) {
+    List<StepReadings.LeftOut> starting =
+        rows.stream().filter(r -> r.start().scenario().load() == Scenario.LoadMode.START).toList();
+    for (int k = 1; k < starting.size(); k++) {
+      double one = starting.get(k - 1).read().statorAmps();
+      double other = starting.get(k).read().statorAmps();
+      if (Math.abs(one - other) < METER_ERROR * Math.max(one, other)) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private static String jump(StepReadings.Reading next) {

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 import sliprung.quantity.Show;
+import sliprung.runup.Scenario;
 import sliprung.runup.Stage;
 import sliprung.runup.Trace;
 
@@ -95,6 +96,13 @@ public final class Exposures {
             + Show.amps(trace.ringAmps()[trace.last()])
             + " in the rings)";
     return switch (start.scenario().kind()) {
+      case SKIPPED ->
+          "With "
+              + words
+              + (speed == 0.0
+                  ? ", the rotor stands and "
+                  : ", the motor settles at " + Show.rpm(speed) + " and ")
+              + draws;
       case LOCKED -> scenario + ", the motor ends on step " + last.step() + " and " + draws;
       case LOCKED_STEP, RINGS_SHORTED, RUNNING_LOCKED -> scenario + " the motor " + draws;
       default ->
@@ -109,7 +117,14 @@ public final class Exposures {
       return "";
     }
     if (worst.clearing().isEmpty()) {
-      return worst.start().scenario().kind() == sliprung.runup.Scenario.Kind.HELD
+      Scenario.Kind kind = worst.start().scenario().kind();
+      if (kind == Scenario.Kind.SKIPPED) {
+        return "Fit a proof of every step that clears before "
+            + Show.seconds(worst.limitAtSeconds())
+            + ", or measure the current or temperature of the bank itself: the rotor turns, and the"
+            + " last step may still close.";
+      }
+      return kind == Scenario.Kind.HELD
           ? "Fit a sequence timer that trips the line contactor before "
               + Show.seconds(worst.limitAtSeconds())
               + ", or measure the current or temperature of the bank itself."

@@ -169,16 +169,12 @@ public final class Restarts {
   private Map<String, Double> levels(
       StartProtection over, PartPreload parts, DevicePreload devices) {
     Map<String, Double> levels = new LinkedHashMap<>();
-    for (PartResponse part : over.parts(parts, 1)) {
-      if (isHeated(part.part())) {
-        levels.put(part.part(), part.use());
-      }
+    for (PartResponse part : over.parts(parts, 1, Restarts::isHeated)) {
+      levels.put(part.part(), part.use());
     }
     Map<String, Double> uses = new HashMap<>();
-    for (DeviceResponse response : over.devices(devices, 1)) {
-      if (response.edge() == Edge.FAST) {
-        uses.put(response.device(), response.use());
-      }
+    for (DeviceResponse response : over.devices(Edge.FAST, devices, 1)) {
+      uses.put(response.device(), response.use());
     }
     relays().forEach(r -> levels.put(r.tag(), Math.min(1.0, uses.get(r.tag()))));
     return levels;
