@@ -66,7 +66,7 @@ class RecordPartsTest {
   @Test
   void should_say_what_sees_in_words() {
     assertThat(BlindSpotPart.words(new BlindSpots.Cell(BlindSpots.Sight.SEES, 13.7, 1.0)))
-        .isEqualTo("sees in 13.7\u00a0s");
+        .isEqualTo("sees in\u00a013.7\u00a0s");
     assertThat(
             BlindSpotPart.words(
                 new BlindSpots.Cell(BlindSpots.Sight.BLIND, Double.POSITIVE_INFINITY, 0.001)))
