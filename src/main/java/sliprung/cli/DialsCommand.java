@@ -56,7 +56,9 @@ final class DialsCommand implements Callable<Integer> {
     }
     LocalDate on = date == null ? LocalDate.now() : date;
     long from = System.nanoTime();
-    DialSurvey survey = DialSurvey.of(described.get().starter(), new ReviewEvaluation(on));
+    DialSurvey survey =
+        DialSurvey.of(
+            described.get().starter(), new ReviewEvaluation(on, described.get().starter()));
     if (json) {
       out.println(DialsJson.of(survey.reports()));
     } else {

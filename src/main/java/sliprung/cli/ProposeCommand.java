@@ -97,7 +97,7 @@ final class ProposeCommand implements Callable<Integer> {
       return Reviewer.review(starter, on).exitStatus();
     }
     long from = System.nanoTime();
-    Proposal proposal = ProposalSearch.of(starter, new ReviewEvaluation(on));
+    Proposal proposal = ProposalSearch.of(starter, new ReviewEvaluation(on, starter));
     double seconds = (System.nanoTime() - from) / 1e9;
     Optional<String> text = Optional.empty();
     if (target != null) {

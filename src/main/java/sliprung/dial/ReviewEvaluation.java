@@ -6,6 +6,7 @@ import java.util.TreeMap;
 import sliprung.dial.Judgement.Answer;
 import sliprung.dial.Judgement.Question;
 import sliprung.review.FindingText;
+import sliprung.review.KnownStarts;
 import sliprung.review.Review;
 import sliprung.review.Reviewer;
 import sliprung.rulebook.Finding;
@@ -18,15 +19,22 @@ public final class ReviewEvaluation implements Evaluation {
       java.util.Set.of("data/assumed", "data/accepted");
 
   private final LocalDate date;
+  private final KnownStarts known;
 
-  /** An evaluation with accepted deviations judged at that date. */
-  public ReviewEvaluation(LocalDate date) {
+  /**
+   * An evaluation.
+   *
+   * @param date at which accepted deviations are judged
+   * @param today the starter as it is set: turning a device's dial leaves its starts as they are
+   */
+  public ReviewEvaluation(LocalDate date, Starter today) {
     this.date = date;
+    this.known = new KnownStarts(today);
   }
 
   @Override
   public Judgement at(Starter starter) {
-    return judgement(Reviewer.review(starter, date));
+    return judgement(Reviewer.review(starter, date, known));
   }
 
   /** The answers of a review. */

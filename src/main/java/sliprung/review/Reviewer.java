@@ -43,6 +43,14 @@ public final class Reviewer {
    * @param date at which accepted deviations are judged
    */
   public static Review review(Starter starter, LocalDate date) {
+    return review(starter, date, new KnownStarts(starter));
+  }
+
+  /**
+   * Reviews a starter among others that are set differently: starts that are known are not computed
+   * again.
+   */
+  public static Review review(Starter starter, LocalDate date, KnownStarts known) {
     List<Identification> identifications = NameplateIdentification.identify(starter.motor());
     List<RuleBook.Answers> answers = new ArrayList<>();
     List<ComputedStart> starts = new ArrayList<>();
@@ -54,7 +62,7 @@ public final class Reviewer {
       first = first == null ? machine : first;
       String circuit = i == 0 ? "" : "circuit-" + (i + 1);
       StartComputation.Computed computed =
-          new StartComputation(starter, machine, circuit).compute();
+          new StartComputation(starter, machine, circuit, known).compute();
       method = method == null ? computed.method() : method;
       Facts facts = facts(starter, machine, identifications.get(i), computed);
       starts.addAll(facts.starts());

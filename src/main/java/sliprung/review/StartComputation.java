@@ -30,6 +30,7 @@ final class StartComputation {
   private final StartSimulator simulator;
   private final ProtectionEvaluator evaluator;
   private final String circuit;
+  private final KnownStarts known;
 
   /**
    * A computation.
@@ -37,7 +38,13 @@ final class StartComputation {
    * @param circuit empty, or which of several circuits the machine stands for
    */
   StartComputation(Starter starter, Machine machine, String circuit) {
+    this(starter, machine, circuit, new KnownStarts(starter));
+  }
+
+  /** A computation that takes from known starts what is the same. */
+  StartComputation(Starter starter, Machine machine, String circuit, KnownStarts known) {
     this.starter = starter;
+    this.known = known.serve(starter) ? known : new KnownStarts(starter);
     this.simulator = new StartSimulator(starter, machine);
     this.evaluator = new ProtectionEvaluator(starter, machine);
     this.circuit = circuit;
@@ -68,18 +75,7 @@ final class StartComputation {
 
   /** Corners share nothing, so both cores work on them; the order stays that of the corners. */
   Computed compute() {
-    Map<Corner, Conditions> points = new LinkedHashMap<>(Corners.of(starter));
-    points.putAll(WorstPoints.of(starter, simulator));
-    List<Both> permitted =
-        points.entrySet().stream().toList().parallelStream()
-            .map(
-                e ->
-                    new Both(
-                        e.getKey(),
-                        e.getValue(),
-                        simulator.run(Scenario.PERMITTED, e.getValue()),
-                        simulator.runTransient(Scenario.PERMITTED, e.getValue())))
-            .toList();
+    List<Both> permitted = known.permitted(circuit, this::permitted);
     Map<Corner, ModelError> errors = new LinkedHashMap<>();
     permitted.forEach(p -> errors.put(p.corner(), p.error()));
     RunUpMethod method = RunUpMethod.choose(starter.method(), errors);
@@ -91,6 +87,20 @@ final class StartComputation {
       running.put(at.corner(), at.running());
     }
     return new Computed(starts, running, method);
+  }
+
+  private List<Both> permitted() {
+    Map<Corner, Conditions> points = new LinkedHashMap<>(Corners.of(starter));
+    points.putAll(WorstPoints.of(starter, simulator));
+    return points.entrySet().stream().toList().parallelStream()
+        .map(
+            e ->
+                new Both(
+                    e.getKey(),
+                    e.getValue(),
+                    simulator.run(Scenario.PERMITTED, e.getValue()),
+                    simulator.runTransient(Scenario.PERMITTED, e.getValue())))
+        .toList();
   }
 
   /**
@@ -139,7 +149,8 @@ final class StartComputation {
     DevicePreload forgotten = before.remembered().onWarmBank(sections);
     PartPreload hot = before.parts(0.0, sections);
     for (Scenario fault : faults()) {
-      StartProtection history = evaluator.over(fault(fault, both));
+      StartProtection history =
+          evaluator.over(known.fault(circuit, corner, fault, () -> fault(fault, both)));
       if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {
         starts.add(
             fault(

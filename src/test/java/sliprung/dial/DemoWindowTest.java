@@ -57,7 +57,8 @@ class DemoWindowTest {
                 OptionalDouble.of(0.1), OptionalDouble.of(0.4), OptionalDouble.of(0.01), 0.02),
             bare.setter());
 
-    DialReport report = new WindowSearch(new ReviewEvaluation(StarterText.DAY)).of(CRUSHER, dial);
+    DialReport report =
+        new WindowSearch(new ReviewEvaluation(StarterText.DAY, CRUSHER)).of(CRUSHER, dial);
 
     assertThat(report.windows()).hasSize(1);
     Window window = report.windows().get(0);
