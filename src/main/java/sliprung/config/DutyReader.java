@@ -1,5 +1,6 @@
 package sliprung.config;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import sliprung.quantity.Dimension;
@@ -13,7 +14,9 @@ final class DutyReader {
   private DutyReader() {}
 
   static Duty read(Section root, int steps) {
-    Section duty = root.sectionOrDefaults("duty", "starts", "restart-after", "inching", "plugging");
+    Section duty =
+        root.sectionOrDefaults(
+            "duty", "starts", "restart-after", "inching", "plugging", "past-starts");
     Section starts = duty.sectionOrDefaults("starts", "cold", "hot", "per-hour");
     return new Duty(
         count(starts, "cold", 1, 2),
@@ -21,7 +24,18 @@ final class DutyReader {
         starts.optionalNumber("per-hour", Dimension.NUMBER, Range.POSITIVE),
         duty.numberOr("restart-after", Dimension.TIME, Range.NOT_NEGATIVE, 0.0, "0 s"),
         repeated(duty, "inching", steps),
-        repeated(duty, "plugging", steps));
+        repeated(duty, "plugging", steps),
+        pastStarts(duty));
+  }
+
+  private static List<Double> pastStarts(Section duty) {
+    return duty
+        .optional("past-starts")
+        .flatMap(f -> f.list("how long ago each start ended, such as [40 min, 3 min]"))
+        .orElse(List.of())
+        .stream()
+        .map(f -> f.number(Dimension.TIME, Range.NOT_NEGATIVE))
+        .toList();
   }
 
   private static int count(Section starts, String key, int least, int usual) {

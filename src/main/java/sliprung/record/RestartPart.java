@@ -32,7 +32,9 @@ final class RestartPart {
         "p",
         "A pause is a bound, late rather than early: what is left of the heat of before and a whole"
             + " start from cold together stay within every limit. After a trip or a failed start"
-            + " find the cause first, whatever the pause.",
+            + " find the cause first, whatever the pause. Past"
+            + " starts are those of duty.past-starts, from running hot, at rest ever since: their"
+            + " pause counts from now.",
         "class",
         "quiet");
     page.end();

@@ -7,7 +7,8 @@ import sliprung.rulebook.ComputedStart;
  * When the motor may be started again after something.
  *
  * @param after what ended the run or start before
- * @param seconds from the opening of the line; infinite where no pause is enough
+ * @param seconds from the opening of the line, after past starts from now; infinite where no pause
+ *     is enough
  * @param limitedBy device tag or part that decides; empty where nothing asks for a pause
  * @param pastLimit it had passed its limit: inspect it first, whatever the pause
  * @param start the start that was ended, at the corner that decides
@@ -24,7 +25,9 @@ public record Restart(
     /** A held step, when it is cleared. */
     HELD("a held start"),
     /** A rotor that does not turn, when it is cleared. */
-    LOCKED("a locked start");
+    LOCKED("a locked start"),
+    /** The starts listed as past, hot from running before the first; counted from now. */
+    PAST("the past starts listed");
 
     private final String words;
 

@@ -129,6 +129,9 @@ public final class Restarts {
     }
     relays().forEach(r -> tripped.put(r.tag(), 1.0));
     found.add(restart(Restart.After.TRIP, permitted, tripped, fromCold));
+    if (!starter.duty().pastStartsSeconds().isEmpty()) {
+      found.add(restart(Restart.After.PAST, permitted, left(stopped, fromCold), fromCold));
+    }
     for (ComputedStart fault : facts.starts()) {
       Optional<Restart.After> after = after(fault);
       if (after.isPresent() && fault.corner().equals(permitted.corner())) {
@@ -136,6 +139,23 @@ public final class Restarts {
       }
     }
     return found;
+  }
+
+  /** What the running before the first of the past starts and each of them have left by now. */
+  private Map<String, Double> left(Map<String, Double> running, Map<String, Double> fromCold) {
+    List<Double> ago = starter.duty().pastStartsSeconds();
+    double oldest = ago.stream().mapToDouble(a -> a).max().orElseThrow();
+    Map<String, Double> left = new LinkedHashMap<>();
+    fromCold.forEach(
+        (name, ofOneStart) -> {
+          double tau = forgets(name);
+          double level = running.get(name) * Math.exp(-oldest / tau);
+          for (double seconds : ago) {
+            level += ofOneStart * Math.exp(-seconds / tau);
+          }
+          left.put(name, level);
+        });
+    return left;
   }
 
   private static Optional<Restart.After> after(ComputedStart fault) {

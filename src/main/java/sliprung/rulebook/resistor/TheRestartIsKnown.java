@@ -81,6 +81,7 @@ public final class TheRestartIsKnown implements Rule {
                 : after
                     + "it may be started again after "
                     + Show.seconds(restart.seconds())
+                    + (restart.after() == Restart.After.PAST ? " from now" : "")
                     + "; "
                     + part(restart.limitedBy())
                     + " limits it."

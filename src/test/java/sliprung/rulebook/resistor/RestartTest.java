@@ -37,6 +37,23 @@ class RestartTest {
     assertThat(says(all.get(1))).contains("limits it");
   }
 
+  private static double next(String ago) {
+    Facts facts =
+        CrusherFacts.of("class: 10,", "class: 5,", DUTY, DUTY + "\n  past-starts: " + ago);
+    return restart(facts, Restart.After.PAST).seconds();
+  }
+
+  @Test
+  void should_tell_when_the_next_may_follow_a_list_of_past_starts() {
+    double now = next("[60 s, 2 s]");
+    assertThat(now).isGreaterThan(100.0);
+    // what is left shrinks by one factor for every second that all of it is older
+    assertThat(next("[90 s, 32 s]")).isCloseTo(now - 30.0, within(1e-6 * now));
+    assertThat(next("[60 s, 30 s, 2 s]")).isGreaterThan(now);
+    assertThat(next("[2 s]")).isLessThan(now + 60.0);
+    assertThat(next("[20 h]")).isZero();
+  }
+
   @Test
   void should_turn_at_the_pause_that_the_duty_permits() {
     // a second start on a warm relay and winding needs a pause here
