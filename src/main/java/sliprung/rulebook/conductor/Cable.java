@@ -23,9 +23,4 @@ record Cable(String subject, String path, boolean ring, Optional<Conductor> cond
   static Cable rotor(Starter starter) {
     return new Cable("rotor cable", "conductors.rotor", true, starter.rotorConductor());
   }
-
-  /** Whether a starter describes any. */
-  static boolean any(Starter starter) {
-    return starter.statorConductor().isPresent() || starter.rotorConductor().isPresent();
-  }
 }

@@ -49,7 +49,8 @@ record HeldStepMend(String what, SettingWindow window, String unit, List<String>
             + show(roundedDown(window.high()))
             + " ("
             + window.highBy().map(s -> name(s) + " must be cleared").orElse("its greatest")
-            + ").";
+            + "). A rotor that does not turn may ask for less: see locked/step and"
+            + " sequence/supervision.";
     return why.isEmpty() ? ends : ends + " " + String.join(" ", why);
   }
 

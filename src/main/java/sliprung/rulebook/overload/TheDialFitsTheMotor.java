@@ -1,11 +1,13 @@
 package sliprung.rulebook.overload;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Predicate;
 import sliprung.machine.OperatingPoint;
+import sliprung.protection.Edge;
 import sliprung.quantity.Show;
 import sliprung.rulebook.Facts;
 import sliprung.rulebook.Finding;
@@ -61,21 +63,54 @@ public final class TheDialFitsTheMotor implements Rule {
         findings.add(judge(facts, overload));
       }
     }
-    Optional<Device> guard = facts.starter().protection().stream().filter(IS_GUARD).findFirst();
-    if (findings.stream().noneMatch(f -> isInStator(facts, f)) && guard.isEmpty()) {
-      findings.add(unprotected(facts));
+    if (findings.stream().noneMatch(f -> isInStator(facts, f))) {
+      findings.add(
+          facts.starter().protection().stream()
+              .filter(IS_GUARD)
+              .min(Comparator.comparingDouble(d -> surePickUp(facts, d)))
+              .map(guard -> judgeGuard(facts, guard))
+              .orElseGet(() -> unprotected(facts)));
     }
-    return Answer.of(
-        findings,
-        "no overload relay is described; "
-            + guard.map(Device::tag).orElse("nothing")
-            + " follows the motor's current in the stator line instead");
+    return new Answer.Findings(findings);
   }
 
-  /** Devices in the stator line, besides overload relays, that follow an overload of the motor. */
+  /** The least constant current that surely operates a device, A; infinite where it is unknown. */
+  private static double surePickUp(Facts facts, Device device) {
+    return facts.bands().pickUpAmps(device, Edge.SLOW).orElse(Double.POSITIVE_INFINITY);
+  }
+
+  /**
+   * Without an overload relay the device that follows the motor's current most closely stands in
+   * for one, and is held against the same limits from where it surely operates.
+   */
+  private static Finding judgeGuard(Facts facts, Device guard) {
+    FindingBuilder builder = FindingBuilder.of(facts, INFO, guard.tag());
+    OptionalDouble sure = facts.bands().pickUpAmps(guard, Edge.SLOW);
+    OptionalDouble first = facts.bands().pickUpAmps(guard, Edge.FAST);
+    if (sure.isEmpty() || first.isEmpty()) {
+      return builder.notJudged(
+          List.of("protection." + guard.tag() + ".curve"),
+          "No overload relay is described, and from which current "
+              + guard.tag()
+              + " surely operates is not known.");
+    }
+    double set = facts.bands().pickUpAmps(guard, Edge.MIDDLE).orElse(sure.getAsDouble());
+    UltimateTrip trip =
+        new UltimateTrip(
+            set, sure.getAsDouble(), first.getAsDouble(), guard.tag(), Optional.empty());
+    return facts.starter().practice() == Starter.Practice.NEC
+        ? nec(facts, builder, trip)
+        : iec(facts, builder, trip, facts.starter().motor().current(), greatestRunning(facts));
+  }
+
+  /**
+   * Devices in the stator line, besides overload relays, that follow an overload of the motor and
+   * open something: a fuse, by class or by its own points, opens nothing but itself.
+   */
   private static final Predicate<Device> IS_GUARD =
       d ->
           d.fitting().place() == Device.Place.STATOR
+              && d.trips().isPresent()
               && (d instanceof Device.Thermal
                   || d instanceof Device.InverseTime
                   || d instanceof Device.Points);

@@ -1,5 +1,6 @@
 package sliprung.rulebook.overload;
 
+import java.util.Optional;
 import sliprung.quantity.Show;
 import sliprung.rulebook.Facts;
 import sliprung.rulebook.Practice;
@@ -14,10 +15,14 @@ import sliprung.starter.Starter;
  * @param mostAmps every compliant relay has tripped in the end at this current, A
  * @param leastAmps none trips below this current, A
  * @param tag of the relay
- * @param means what the dial means
+ * @param means what the dial means; empty: another device that stands in for an overload relay
  */
 record UltimateTrip(
-    double dialAmps, double mostAmps, double leastAmps, String tag, Device.DialMeans means) {
+    double dialAmps,
+    double mostAmps,
+    double leastAmps,
+    String tag,
+    Optional<Device.DialMeans> means) {
 
   /** Of one relay. */
   static UltimateTrip of(Device.Overload overload, Facts facts) {
@@ -31,7 +36,11 @@ record UltimateTrip(
     boolean fullLoad = overload.dialMeans() == Device.DialMeans.FULL_LOAD;
     double most = fullLoad ? trips * overload.dialAmps() : overload.dialAmps();
     return new UltimateTrip(
-        overload.dialAmps(), most, most * carries / trips, overload.tag(), overload.dialMeans());
+        overload.dialAmps(),
+        most,
+        most * carries / trips,
+        overload.tag(),
+        Optional.of(overload.dialMeans()));
   }
 
   /** Under NFPA 70 a relay of a bare class may be made to either standard: the wider one counts. */
@@ -47,8 +56,19 @@ record UltimateTrip(
 
   /** {@code F2 is set to 208 A and trips in the end at 250 A, 1.20 times the rated 208 A.} */
   String sentence(double ratedAmps) {
+    if (means.isEmpty()) {
+      return "No overload relay is described; "
+          + tag
+          + " stands in for it and is sure to operate at "
+          + Show.amps(mostAmps)
+          + ", "
+          + Show.ratio(mostAmps / ratedAmps)
+          + " times the rated "
+          + Show.amps(ratedAmps)
+          + ".";
+    }
     String set =
-        means == Device.DialMeans.FULL_LOAD
+        means.get() == Device.DialMeans.FULL_LOAD
             ? tag
                 + " is set to "
                 + Show.amps(dialAmps)

@@ -55,6 +55,10 @@ public final class Restarts {
         .flatMap(s -> s.parts().stream())
         .filter(p -> isHeated(p.part()))
         .forEach(p -> p.missing().ifPresent(missing::add));
+    // the starts may have been computed with other sections than these
+    for (int k = 1; k <= facts.starter().sectionCount(); k++) {
+      SectionElement.missing(facts.starter().resistors(), k).ifPresent(missing::add);
+    }
     Motor motor = facts.starter().motor();
     if (motor.coolingSeconds().isEmpty() && !missing.contains("motor.cooling")) {
       missing.add("motor.cooling");
@@ -196,13 +200,37 @@ public final class Restarts {
     for (DeviceResponse response : over.devices(Edge.FAST, devices, 1)) {
       uses.put(response.device(), response.use());
     }
-    relays().forEach(r -> levels.put(r.tag(), Math.min(1.0, uses.get(r.tag()))));
+    for (Device relay : relays()) {
+      double use = Math.min(1.0, uses.get(relay.tag()));
+      levels.put(
+          relay.tag(),
+          relay instanceof Device.Temperature sensor
+              ? Math.max(use, hottestElement(sensor, levels))
+              : use);
+    }
     return levels;
+  }
+
+  /** The hottest element that a sensor follows, over its own limit: it still rises towards that. */
+  private double hottestElement(Device.Temperature sensor, Map<String, Double> levels) {
+    double hottest = 0.0;
+    for (int number : sensor.sections()) {
+      double limit =
+          SectionElement.limitRiseKelvin(starter.resistors().sections().get(number - 1))
+              .orElse(Double.POSITIVE_INFINITY);
+      double level = levels.get("section-" + number) * limit / sensor.leastRiseKelvin();
+      hottest = Math.max(hottest, level);
+    }
+    return hottest;
   }
 
   private List<Device> relays() {
     return starter.protection().stream()
-        .filter(d -> d instanceof Device.Overload || d instanceof Device.Thermal)
+        .filter(
+            d ->
+                d instanceof Device.Overload
+                    || d instanceof Device.Thermal
+                    || d instanceof Device.Temperature)
         .toList();
   }
 
@@ -221,9 +249,7 @@ public final class Restarts {
       double pause =
           room <= 0.0
               ? Double.POSITIVE_INFINITY
-              : level.getValue() > room
-                  ? forgets(level.getKey()) * Math.log(level.getValue() / room)
-                  : 0.0;
+              : level.getValue() > room ? pause(level.getKey(), level.getValue() / room) : 0.0;
       if (over && !past || over == past && pause > latest) {
         latest = pause;
         by = level.getKey();
@@ -231,6 +257,30 @@ public final class Restarts {
       }
     }
     return new Restart(after, latest, by, past, start);
+  }
+
+  /**
+   * How long a level takes to fall by a factor, s. A sensor follows an element that cools: with τ
+   * the longer of both time constants it falls no later than {@code (1 + t/τ) exp(−t/τ)}, which two
+   * equal ones give.
+   */
+  private double pause(String name, double factor) {
+    double tau = forgets(name);
+    boolean follows = starter.device(name).filter(d -> d instanceof Device.Temperature).isPresent();
+    if (!follows) {
+      return tau * Math.log(factor);
+    }
+    double low = 0.0;
+    double high = 100.0;
+    for (int halving = 0; halving < 60; halving++) {
+      double x = 0.5 * (low + high);
+      if ((1.0 + x) * Math.exp(-x) * factor > 1.0) {
+        low = x;
+      } else {
+        high = x;
+      }
+    }
+    return tau * high;
   }
 
   /** Time constant in s at rest. */
@@ -245,6 +295,13 @@ public final class Restarts {
       return starter.motor().coolingSeconds().orElseThrow();
     }
     Device device = starter.device(name).orElseThrow();
+    if (device instanceof Device.Temperature sensor) {
+      double longest = sensor.lagSeconds() * (1.0 + sensor.accuracy().time());
+      for (int number : sensor.sections()) {
+        longest = Math.max(longest, forgets("section-" + number));
+      }
+      return longest;
+    }
     if (device instanceof Device.Thermal thermal) {
       return thermal.timeConstantSeconds() * (1.0 + thermal.accuracy().time());
     }

@@ -106,7 +106,7 @@ public final class TheSequenceIsSupervised implements Rule {
               "Fit one that waits for the last step and opens the line contactor before "
                   + Show.seconds(worst.limitAtSeconds())
                   + ".")
-          .build(Verdict.BREACH);
+          .build(worst.clearingRatio() < 1.0 ? Verdict.BREACH : Verdict.TIGHT);
     }
     boolean unseen =
         facts.faults(Scenario.Kind.HELD).anyMatch(s -> Exposure.of(facts, s).clearing().isEmpty());

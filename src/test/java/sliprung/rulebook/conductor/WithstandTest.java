@@ -129,7 +129,11 @@ class WithstandTest {
   }
 
   @Test
-  void without_cables_it_is_not_applicable() {
-    assertThat(rule(0.01).judge(CrusherFacts.bare())).isInstanceOf(Rule.Answer.NotApplicable.class);
+  void cables_that_are_not_described_are_not_judged() {
+    Rule.Answer answer = rule(0.01).judge(CrusherFacts.bare());
+    assertThat(((Rule.Answer.Findings) answer).findings())
+        .hasSize(2)
+        .allSatisfy(f -> assertThat(f.verdict()).isEqualTo(Verdict.NOT_JUDGED))
+        .allSatisfy(f -> assertThat(f.missing()).isNotEmpty());
   }
 }

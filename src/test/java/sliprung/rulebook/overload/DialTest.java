@@ -185,11 +185,7 @@ class DialTest {
   }
 
   @Test
-  void another_relay_that_follows_the_motor_leaves_no_dial_to_ask_about() {
-    String thermal =
-        "F2: {kind: thermal, base: 208 A, factor: 1.05, time-constant: 20 min, trips: K1}";
-    assertThat(RULE.judge(CrusherFacts.bare(F2, thermal)))
-        .isInstanceOf(Rule.Answer.NotApplicable.class);
+  void an_element_set_for_short_circuits_protects_no_motor() {
     assertThat(
             CrusherFacts.finding(
                     RULE,
@@ -197,5 +193,23 @@ class DialTest {
                     "motor")
                 .verdict())
         .isEqualTo(Verdict.BREACH);
+  }
+
+  private static Finding standIn(String... replacements) {
+    return ((Rule.Answer.Findings) new TheDialFitsTheMotor().judge(CrusherFacts.bare(replacements)))
+        .findings().stream().filter(f -> !f.subject().equals("motor")).findFirst().orElseThrow();
+  }
+
+  /** 300 A × 1.2 = 360 A, 173 % of 208 A: whatever else it does, it lets the winding burn. */
+  @Test
+  void a_thermal_relay_in_its_place_is_held_against_the_motor_too() {
+    String relay = "kind: overload, class: 10, dial: 208 A, trips: K1";
+    Finding far =
+        standIn(relay, "kind: thermal, base: 300 A, factor: 1.2, time-constant: 10 min, trips: K1");
+    assertThat(far.verdict()).isEqualTo(Verdict.BREACH);
+    assertThat(far.says()).contains("stands in for it");
+    Finding near =
+        standIn(relay, "kind: thermal, base: 208 A, factor: 1.1, time-constant: 10 min, trips: K1");
+    assertThat(near.verdict()).isEqualTo(Verdict.CLEAR);
   }
 }
