@@ -316,6 +316,11 @@ public record Starter(
     return with(supply, other, load, resistors, steps, protection);
   }
 
+  /** The same starter on another source. */
+  public Starter withSupply(Supply other) {
+    return with(other, motor, load, resistors, steps, protection);
+  }
+
   /** The same starter with another load. */
   public Starter withLoad(Load other) {
     return with(supply, motor, other, resistors, steps, protection);

@@ -77,6 +77,17 @@ class ImportTableTest {
                       "review",
                       "org.apache.commons.math3..")),
               Map.entry(
+                  "sensitivity",
+                  List.of(
+                      "quantity",
+                      "starter",
+                      "machine",
+                      "runup",
+                      "protection",
+                      "tolerance",
+                      RULES,
+                      "review")),
+              Map.entry(
                   "dial",
                   List.of(
                       "quantity",
@@ -117,6 +128,7 @@ class ImportTableTest {
                       "review",
                       "dial",
                       "sampling",
+                      "sensitivity",
                       "chart",
                       "com.fasterxml.jackson..",
                       "com.openhtmltopdf..",
@@ -139,6 +151,7 @@ class ImportTableTest {
                       "review",
                       "dial",
                       "sampling",
+                      "sensitivity",
                       "chart",
                       "record",
                       "picocli.."))));

@@ -33,7 +33,8 @@ class ReviewJsonTest {
             "motor",
             "starts",
             "restarts",
-            "findings");
+            "findings",
+            "measure_first");
     assertThat(keys(JSON.get("inputs").get(0))).containsExactly("file", "sha256", "text");
     assertThat(keys(JSON.get("motor")))
         .containsExactly(
