@@ -53,6 +53,7 @@ final class Summary {
     for (String line : wrap(Printable.of(answers.headline()), terminal.columns())) {
       out.println(terminal.strong(line));
     }
+    measureFirst.readings().forEach(says -> wrapped("", Printable.of(says), "  "));
     measureFirst.says().ifPresent(says -> wrapped("", Printable.of(says), "  "));
     review.method().ifPresent(m -> wrapped("", "Model error: " + Printable.of(m.says()), "  "));
     for (Answer answer : answers.answers()) {

@@ -36,5 +36,10 @@ final class MeasureFirstJson {
       json.writeEndObject();
     }
     json.writeEndArray();
+    json.writeArrayFieldStart("readings");
+    for (String says : first.readings()) {
+      json.writeString(says);
+    }
+    json.writeEndArray();
   }
 }

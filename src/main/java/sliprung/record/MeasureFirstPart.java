@@ -16,10 +16,23 @@ final class MeasureFirstPart {
   private MeasureFirstPart() {}
 
   static void write(Html page, MeasureFirst first) {
-    if (first.margins().isEmpty()) {
+    if (first.margins().isEmpty() && first.readings().isEmpty()) {
       return;
     }
     page.section("measure-first", "Measure first");
+    if (!first.readings().isEmpty()) {
+      page.element("p", String.join(" ", first.readings()));
+      page.element(
+          "p",
+          "What the readings leave open is used here only, to rank what to measure: every verdict"
+              + " rests on the inputs as described, over their whole spreads.",
+          "class",
+          "quiet");
+    }
+    if (first.margins().isEmpty()) {
+      page.end();
+      return;
+    }
     first.says().ifPresent(says -> page.element("p", says));
     Cells cells =
         new Cells(page)

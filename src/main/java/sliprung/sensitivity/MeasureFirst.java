@@ -18,20 +18,22 @@ import sliprung.rulebook.Verdict;
  * verdict rests on them.
  *
  * @param margins the thinnest first
+ * @param readings what the readings of a real start leave open, in sentences; none: no readings
  */
-public record MeasureFirst(List<ThinMargin> margins) {
+public record MeasureFirst(List<ThinMargin> margins, List<String> readings) {
   /** How many rules are asked. */
   static final int RULES = 6;
 
   /** Nothing was asked. */
-  public static final MeasureFirst NONE = new MeasureFirst(List.of());
+  public static final MeasureFirst NONE = new MeasureFirst(List.of(), List.of());
 
   /** A margin that moves less than this, over the wanted one, is not moved. */
   private static final double UNMOVED = 5e-3;
 
-  /** Copies the list. */
+  /** Copies the lists. */
   public MeasureFirst {
     margins = List.copyOf(margins);
+    readings = List.copyOf(readings);
   }
 
   /**
@@ -40,7 +42,8 @@ public record MeasureFirst(List<ThinMargin> margins) {
    */
   public static MeasureFirst of(Review review) {
     List<Finding> thin = thinnest(review);
-    List<UncertainInput> inputs = UncertainInputs.of(review.starter());
+    List<Narrowed> narrowed = StartReadings.of(review.starter());
+    List<UncertainInput> inputs = UncertainInputs.of(review.starter(), narrowed);
     Map<Question, List<Sensitivity>> moved = new TreeMap<>();
     for (DecidingStarts starts : DecidingStarts.of(review, thin)) {
       for (Map.Entry<Question, List<Sensitivity>> e : moved(starts, inputs).entrySet()) {
@@ -51,7 +54,8 @@ public record MeasureFirst(List<ThinMargin> margins) {
         thin.stream()
             .filter(f -> moved.containsKey(Question.of(f)))
             .map(f -> new ThinMargin(f, moved.get(Question.of(f))))
-            .toList());
+            .toList(),
+        StartReadings.says(review.starter(), narrowed));
   }
 
   /** The thinnest finding of each rule whose margin rests on a computed start. */

@@ -67,8 +67,12 @@ public record Sensitivity(
     String spread =
         Math.abs(up - down) < 1e-9
             ? "±" + Show.percent(up)
-            : "−" + Show.percent(down) + " to +" + Show.percent(up);
+            : signed(-down) + " to " + signed(up) + " by the readings";
     return grade.word() + ", " + spread;
+  }
+
+  private static String signed(double share) {
+    return (share < 0.0 ? "−" : "+") + Show.percent(Math.abs(share));
   }
 
   /** What measuring it first would settle, in a sentence. */

@@ -10,8 +10,8 @@ import sliprung.starter.Starter;
  * @param path in the file, such as {@code load.inertia}
  * @param words with their article, such as {@code the load's inertia}
  * @param grade how well it is known; a default that was filled in counts as estimated
- * @param low least factor on its value, below 1
- * @param high greatest factor on its value, above 1
+ * @param low least factor on its value
+ * @param high greatest factor on its value
  * @param starter the starter with that factor on the value
  */
 record UncertainInput(

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.function.DoubleFunction;
 import java.util.function.UnaryOperator;
+import sliprung.sensitivity.Narrowed.Span;
 import sliprung.starter.EvidenceGrade;
 import sliprung.starter.ResistorBank;
 import sliprung.starter.ResistorBank.Section;
@@ -15,16 +16,23 @@ import sliprung.starter.Supply;
 final class UncertainInputs {
   private final Starter starter;
   private final Grades grades;
+  private final List<Narrowed> narrowed;
   private final List<UncertainInput> inputs = new ArrayList<>();
 
-  private UncertainInputs(Starter starter) {
+  private UncertainInputs(Starter starter, List<Narrowed> narrowed) {
+    this.narrowed = narrowed;
     this.starter = starter;
     this.grades = new Grades(starter);
   }
 
   /** All that a starter has. A value of zero moves nothing and is left out. */
   static List<UncertainInput> of(Starter starter) {
-    UncertainInputs all = new UncertainInputs(starter);
+    return of(starter, List.of());
+  }
+
+  /** All that a starter has, the load no further than readings leave it open. */
+  static List<UncertainInput> of(Starter starter, List<Narrowed> narrowed) {
+    UncertainInputs all = new UncertainInputs(starter, narrowed);
     all.load();
     all.bank();
     all.motor();
@@ -96,8 +104,15 @@ final class UncertainInputs {
   }
 
   private void add(String path, String words, EvidenceGrade grade, DoubleFunction<Starter> with) {
-    inputs.add(
-        new UncertainInput(path, words, grade, 1.0 - grade.spread(), 1.0 + grade.spread(), with));
+    Span graded = new Span(1.0 - grade.spread(), 1.0 + grade.spread());
+    Span open =
+        narrowed.stream()
+            .filter(n -> n.value().path().equals(path))
+            .findFirst()
+            .flatMap(Narrowed::left)
+            .flatMap(left -> left.within(graded))
+            .orElse(graded);
+    inputs.add(new UncertainInput(path, words, grade, open.low(), open.high(), with));
   }
 
   private Starter sections(UnaryOperator<Section> change) {

@@ -80,6 +80,7 @@ class ImportTableTest {
                   "sensitivity",
                   List.of(
                       "quantity",
+                      "numeric",
                       "starter",
                       "machine",
                       "runup",

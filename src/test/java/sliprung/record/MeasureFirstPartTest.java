@@ -62,7 +62,8 @@ class MeasureFirstPartTest {
         List.of(),
         "0.1.0",
         new MeasureFirst(
-            List.of(new ThinMargin(finding, List.of(moves)), new ThinMargin(finding, List.of()))));
+            List.of(new ThinMargin(finding, List.of(moves)), new ThinMargin(finding, List.of())),
+            List.of(words)));
   }
 
   @Test

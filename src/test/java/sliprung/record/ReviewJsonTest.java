@@ -34,7 +34,8 @@ class ReviewJsonTest {
             "starts",
             "restarts",
             "findings",
-            "measure_first");
+            "measure_first",
+            "readings");
     assertThat(keys(JSON.get("inputs").get(0))).containsExactly("file", "sha256", "text");
     assertThat(keys(JSON.get("motor")))
         .containsExactly(
