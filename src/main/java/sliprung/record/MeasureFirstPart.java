@@ -24,8 +24,9 @@ final class MeasureFirstPart {
       page.element("p", String.join(" ", first.readings()));
       page.element(
           "p",
-          "What the readings leave open is used here only, to rank what to measure: every verdict"
-              + " rests on the inputs as described, over their whole spreads.",
+          "The readings are held against a start whose circuit and cold bank are as described,"
+              + " its timers and levels anywhere in their spread. What they leave open is used here only, to rank what to measure: every"
+              + " verdict rests on the inputs as described, over their whole spreads.",
           "class",
           "quiet");
     }

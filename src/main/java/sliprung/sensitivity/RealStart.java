@@ -2,7 +2,6 @@ package sliprung.sensitivity;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.function.DoubleUnaryOperator;
 import sliprung.machine.Machine;
@@ -84,42 +83,74 @@ final class RealStart {
         : Optional.of(Root.find(rising, within.low(), within.high(), ACCURACY));
   }
 
-  /** The worst of computed less the least that agrees, per unit of its accuracy. */
+  /** The worst of what could have been read less the least that agrees, in accuracies. */
   private double shortfall(double inertia, double torque) {
-    return computed(inertia, torque).stream().mapToDouble(c -> c.off() + 1.0).min().orElseThrow();
+    return compared(inertia, torque).stream().mapToDouble(c -> c.most() + 1.0).min().orElseThrow();
   }
 
-  /** The worst of computed less the greatest that agrees, per unit of its accuracy. */
+  /** The worst of what could have been read less the greatest that agrees, in accuracies. */
   private double excess(double inertia, double torque) {
-    return computed(inertia, torque).stream().mapToDouble(c -> c.off() - 1.0).max().orElseThrow();
+    return compared(inertia, torque).stream().mapToDouble(c -> c.least() - 1.0).max().orElseThrow();
   }
 
-  private record Compared(double computed, double read, double accuracy) {
-    double off() {
-      return (computed - read) / accuracy;
+  /**
+   * Computed less read, in accuracies of the reading.
+   *
+   * @param least with timers and levels of either side
+   * @param most likewise
+   */
+  private record Compared(double least, double most) {
+    static Compared of(double read, double accuracy, double early, double late) {
+      return new Compared(
+          (Math.min(early, late) - read) / accuracy, (Math.max(early, late) - read) / accuracy);
     }
   }
 
-  private List<Compared> computed(double inertia, double torque) {
-    double motor = starter.motor().inertia();
-    double driven = starter.load().inertia();
-    double factor = (motor + inertia * driven) / (motor + driven);
-    StartHistory start =
-        simulator.run(
-            Scenario.PERMITTED, new Conditions(source, torque, 1.0, 1.0, 1.0, factor, List.of()));
+  /** Timers and levels were somewhere in their spread: each reading may have them at either end. */
+  private List<Compared> compared(double inertia, double torque) {
+    StartHistory early = start(inertia, torque, -1.0);
+    StartHistory late =
+        starter.timerSpread() == 0.0 && starter.levelSpread() == 0.0
+            ? early
+            : start(inertia, torque, 1.0);
     List<Compared> all = new ArrayList<>();
     readings
         .runUpSeconds()
         .ifPresent(
             s ->
                 all.add(
-                    new Compared(start.runUpSeconds().orElse(NEVER), s, readings.clockSeconds())));
-    for (Map.Entry<String, Double> e : readings.ampsBefore().entrySet()) {
-      all.add(
-          new Compared(
-              ampsBefore(start, e.getKey()), e.getValue(), readings.clamp() * e.getValue()));
-    }
+                    Compared.of(
+                        s,
+                        readings.clockSeconds(),
+                        early.runUpSeconds().orElse(NEVER),
+                        late.runUpSeconds().orElse(NEVER))));
+    readings
+        .ampsBefore()
+        .forEach(
+            (tag, amps) ->
+                all.add(
+                    Compared.of(
+                        amps,
+                        readings.clamp() * amps,
+                        ampsBefore(early, tag),
+                        ampsBefore(late, tag))));
     return all;
+  }
+
+  private StartHistory start(double inertia, double torque, double lateness) {
+    double motor = starter.motor().inertia();
+    double driven = starter.load().inertia();
+    double factor = (motor + inertia * driven) / (motor + driven);
+    return simulator.run(
+        Scenario.PERMITTED,
+        new Conditions(
+            source,
+            torque,
+            1.0,
+            1.0 + lateness * starter.timerSpread(),
+            1.0 - lateness * starter.levelSpread(),
+            factor,
+            List.of()));
   }
 
   private static double ampsBefore(StartHistory start, String contactor) {

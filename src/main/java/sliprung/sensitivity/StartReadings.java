@@ -56,16 +56,17 @@ final class StartReadings {
                           .or(() -> explained(s, inertia, torque, FINE_GRID))
                           .stream())
               .toList();
-      all.add(new Narrowed(LoadValue.INERTIA, inertia, hull(explained, Both::inertia)));
-      all.add(new Narrowed(LoadValue.TORQUE, torque, hull(explained, Both::torque)));
+      all.add(Narrowed.fixed(LoadValue.INERTIA, inertia, hull(explained, Both::inertia)));
+      all.add(Narrowed.varying(LoadValue.TORQUE, torque, hull(explained, Both::torque), differs()));
     }
     if (readings.runningAmps().isPresent()) {
       Span running = ofOneStart(LoadValue.RUNNING);
       all.add(
-          new Narrowed(
+          Narrowed.varying(
               LoadValue.RUNNING,
               running,
-              starts.stream().flatMap(s -> s.running(running).stream()).reduce(Span::and)));
+              starts.stream().flatMap(s -> s.running(running).stream()).reduce(Span::and),
+              differs()));
     }
     return List.copyOf(all);
   }
@@ -118,9 +119,12 @@ final class StartReadings {
   /** A load may be off and, in the start that was read, anywhere in what differs between starts. */
   private Span ofOneStart(LoadValue value) {
     Span graded = graded(value);
+    return new Span(graded.low() * differs().low(), graded.high() * differs().high());
+  }
+
+  private Span differs() {
     Load load = starter.load();
-    return new Span(
-        graded.low() * (1.0 + load.spreadLow()), graded.high() * (1.0 + load.spreadHigh()));
+    return new Span(1.0 + load.spreadLow(), 1.0 + load.spreadHigh());
   }
 
   /** What the readings say, in sentences. */
@@ -157,7 +161,7 @@ final class StartReadings {
           + Show.three(n.before().high() * described)
           + ".";
     }
-    return "They leave "
+    return "The readings leave "
         + n.value().words()
         + ", in that start, between "
         + Show.percent(left.low())

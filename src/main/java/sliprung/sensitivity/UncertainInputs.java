@@ -109,8 +109,8 @@ final class UncertainInputs {
         narrowed.stream()
             .filter(n -> n.value().path().equals(path))
             .findFirst()
-            .flatMap(Narrowed::left)
-            .flatMap(left -> left.within(graded))
+            .flatMap(Narrowed::described)
+            .flatMap(d -> d.within(graded))
             .orElse(graded);
     inputs.add(new UncertainInput(path, words, grade, open.low(), open.high(), with));
   }

@@ -143,11 +143,30 @@ class StartReadingsTest {
   }
 
   @Test
+  void timers_may_have_been_anywhere_in_their_spread() {
+    StarterText sharp = readAsItIs();
+    StarterText spread = sharp.line("timer-spread:", "timer-spread: 5 %");
+
+    Span few = of(StartReadings.of(sharp.starter()), LoadValue.INERTIA).left().orElseThrow();
+    Span many = of(StartReadings.of(spread.starter()), LoadValue.INERTIA).left().orElseThrow();
+    assertThat(many.low()).isLessThan(few.low());
+    assertThat(many.high()).isGreaterThan(few.high());
+  }
+
+  @Test
   void a_load_that_differs_between_starts_leaves_more() {
     StarterText differs = readAsItIs().line("spread:", "spread: [-20 %, +20 %]");
     Narrowed torque = of(StartReadings.of(differs.starter()), LoadValue.TORQUE);
 
     assertThat(torque.before().low()).isLessThan(0.77);
+    Narrowed running = of(StartReadings.of(differs.starter()), LoadValue.RUNNING);
+    Span there = running.left().orElseThrow();
+    assertThat(running.described())
+        .hasValueSatisfying(
+            d -> {
+              assertThat(d.low()).isEqualTo(there.low() / 1.2);
+              assertThat(d.high()).isEqualTo(there.high() / 0.8);
+            });
     assertThat(
             of(StartReadings.of(differs.starter()), LoadValue.INERTIA).left().orElseThrow().high())
         .isGreaterThan(
