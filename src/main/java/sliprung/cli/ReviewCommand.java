@@ -28,6 +28,7 @@ import sliprung.record.RecordWriter;
 import sliprung.review.Review;
 import sliprung.review.Reviewer;
 import sliprung.rulebook.catalogue.Catalogue;
+import sliprung.sensitivity.MeasureFirst;
 
 /** The main job. */
 @Command(
@@ -67,6 +68,12 @@ final class ReviewCommand implements Callable<Integer> {
       description = "Paper of review.pdf: a4 (default) or letter. Asks for --pdf by itself.")
   private Paper paper;
 
+  @Option(
+      names = "--measure-first",
+      description =
+          "Print which uncertain input moves the thinnest margin most; a record always says it.")
+  private boolean measureFirst;
+
   @Option(names = "--all", description = "Print every clear finding.")
   private boolean everything;
 
@@ -77,7 +84,11 @@ final class ReviewCommand implements Callable<Integer> {
   }
 
   private record Done(
-      Path file, Review review, StarterReading.Described described, double seconds) {
+      Path file,
+      Review review,
+      StarterReading.Described described,
+      double seconds,
+      MeasureFirst measureFirst) {
     Dossier dossier() {
       return new Dossier(
           review,
@@ -88,7 +99,8 @@ final class ReviewCommand implements Callable<Integer> {
               .map(v -> new AsRead(v.path(), v.text(), v.value(), v.unit()))
               .toList(),
           StatorBands.of(review.starter()),
-          ProgramVersion.text());
+          ProgramVersion.text(),
+          measureFirst);
     }
   }
 
@@ -108,13 +120,16 @@ final class ReviewCommand implements Callable<Integer> {
       long from = System.nanoTime();
       Review review = Reviewer.review(read.get(i).starter(), on);
       double seconds = (System.nanoTime() - from) / 1e9;
-      done.add(new Done(files.get(i), review, read.get(i), seconds));
+      MeasureFirst first =
+          measureFirst || directory != null ? MeasureFirst.of(review) : MeasureFirst.NONE;
+      done.add(new Done(files.get(i), review, read.get(i), seconds, first));
     }
     Optional<String> failure = directory == null ? Optional.empty() : write(done);
     Summary summary = new Summary(out, terminal, everything);
     int status = ExitStatus.CLEAR;
     for (Done one : done) {
-      summary.print(one.review(), one.seconds());
+      summary.print(
+          one.review(), one.seconds(), measureFirst ? one.measureFirst() : MeasureFirst.NONE);
       if (directory != null && failure.isEmpty()) {
         Path place = place(one);
         summary.written(place.resolve("review.html").toString(), sheets(place));

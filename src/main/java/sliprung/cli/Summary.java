@@ -11,6 +11,7 @@ import sliprung.review.Question;
 import sliprung.review.Review;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.Verdict;
+import sliprung.sensitivity.MeasureFirst;
 
 /** A review as a technician reads it on a terminal: plain lines that survive a pipe. */
 final class Summary {
@@ -35,8 +36,13 @@ final class Summary {
     this.everything = everything;
   }
 
-  /** Prints a review that took so many seconds. */
-  void print(Review review, double seconds) {
+  /**
+   * Prints a review.
+   *
+   * @param seconds that it took
+   * @param measureFirst what to measure first; none where nobody asked
+   */
+  void print(Review review, double seconds, MeasureFirst measureFirst) {
     Answers answers = Answers.of(review);
     wrapped(
         "",
@@ -47,6 +53,8 @@ final class Summary {
     for (String line : wrap(Printable.of(answers.headline()), terminal.columns())) {
       out.println(terminal.strong(line));
     }
+    measureFirst.readings().forEach(says -> wrapped("", Printable.of(says), "  "));
+    measureFirst.says().ifPresent(says -> wrapped("", Printable.of(says), "  "));
     review.method().ifPresent(m -> wrapped("", "Model error: " + Printable.of(m.says()), "  "));
     for (Answer answer : answers.answers()) {
       out.println();

@@ -23,6 +23,7 @@ import sliprung.starter.Interlocks;
 import sliprung.starter.Limits;
 import sliprung.starter.Load;
 import sliprung.starter.Motor;
+import sliprung.starter.Readings;
 import sliprung.starter.ResistorBank;
 import sliprung.starter.Starter;
 import sliprung.starter.Step;
@@ -56,7 +57,8 @@ final class StarterAssembly {
     "ambient",
     "evidence",
     "distributions",
-    "accepted"
+    "accepted",
+    "readings"
   };
 
   /** Names of parts in a record: a device of that tag could not be told from the part. */
@@ -155,6 +157,7 @@ final class StarterAssembly {
     Map<String, Double> margins = judgement.margins();
     List<AcceptedDeviation> accepted = judgement.accepted();
     Map<Varying, Distribution> distributions = judgement.distributions();
+    Optional<Readings> readings = ReadingsReader.read(root, supply, steps);
     tags(root);
     coordination(root, switchgear);
     Map<String, EvidenceGrade> evidence = judgement.evidence();
@@ -190,7 +193,8 @@ final class StarterAssembly {
             reading.notYetJudged(),
             method,
             reading.dialScales(),
-            distributions));
+            distributions,
+            readings));
   }
 
   /** One tag, one thing: findings name their subject by its tag. */

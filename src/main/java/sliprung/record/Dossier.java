@@ -7,6 +7,7 @@ import java.util.HexFormat;
 import java.util.List;
 import sliprung.chart.Band;
 import sliprung.review.Review;
+import sliprung.sensitivity.MeasureFirst;
 
 /**
  * Everything that a record is written from.
@@ -16,10 +17,26 @@ import sliprung.review.Review;
  * @param values values of the starter file as typed and as taken
  * @param bands devices that measure stator current, for the time-current sheet
  * @param program version of the program
+ * @param measureFirst which inputs to measure first
  */
 public record Dossier(
-    Review review, List<InputFile> inputs, List<AsRead> values, List<Band> bands, String program) {
+    Review review,
+    List<InputFile> inputs,
+    List<AsRead> values,
+    List<Band> bands,
+    String program,
+    MeasureFirst measureFirst) {
   private static final int SHORT = 12;
+
+  /** A dossier without what to measure first. */
+  public Dossier(
+      Review review,
+      List<InputFile> inputs,
+      List<AsRead> values,
+      List<Band> bands,
+      String program) {
+    this(review, inputs, values, bands, program, MeasureFirst.NONE);
+  }
 
   /** Copies the lists. */
   public Dossier {

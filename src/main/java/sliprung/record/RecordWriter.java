@@ -25,7 +25,9 @@ public final class RecordWriter {
     Review review = dossier.review();
     CompletableFuture<String> json =
         CompletableFuture.supplyAsync(
-            () -> ReviewJson.text(review, dossier.inputs(), dossier.program()));
+            () ->
+                ReviewJson.text(
+                    review, dossier.inputs(), dossier.program(), dossier.measureFirst()));
     Contents contents = Contents.of(dossier);
     Optional<CompletableFuture<byte[]>> pdf =
         paper.map(p -> CompletableFuture.supplyAsync(() -> ReviewPdf.bytes(contents, p)));

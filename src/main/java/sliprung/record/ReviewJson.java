@@ -19,6 +19,7 @@ import sliprung.rulebook.ComputedStart;
 import sliprung.rulebook.Finding;
 import sliprung.rulebook.resistor.Restart;
 import sliprung.runup.RunUpFigures;
+import sliprung.sensitivity.MeasureFirst;
 import sliprung.starter.Motor;
 import sliprung.tolerance.Corner;
 
@@ -37,6 +38,19 @@ public final class ReviewJson {
    * @param program version of the program
    */
   public static String text(Review review, List<InputFile> inputs, String program) {
+    return text(review, inputs, program, MeasureFirst.NONE);
+  }
+
+  /**
+   * The whole file.
+   *
+   * @param review what was found
+   * @param inputs it was made from
+   * @param program version of the program
+   * @param measureFirst which inputs to measure first
+   */
+  public static String text(
+      Review review, List<InputFile> inputs, String program, MeasureFirst measureFirst) {
     StringWriter out = new StringWriter();
     DefaultIndenter lines = new DefaultIndenter("  ", "\n");
     DefaultPrettyPrinter printer = new DefaultPrettyPrinter();
@@ -72,6 +86,7 @@ public final class ReviewJson {
         finding(fields, finding);
       }
       json.writeEndArray();
+      MeasureFirstJson.write(fields, measureFirst);
       json.writeEndObject();
     } catch (IOException impossible) {
       // a StringWriter does not fail

@@ -26,6 +26,7 @@ final class ReviewLayout {
         BasisPart.notJudged(page, review);
       }
     }
+    MeasureFirstPart.write(page, dossier.measureFirst());
     page.section("margins", "Margins");
     pictures.margins().forEach(p -> figure(page, p));
     page.end();

@@ -94,6 +94,21 @@ public final class Reviewer {
         new StartComputation(starter, machine, circuit).compute());
   }
 
+  /**
+   * What rules may look at of some starts only, once for each circuit that the plate leaves open.
+   */
+  public static List<Facts> facts(Starter starter, StartSelection selection) {
+    List<Facts> all = new ArrayList<>();
+    for (Identification identification : NameplateIdentification.identify(starter.motor())) {
+      Machine machine = machine(starter, identification);
+      String circuit = all.isEmpty() ? "" : "circuit-" + (all.size() + 1);
+      StartComputation.Computed computed =
+          new StartComputation(starter, machine, circuit).compute(selection);
+      all.add(facts(starter, machine, identification, computed));
+    }
+    return all;
+  }
+
   private static Facts facts(
       Starter starter,
       Machine machine,

@@ -65,9 +65,13 @@ final class StartComputation {
   private record AtCorner(
       Corner corner, Optional<RunningPoint> running, List<ComputedStart> starts) {}
 
-  /** The permitted start of one corner, both ways. */
+  /** The permitted start of one corner, both ways; or the steady one for both. */
   private record Both(
-      Corner corner, Conditions conditions, StartHistory steady, StartHistory withTransient) {
+      Corner corner,
+      Conditions conditions,
+      StartHistory steady,
+      StartHistory withTransient,
+      boolean isBoth) {
     ModelError error() {
       return ModelError.between(steady, withTransient);
     }
@@ -75,11 +79,22 @@ final class StartComputation {
 
   /** Corners share nothing, so both cores work on them; the order stays that of the corners. */
   Computed compute() {
-    List<Both> permitted = known.permitted(circuit, this::permitted);
+    return compute(known.permitted(circuit, this::permitted), faults(), starter.method());
+  }
+
+  /** Only some starts: the permitted ones and some faults at some corners, by one method. */
+  Computed compute(StartSelection selection) {
+    Map<Corner, Conditions> points = new LinkedHashMap<>();
+    selection.corners().forEach(c -> points.put(c, Corners.conditions(starter, c)));
+    List<Scenario> wanted = faults().stream().filter(selection.faults()::contains).toList();
+    return compute(permitted(points, selection.withTransient()), wanted, selection.method());
+  }
+
+  private Computed compute(List<Both> permitted, List<Scenario> faults, Starter.Method asked) {
     Map<Corner, ModelError> errors = new LinkedHashMap<>();
     permitted.forEach(p -> errors.put(p.corner(), p.error()));
-    RunUpMethod method = RunUpMethod.choose(starter.method(), errors);
-    List<AtCorner> corners = permitted.parallelStream().map(p -> at(p, method)).toList();
+    RunUpMethod method = RunUpMethod.choose(asked, errors);
+    List<AtCorner> corners = permitted.parallelStream().map(p -> at(p, faults, method)).toList();
     List<ComputedStart> starts = new ArrayList<>();
     Map<Corner, Optional<RunningPoint>> running = new LinkedHashMap<>();
     for (AtCorner at : corners) {
@@ -92,15 +107,23 @@ final class StartComputation {
   private List<Both> permitted() {
     Map<Corner, Conditions> points = new LinkedHashMap<>(Corners.of(starter));
     points.putAll(WorstPoints.of(starter, simulator));
+    return permitted(points, true);
+  }
+
+  private List<Both> permitted(Map<Corner, Conditions> points, boolean withTransient) {
     return points.entrySet().stream().toList().parallelStream()
-        .map(
-            e ->
-                new Both(
-                    e.getKey(),
-                    e.getValue(),
-                    simulator.run(Scenario.PERMITTED, e.getValue()),
-                    simulator.runTransient(Scenario.PERMITTED, e.getValue())))
+        .map(e -> both(e.getKey(), e.getValue(), withTransient))
         .toList();
+  }
+
+  private Both both(Corner corner, Conditions conditions, boolean withTransient) {
+    StartHistory steady = simulator.run(Scenario.PERMITTED, conditions);
+    return new Both(
+        corner,
+        conditions,
+        steady,
+        withTransient ? simulator.runTransient(Scenario.PERMITTED, conditions) : steady,
+        withTransient);
   }
 
   /**
@@ -115,12 +138,12 @@ final class StartComputation {
       return simulator.runReclosed(fault, at.conditions());
     }
     StartHistory steady = simulator.run(fault, at.conditions());
-    return at.corner().isNominal()
+    return at.corner().isNominal() && at.isBoth()
         ? steady.withPeaksOf(simulator.runTransient(fault, at.conditions()))
         : steady;
   }
 
-  private AtCorner at(Both both, RunUpMethod method) {
+  private AtCorner at(Both both, List<Scenario> faults, RunUpMethod method) {
     Corner corner = both.corner();
     Conditions conditions = both.conditions();
     StartHistory chosen =
@@ -148,7 +171,7 @@ final class StartComputation {
 
     DevicePreload forgotten = before.remembered().onWarmBank(sections);
     PartPreload hot = before.parts(0.0, sections);
-    for (Scenario fault : faults()) {
+    for (Scenario fault : faults) {
       StartProtection history =
           evaluator.over(known.fault(circuit, corner, fault, () -> fault(fault, both)));
       if (fault.kind() == Scenario.Kind.RUNNING_LOCKED) {

@@ -40,6 +40,7 @@ import java.util.stream.IntStream;
  * @param dialScales scales of real dials, by the dial's name such as {@code protection.F2.dial}
  * @param distributions how what varies from start to start is spread; one that is not named lies
  *     anywhere in its spread with the same chance
+ * @param readings of one real start; they tell what to measure, never a verdict
  */
 public record Starter(
     String name,
@@ -69,7 +70,8 @@ public record Starter(
     List<String> notYetJudged,
     Method method,
     Map<String, DialScale> dialScales,
-    Map<Varying, Distribution> distributions) {
+    Map<Varying, Distribution> distributions,
+    Optional<Readings> readings) {
 
   /** The rule book a starter is held against. */
   public enum Practice {
@@ -212,7 +214,8 @@ public record Starter(
         notYetJudged,
         method,
         Map.of(),
-        Map.of());
+        Map.of(),
+        Optional.empty());
   }
 
   /** Copies the collections and checks that each section has its step. */
@@ -316,6 +319,11 @@ public record Starter(
     return with(supply, other, load, resistors, steps, protection);
   }
 
+  /** The same starter on another source. */
+  public Starter withSupply(Supply other) {
+    return with(other, motor, load, resistors, steps, protection);
+  }
+
   /** The same starter with another load. */
   public Starter withLoad(Load other) {
     return with(supply, motor, other, resistors, steps, protection);
@@ -356,6 +364,7 @@ public record Starter(
         notYetJudged,
         method,
         dialScales,
-        distributions);
+        distributions,
+        readings);
   }
 }

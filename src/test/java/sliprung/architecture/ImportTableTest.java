@@ -77,6 +77,18 @@ class ImportTableTest {
                       "review",
                       "org.apache.commons.math3..")),
               Map.entry(
+                  "sensitivity",
+                  List.of(
+                      "quantity",
+                      "numeric",
+                      "starter",
+                      "machine",
+                      "runup",
+                      "protection",
+                      "tolerance",
+                      RULES,
+                      "review")),
+              Map.entry(
                   "dial",
                   List.of(
                       "quantity",
@@ -117,6 +129,7 @@ class ImportTableTest {
                       "review",
                       "dial",
                       "sampling",
+                      "sensitivity",
                       "chart",
                       "com.fasterxml.jackson..",
                       "com.openhtmltopdf..",
@@ -139,6 +152,7 @@ class ImportTableTest {
                       "review",
                       "dial",
                       "sampling",
+                      "sensitivity",
                       "chart",
                       "record",
                       "picocli.."))));

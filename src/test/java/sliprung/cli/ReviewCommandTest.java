@@ -112,4 +112,15 @@ class ReviewCommandTest {
     assertThat(ran.err()).contains("give --out DIR");
     assertThat(ran.out()).isEmpty();
   }
+
+  @Test
+  void should_say_what_to_measure_first_only_when_asked() {
+    String small = Path.of("src", "test", "resources", "starters", "two-steps.yaml").toString();
+    String line = "Thinnest margin that an input moves: ";
+
+    assertThat(run("review", small).out()).doesNotContain(line);
+    Ran asked = run("review", small, "--measure-first");
+    assertThat(asked.err()).isEmpty();
+    assertThat(asked.out().replaceAll("\\s+", " ")).contains(line).contains(" to between ");
+  }
 }

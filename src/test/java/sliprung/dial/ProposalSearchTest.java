@@ -144,6 +144,7 @@ class ProposalSearchTest {
         s.notYetJudged(),
         s.method(),
         scales,
-        s.distributions());
+        s.distributions(),
+        s.readings());
   }
 }

@@ -33,7 +33,9 @@ class ReviewJsonTest {
             "motor",
             "starts",
             "restarts",
-            "findings");
+            "findings",
+            "measure_first",
+            "readings");
     assertThat(keys(JSON.get("inputs").get(0))).containsExactly("file", "sha256", "text");
     assertThat(keys(JSON.get("motor")))
         .containsExactly(

@@ -1,0 +1,2 @@
+/** Which uncertain input to measure first: how far each moves the thinnest margins. */
+package sliprung.sensitivity;
