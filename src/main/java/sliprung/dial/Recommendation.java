@@ -157,20 +157,23 @@ final class Recommendation {
         .orElseThrow();
   }
 
-  private static double thinnest(double x, Map<Question, TreeMap<Double, Double>> margins) {
+  private double thinnest(double x, Map<Question, TreeMap<Double, Double>> margins) {
     return margins.values().stream().mapToDouble(m -> interpolated(x, m)).min().orElse(0.0);
   }
 
-  private static double interpolated(double x, NavigableMap<Double, Double> margin) {
-    Map.Entry<Double, Double> below = margin.floorEntry(x);
-    Map.Entry<Double, Double> above = margin.ceilingEntry(x);
+  /** Between the values looked at on either side; a rule that is silent at both thins nothing. */
+  private double interpolated(double x, NavigableMap<Double, Double> margin) {
+    Double low = profile.points().floorKey(x);
+    Double high = profile.points().ceilingKey(x);
+    Double below = low == null ? null : margin.get(low);
+    Double above = high == null ? null : margin.get(high);
     if (below == null || above == null) {
-      return (below == null ? above : below).getValue();
+      return below == null && above == null ? ENOUGH : below == null ? above : below;
     }
-    if (below.getKey().equals(above.getKey())) {
-      return below.getValue();
+    if (low.equals(high)) {
+      return below;
     }
-    double w = (x - below.getKey()) / (above.getKey() - below.getKey());
-    return below.getValue() + w * (above.getValue() - below.getValue());
+    double w = (x - low) / (high - low);
+    return below + w * (above - below);
   }
 }

@@ -47,6 +47,18 @@ class WindowSearchTest {
   }
 
   @Test
+  void a_rule_that_speaks_only_far_outside_says_nothing_of_the_inside() {
+    DialReport report =
+        new Synthetic()
+            .rule("low", x -> x / 1.7)
+            .rule("high", x -> 2.8 / x)
+            .rule("far", x -> x > 12 ? 0.0 : Double.NEGATIVE_INFINITY)
+            .search();
+
+    assertThat(report.recommended().orElseThrow()).isCloseTo(Math.sqrt(1.7 * 2.8), within(0.02));
+  }
+
+  @Test
   void should_keep_a_setting_of_today_that_is_as_good_as_any() {
     DialReport report = new Synthetic().rule("flat", x -> 1.5 + 0 * x).search();
 
