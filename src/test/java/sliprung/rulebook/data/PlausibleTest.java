@@ -28,6 +28,29 @@ class PlausibleTest {
     assertThat(CrusherFacts.says(finding)).matches("\\d\\d checks were made; .*");
   }
 
+  @Test
+  void ratings_in_warmer_air_than_theirs_are_not_judged() {
+    List<Finding> warm =
+        odd("ambient: {motor: 40 °C, panel: 20 °C}", "ambient: {motor: 60 °C, panel: 55 °C}");
+
+    assertThat(warm)
+        .extracting(Finding::subject)
+        .containsExactly("air at the motor", "air in the panel");
+    assertThat(warm).allSatisfy(f -> assertThat(f.verdict()).isEqualTo(Verdict.NOT_JUDGED));
+    assertThat(warm.get(0).missing()).containsExactly("ambient.motor");
+  }
+
+  @Test
+  void wanted_margins_below_one_are_told() {
+    String duty = "duty:\n";
+    Finding finding =
+        CrusherFacts.finding(
+            RULE, CrusherFacts.bare(duty, "margins: {locked/step: 0.1}\n" + duty), "margins");
+
+    assertThat(finding.verdict()).isEqualTo(Verdict.TIGHT);
+    assertThat(CrusherFacts.says(finding)).contains("locked/step 0.10");
+  }
+
   @ParameterizedTest
   @CsvSource(
       delimiter = '|',
