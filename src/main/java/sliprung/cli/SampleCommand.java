@@ -105,6 +105,10 @@ final class SampleCommand implements Callable<Integer> {
                 "%,d of them never ran up: no percentile counts them.",
                 sampled.notRunUp()));
     out.printf(
+        "%nUses are those of the last start of a series: cold, %d in a row from cold; hot, %d from"
+            + " running.%n",
+        starter.duty().coldStarts(), starter.duty().hotStarts());
+    out.printf(
         "%n%-8s %-6s %-22s %s%n", "device", "series", "relay", "operates in (95 % sure: between)");
     for (Sampled.Trips trips : sampled.trips()) {
       out.printf(

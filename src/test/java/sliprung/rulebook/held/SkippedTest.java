@@ -126,6 +126,19 @@ class SkippedTest {
     assertThat(line(amps / 4.0 * 0.999).verdict()).isEqualTo(Verdict.BREACH);
   }
 
+  @Test
+  void no_making_capacity_proves_a_closing_onto_a_residual_voltage() {
+    String reclosed = "reclosed with every step contactor closed";
+    Finding ample = judged(reclosed, PROVEN, OPEN);
+    assertThat(ample.verdict()).isEqualTo(Verdict.NOT_JUDGED);
+    assertThat(ample.margin()).isEmpty();
+    assertThat(ample.missing()).containsExactly("interlocks.steps-open-before-line");
+    // what does not even make the current at rest needs no peak to be a breach
+    String rated = "ratings: {AC-2: 315 A, AC-3: 315 A}";
+    Finding weak = judged(reclosed, PROVEN, OPEN, rated, "ratings: {AC-2: 60 A, AC-3: 60 A}");
+    assertThat(weak.verdict()).isEqualTo(Verdict.BREACH);
+  }
+
   private static Finding line(double amps) {
     return judged(
         "started with rings shorted",
